@@ -1,0 +1,19 @@
+import type { DictionaryEntry } from './dictionary-entry.js';
+import { flow } from './dictionary/flow.js';
+import { lengths } from './dictionary/lengths.js';
+import { properties } from './dictionary/properties.js';
+import { states } from './dictionary/states.js';
+
+/** The quantity dictionary, by name. Forms that serve several sheets, and property equations, are keyed by these names. */
+export const QUANTITIES: Readonly<Record<string, DictionaryEntry>> = Object.freeze(
+  Object.assign(Object.create(null) as Record<string, DictionaryEntry>, states, properties, lengths, flow),
+);
+
+/** Whether a value of `given` serves where `wanted` is asked for. */
+export function serves(given: string, wanted: string): boolean {
+  return given === wanted || covers(given, wanted) || covers(wanted, given);
+}
+
+function covers(wide: string, narrow: string): boolean {
+  return QUANTITIES[wide]?.covers?.includes(narrow) ?? false;
+}
