@@ -1,5 +1,10 @@
 // The engine's whole public surface, written by hand.
-export { SHEET_FORMAT, PROPERTY_FORMAT, CorrelationDefinition, PropertyEquationDefinition } from './sheet/definition.js';
+export {
+  SHEET_FORMAT,
+  PROPERTY_FORMAT,
+  CorrelationDefinition,
+  PropertyEquationDefinition,
+} from './sheet/definition.js';
 export type { Coefficient, Part, ResultKind } from './sheet/definition.js';
 export type {
   Bound,

@@ -40,8 +40,12 @@ export function stripGeometry(input: StripInput): StripGeometry {
     axis,
     runs: runsOf(input.stretches, place, value, input.state),
     stones: input.stretches.flatMap(({ lo, hi }) => [
-      ...(lo ? [{ at: place(lo.value), value: lo.value, side: 'lo' as const, closed: lo.closed ?? true }] : []),
-      ...(hi ? [{ at: place(hi.value), value: hi.value, side: 'hi' as const, closed: hi.closed ?? true }] : []),
+      ...(lo
+        ? [{ at: place(lo.value), value: lo.value, side: 'lo' as const, closed: lo.closed ?? true }]
+        : []),
+      ...(hi
+        ? [{ at: place(hi.value), value: hi.value, side: 'hi' as const, closed: hi.closed ?? true }]
+        : []),
     ]),
     plumb: value === null ? null : { at: place(value), state: input.state ?? 'within' },
   };

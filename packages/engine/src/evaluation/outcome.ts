@@ -63,7 +63,8 @@ export interface Finding {
   message: string;
 }
 
-export type StepKind = 'quantity' | 'property' | 'group' | 'intermediate' | 'result' | 'coefficient' | 'conversion' | 'flux';
+export type StepKind =
+  'quantity' | 'property' | 'group' | 'intermediate' | 'result' | 'coefficient' | 'conversion' | 'flux';
 
 /** One numbered line of the written-out calculation. */
 export interface Step {

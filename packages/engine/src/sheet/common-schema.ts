@@ -109,7 +109,12 @@ export const TableRow = Type.Object(
   closed,
 );
 export const Table = Type.Object(
-  { name: Slug, title: ShortText, source: Type.Optional(Text), rows: Type.Array(TableRow, { minItems: 1, maxItems: 400 }) },
+  {
+    name: Slug,
+    title: ShortText,
+    source: Type.Optional(Text),
+    rows: Type.Array(TableRow, { minItems: 1, maxItems: 400 }),
+  },
   closed,
 );
 export type Table = Static<typeof Table>;
@@ -141,7 +146,11 @@ export const Condition = Type.Object(
 export type Condition = Static<typeof Condition>;
 
 export const Piece = Type.Object(
-  { title: Type.Optional(ShortText), when: Type.Array(Condition, { minItems: 1, maxItems: 8 }), expression: ExpressionText },
+  {
+    title: Type.Optional(ShortText),
+    when: Type.Array(Condition, { minItems: 1, maxItems: 8 }),
+    expression: ExpressionText,
+  },
   closed,
 );
 export type Piece = Static<typeof Piece>;

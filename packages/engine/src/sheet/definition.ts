@@ -97,7 +97,12 @@ export const CorrelationDefinition = Type.Object(
     authors: Type.Array(ShortText, { minItems: 1, maxItems: 12 }),
     year: Type.Union([Type.Integer({ minimum: 1800, maximum: 2100 }), Type.Null()]),
     geometry: Slug,
-    phase: Type.Union([Type.Literal('gas'), Type.Literal('liquid'), Type.Literal('gas-or-liquid'), Type.Literal('gas-and-liquid')]),
+    phase: Type.Union([
+      Type.Literal('gas'),
+      Type.Literal('liquid'),
+      Type.Literal('gas-or-liquid'),
+      Type.Literal('gas-and-liquid'),
+    ]),
     /** What exactly was measured: flow direction, boundary condition, which side. */
     summary: Text,
     averaging: Type.Union([Type.Literal('average'), Type.Literal('local'), Type.Literal('not-stated')]),

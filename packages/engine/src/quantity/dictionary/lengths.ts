@@ -3,7 +3,13 @@ import type { DictionaryPart } from '../dictionary-entry.js';
 /** Lengths, areas and the shape of the apparatus. */
 export const lengths: DictionaryPart = {
   'tube-inside-diameter': { title: 'Tube inside diameter', unit: 'm', symbol: 'd', sign: 'positive' },
-  'tube-length': { title: 'Tube length', unit: 'm', symbol: 'L', sign: 'positive', hint: 'The length over which transfer takes place.' },
+  'tube-length': {
+    title: 'Tube length',
+    unit: 'm',
+    symbol: 'L',
+    sign: 'positive',
+    hint: 'The length over which transfer takes place.',
+  },
   'particle-diameter': { title: 'Particle diameter', unit: 'm', symbol: 'd_p', sign: 'positive' },
   'packing-specific-surface': {
     title: 'Dry specific surface of the packing',

@@ -11,8 +11,20 @@ export const properties: DictionaryPart = {
     sign: 'positive',
     covers: ['gas-density', 'liquid-density'],
   },
-  'gas-viscosity': { title: 'Gas viscosity', unit: 'Pa s', symbol: 'mu', sign: 'positive', hint: 'Dynamic viscosity.' },
-  'liquid-viscosity': { title: 'Liquid viscosity', unit: 'Pa s', symbol: 'mu', sign: 'positive', hint: 'Dynamic viscosity.' },
+  'gas-viscosity': {
+    title: 'Gas viscosity',
+    unit: 'Pa s',
+    symbol: 'mu',
+    sign: 'positive',
+    hint: 'Dynamic viscosity.',
+  },
+  'liquid-viscosity': {
+    title: 'Liquid viscosity',
+    unit: 'Pa s',
+    symbol: 'mu',
+    sign: 'positive',
+    hint: 'Dynamic viscosity.',
+  },
   'fluid-viscosity': {
     title: 'Fluid viscosity',
     unit: 'Pa s',
@@ -40,7 +52,12 @@ export const properties: DictionaryPart = {
     sign: 'positive',
     covers: ['gas-diffusivity', 'liquid-diffusivity'],
   },
-  'surface-tension': { title: 'Surface tension of the liquid', unit: 'N/m', symbol: 'sigma', sign: 'positive' },
+  'surface-tension': {
+    title: 'Surface tension of the liquid',
+    unit: 'N/m',
+    symbol: 'sigma',
+    sign: 'positive',
+  },
   'critical-surface-tension': {
     title: 'Critical surface tension of the packing material',
     unit: 'N/m',

@@ -1,0 +1,36 @@
+/** A number in few significant digits, as plain text: `52 300`, `0.610`, `1.84e-5`. */
+export function formatNumber(value: number, digits = 4): string {
+  const { mantissa, exponent } = parts(value, digits);
+  return exponent === null ? group(mantissa, '\u2009') : `${mantissa}e${exponent}`;
+}
+
+/** The same for TeX, with thin spaces and a power of ten. */
+export function numberTex(value: number, digits = 4): string {
+  const { mantissa, exponent } = parts(value, digits);
+  if (exponent === null) return group(mantissa, '\\,');
+  return `${mantissa}\\times 10^{${exponent}}`;
+}
+
+/** Plain decimals between 0.001 and 100 000, a power of ten outside; trailing zeros show the digits meant. */
+function parts(value: number, digits: number): { mantissa: string; exponent: number | null } {
+  if (value === 0) return { mantissa: '0', exponent: null };
+  if (!Number.isFinite(value)) return { mantissa: String(value), exponent: null };
+  const [mantissa = '0', exponent = '0'] = value.toExponential(digits - 1).split('e');
+  const power = Number(exponent);
+  if (power < -3 || power >= 6) return { mantissa: trimmed(mantissa), exponent: power };
+  return {
+    mantissa: trimmed(Number(value.toPrecision(digits)).toFixed(Math.max(0, digits - 1 - power))),
+    exponent: null,
+  };
+}
+
+/** Constants such as 0.83 or 2.000 are shown without idle zeros. */
+function trimmed(text: string): string {
+  return text.includes('.') ? text.replace(/\.?0+$/, '') : text;
+}
+
+function group(text: string, space: string): string {
+  const [whole = '', fraction] = text.split('.');
+  const grouped = /^-?\d{5,}$/.test(whole) ? whole.replace(/\B(?=(\d{3})+$)/g, space) : whole;
+  return fraction === undefined ? grouped : `${grouped}.${fraction}`;
+}

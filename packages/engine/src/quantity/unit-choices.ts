@@ -1,0 +1,137 @@
+import { sameDimension } from './dimension.js';
+import { fromSI, readUnit, toSI } from './unit.js';
+
+/** Units that people of this trade write, offered where the dimension fits. */
+const OFFERED = [
+  '1',
+  '%',
+  'm',
+  'mm',
+  'cm',
+  'um',
+  'in',
+  'ft',
+  'm^2',
+  'cm^2',
+  'ft^2',
+  'm^3',
+  'l',
+  's',
+  'min',
+  'h',
+  'm/s',
+  'cm/s',
+  'mm/s',
+  'm/h',
+  'm/d',
+  'cm/h',
+  'ft/s',
+  'ft/h',
+  'km/h',
+  'K',
+  'degC',
+  'degF',
+  'Pa',
+  'kPa',
+  'bar',
+  'MPa',
+  'atm',
+  'mmHg',
+  'psi',
+  'kPa(g)',
+  'bar(g)',
+  'psi(g)',
+  'kg/m^3',
+  'g/cm^3',
+  'lb/ft^3',
+  'Pa s',
+  'mPa s',
+  'uPa s',
+  'cP',
+  'm^2/s',
+  'cm^2/s',
+  'mm^2/s',
+  'cSt',
+  'ft^2/h',
+  'N/m',
+  'mN/m',
+  'dyn/cm',
+  '1/m',
+  '1/cm',
+  '1/ft',
+  'kg/(m^2 s)',
+  'kg/(m^2 h)',
+  'lb/(ft^2 h)',
+  'kg/(m s)',
+  'kg/s',
+  'kg/h',
+  'lb/h',
+  'm^3/s',
+  'm^3/h',
+  'l/min',
+  'gpm',
+  'cfm',
+  'm^2/h',
+  'W',
+  'kW',
+  'W/m^3',
+  'kW/m^3',
+  'W/kg',
+  'mW/kg',
+  'kg/mol',
+  'g/mol',
+  'mol/m^3',
+  'kmol/m^3',
+  'mol/l',
+  'mol/(m^2 s)',
+  'kmol/(m^2 s)',
+  'mol/(m^2 h)',
+  'mol/(m^3 s)',
+  'kmol/(m^3 s)',
+  'mol/(m^2 s Pa)',
+  'kmol/(m^2 s kPa)',
+  'kmol/(m^2 s atm)',
+  'mol/(m^3 s Pa)',
+  '1/s',
+  '1/min',
+  '1/h',
+  'rad/s',
+  'rpm',
+  'm/s^2',
+  'rad',
+  'deg',
+  'm^3/mol',
+  'cm^3/mol',
+  'J/(mol K)',
+] as const;
+
+/** Units that a value in `unit` can be put in, the sheet's own first. */
+export function unitsFor(
+  unit: string,
+  kind: { difference?: boolean; absolutePressure?: boolean } = {},
+): string[] {
+  const own = readUnit(unit);
+  if (!own.ok) return [unit];
+  const fits = OFFERED.filter((offered) => {
+    const reading = readUnit(offered);
+    if (!reading.ok || !sameDimension(reading.unit.dimension, own.unit.dimension)) return false;
+    if (reading.unit.offset === 0) return isFrequencyAlike(unit, offered);
+    return offered.includes('(g)') ? kind.absolutePressure === true : kind.difference !== true;
+  });
+  return [unit, ...fits.filter((offered) => offered !== unit)];
+}
+
+/** Angular speed and frequency share a dimension and differ by 2π: neither is offered for the other. */
+function isFrequencyAlike(unit: string, offered: string): boolean {
+  const angular = (text: string): boolean => /rad|rpm|deg$/.test(text);
+  return angular(unit) === angular(offered) || offered === 'degC' || offered === 'degF';
+}
+
+/** Converts a number between two units of one dimension; null where they do not fit. */
+export function convert(value: number, from: string, to: string): number | null {
+  const a = readUnit(from);
+  const b = readUnit(to);
+  if (!a.ok || !b.ok || !sameDimension(a.unit.dimension, b.unit.dimension)) return null;
+  if (a.unit.factor === b.unit.factor && a.unit.offset === b.unit.offset) return value;
+  return fromSI(toSI(value, a.unit), b.unit);
+}
