@@ -1,0 +1,57 @@
+import { App, Button } from 'antd';
+import { Link, NavLink, useNavigate } from 'react-router-dom';
+import { asApiProblem } from '../../shared/api/api-problem';
+import { paths } from '../../shared/paths';
+import { useSession } from '../../shared/session/use-session';
+import './masthead.css';
+
+const NOUNS = [{ to: paths.register, noun: 'Register' }];
+
+/** The product's word, its nouns, and who is signed in. */
+export function Masthead() {
+  const { session } = useSession();
+  return (
+    <header className="masthead">
+      <Link className="masthead-word" to={paths.start}>
+        Merestone
+      </Link>
+      {session ? (
+        <>
+          <nav aria-label="Main">
+            <ul className="masthead-nouns">
+              {NOUNS.map(({ to, noun }) => (
+                <li key={to}>
+                  <NavLink to={to}>{noun}</NavLink>
+                </li>
+              ))}
+            </ul>
+          </nav>
+          <SignedIn name={session.person.name} roles={session.person.roles} />
+        </>
+      ) : null}
+    </header>
+  );
+}
+
+function SignedIn({ name, roles }: { name: string; roles: string[] }) {
+  const { signOut } = useSession();
+  const { message } = App.useApp();
+  const navigate = useNavigate();
+  const leave = async () => {
+    try {
+      await signOut();
+      await navigate(paths.signIn);
+    } catch (thrown) {
+      void message.error(asApiProblem(thrown).title);
+    }
+  };
+  return (
+    <p className="masthead-person">
+      <span title={roles.join(', ')}>{name}</span>
+      <span aria-hidden="true"> · </span>
+      <Button type="link" size="small" onClick={() => void leave()}>
+        Sign out
+      </Button>
+    </p>
+  );
+}

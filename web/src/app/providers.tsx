@@ -1,0 +1,27 @@
+import { App, ConfigProvider } from 'antd';
+import type { ReactNode } from 'react';
+import { SWRConfig } from 'swr';
+import { asApiProblem } from '../shared/api/api-problem';
+import { getJson } from '../shared/api/http';
+import { antdTheme } from '../theme/antd-theme';
+import { useNightSheet } from '../theme/use-night-sheet';
+
+/** What every page stands on: theme, messages and the data cache. */
+export function Providers({ children }: { children: ReactNode }) {
+  const night = useNightSheet();
+  return (
+    <ConfigProvider theme={antdTheme(night)} wave={{ disabled: true }}>
+      <App component={false}>
+        <SWRConfig value={{ fetcher: getJson, shouldRetryOnError: mayPass, revalidateOnFocus: false }}>
+          {children}
+        </SWRConfig>
+      </App>
+    </ConfigProvider>
+  );
+}
+
+/** Only a lost connection or a failing server is worth asking again by itself. */
+function mayPass(thrown: unknown): boolean {
+  const { status } = asApiProblem(thrown);
+  return status === 0 || status >= 500;
+}

@@ -1,0 +1,36 @@
+import { Navigate, createBrowserRouter, type RouteObject } from 'react-router-dom';
+import { RequireSignIn } from '../shared/session/require-sign-in';
+import { paths } from '../shared/paths';
+import { PageFrame } from './layout/page-frame';
+import { NotFound } from './routes/not-found';
+import { RouteError } from './routes/route-error';
+
+/** Each page is its own chunk: the shell stays light. */
+const signedInRoutes: RouteObject[] = [
+  { path: '/', element: <Navigate to={paths.start} replace /> },
+  { path: '/register', lazy: async () => ({ Component: (await import('./routes/register')).RegisterRoute }) },
+];
+
+export const routes: RouteObject[] = [
+  {
+    element: <PageFrame />,
+    errorElement: <RouteError />,
+    children: [
+      {
+        errorElement: <RouteError />,
+        children: [
+          {
+            path: paths.signIn,
+            lazy: async () => ({ Component: (await import('./routes/sign-in')).SignInRoute }),
+          },
+          { element: <RequireSignIn />, children: signedInRoutes },
+          { path: '*', element: <NotFound /> },
+        ],
+      },
+    ],
+  },
+];
+
+export function createRouter() {
+  return createBrowserRouter(routes);
+}

@@ -1,0 +1,5 @@
+import { SheetPage } from '../../shared/ui/sheet-page';
+
+export function RegisterRoute() {
+  return <SheetPage title="Register">{null}</SheetPage>;
+}
