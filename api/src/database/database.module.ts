@@ -1,0 +1,13 @@
+import { Global, Module } from '@nestjs/common';
+import { Clock } from '../common/clock.js';
+import { Connection } from './connection.js';
+import { databaseProvider } from './database.provider.js';
+import { Writer } from './write.js';
+
+/** Connection, Writer and Clock for everybody. */
+@Global()
+@Module({
+  providers: [databaseProvider, Writer, Clock],
+  exports: [Connection, Writer, Clock],
+})
+export class DatabaseModule {}

@@ -1,0 +1,25 @@
+/**
+ * Every act that is journalled, with its words for a list ("<name> …"). An act stays here for good once it was
+ * written anywhere.
+ */
+export const ACTS = {
+  'office.founded': 'set up the office',
+  'person.added': 'added a person',
+  'session.started': 'signed in',
+  'session.refused': 'was refused at sign-in',
+  'session.ended': 'signed out',
+  'correlation.drafted': 'drafted a correlation',
+  'revision.drafted': 'drafted a next revision',
+  'revision.submitted': 'submitted a revision for review',
+  'revision.commented': 'commented on a revision',
+  'revision.reviewed': 'reviewed a revision',
+  'revision.approved': 'approved a revision',
+  'revision.superseded': 'superseded a revision',
+  'revision.declined': 'declined a revision',
+  'revision.suspended': 'suspended a revision',
+  'revision.withdrawn': 'withdrew a revision',
+  'evaluation.deviated': 'evaluated outside a bound',
+  'property-equation.added': 'added a property equation',
+} as const satisfies Record<string, string>;
+
+export type Act = keyof typeof ACTS;

@@ -1,0 +1,48 @@
+import { and, eq, max } from 'drizzle-orm';
+import type { Actor } from '../common/actor.js';
+import type { Reader, Tx } from '../database/connection.js';
+import { journal, journalNode } from '../database/schema/journal.js';
+import type { Act } from './acts.js';
+import { canonicalText, journalEntry, type JournalEntry, type JsonObject } from './entry.js';
+import { leafHash, nodesOnAppend, type NodeLookup } from './merkle-tree.js';
+
+/** Reads a stored subtree hash; a missing one means the journal was tampered with, so nothing may be built on it. */
+export function storedNodes(reader: Reader): NodeLookup {
+  return (level, position) => {
+    const row = reader
+      .select({ hash: journalNode.hash })
+      .from(journalNode)
+      .where(and(eq(journalNode.level, level), eq(journalNode.position, position)))
+      .get();
+    if (row === undefined) throw new Error(`The journal's subtree ${level}/${position} is missing.`);
+    return row.hash;
+  };
+}
+
+/** Number of leaves of the journal's tree. Counted there, so that a row cut off at the end leaves a visible gap. */
+export function journalSize(reader: Reader): number {
+  const row = reader
+    .select({ last: max(journalNode.position) })
+    .from(journalNode)
+    .where(eq(journalNode.level, 0))
+    .get();
+  return (row?.last ?? -1) + 1;
+}
+
+/** Puts one entry at the journal's end, inside the caller's transaction. */
+export function appendToJournal(
+  tx: Tx,
+  at: string,
+  actor: Actor,
+  act: Act,
+  subject: string,
+  detail: JsonObject,
+): JournalEntry {
+  const entry = journalEntry(journalSize(tx), at, actor, act, subject, detail);
+  const text = canonicalText(entry);
+  tx.insert(journal).values({ index: entry.index, entry: text }).run();
+  tx.insert(journalNode)
+    .values(nodesOnAppend(entry.index, leafHash(text), storedNodes(tx)))
+    .run();
+  return entry;
+}
