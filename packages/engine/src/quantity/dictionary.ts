@@ -1,4 +1,6 @@
 import type { DictionaryEntry } from './dictionary-entry.js';
+import { beds } from './dictionary/beds.js';
+import { dispersions } from './dictionary/dispersions.js';
 import { flow } from './dictionary/flow.js';
 import { lengths } from './dictionary/lengths.js';
 import { properties } from './dictionary/properties.js';
@@ -6,7 +8,15 @@ import { states } from './dictionary/states.js';
 
 /** The quantity dictionary, by name. Forms that serve several sheets, and property equations, are keyed by these names. */
 export const QUANTITIES: Readonly<Record<string, DictionaryEntry>> = Object.freeze(
-  Object.assign(Object.create(null) as Record<string, DictionaryEntry>, states, properties, lengths, flow),
+  Object.assign(
+    Object.create(null) as Record<string, DictionaryEntry>,
+    states,
+    properties,
+    lengths,
+    flow,
+    beds,
+    dispersions,
+  ),
 );
 
 /** Whether a value of `given` serves where `wanted` is asked for. */

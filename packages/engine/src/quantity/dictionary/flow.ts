@@ -31,4 +31,19 @@ export const flow: DictionaryPart = {
     sign: 'positive',
     hint: 'Gas volume flow over the empty cross-section.',
   },
+  'superficial-liquid-velocity': {
+    title: 'Superficial liquid velocity',
+    unit: 'm/s',
+    symbol: 'u_L',
+    sign: 'positive',
+    hint: 'Liquid volume flow over the empty cross-section.',
+  },
+  'superficial-fluid-velocity': {
+    title: 'Superficial velocity',
+    unit: 'm/s',
+    symbol: 'u',
+    sign: 'positive',
+    hint: 'Volume flow over the empty cross-section, not the velocity between the particles.',
+    covers: ['superficial-gas-velocity', 'superficial-liquid-velocity'],
+  },
 };

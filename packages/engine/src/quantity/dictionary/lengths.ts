@@ -10,7 +10,13 @@ export const lengths: DictionaryPart = {
     sign: 'positive',
     hint: 'The length over which transfer takes place.',
   },
-  'particle-diameter': { title: 'Particle diameter', unit: 'm', symbol: 'd_p', sign: 'positive' },
+  'particle-diameter': {
+    title: 'Particle diameter',
+    unit: 'm',
+    symbol: 'd_p',
+    sign: 'positive',
+    covers: ['particle-diameter-equal-surface', 'particle-diameter-equal-volume'],
+  },
   'packing-specific-surface': {
     title: 'Dry specific surface of the packing',
     unit: '1/m',

@@ -64,4 +64,11 @@ export const properties: DictionaryPart = {
     symbol: 'sigma_c',
     sign: 'positive',
   },
+  'solvent-molar-mass': {
+    title: 'Molar mass of the solvent',
+    unit: 'kg/mol',
+    symbol: 'M_S',
+    sign: 'positive',
+    hint: 'Of the liquid that carries the species: 0.018 kg/mol for water.',
+  },
 };
