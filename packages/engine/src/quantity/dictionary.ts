@@ -1,9 +1,13 @@
 import type { DictionaryEntry } from './dictionary-entry.js';
 import { beds } from './dictionary/beds.js';
 import { dispersions } from './dictionary/dispersions.js';
+import { apparatusLengths } from './dictionary/apparatus-lengths.js';
 import { flow } from './dictionary/flow.js';
+import { interfaceStates } from './dictionary/interface-states.js';
 import { lengths } from './dictionary/lengths.js';
+import { localVelocities } from './dictionary/local-velocities.js';
 import { properties } from './dictionary/properties.js';
+import { propertyInputs } from './dictionary/property-inputs.js';
 import { states } from './dictionary/states.js';
 
 /** The quantity dictionary, by name. Forms that serve several sheets, and property equations, are keyed by these names. */
@@ -16,6 +20,10 @@ export const QUANTITIES: Readonly<Record<string, DictionaryEntry>> = Object.free
     flow,
     beds,
     dispersions,
+    interfaceStates,
+    propertyInputs,
+    apparatusLengths,
+    localVelocities,
   ),
 );
 
