@@ -1,0 +1,143 @@
+import {
+  QUANTITIES,
+  symbolTex,
+  unitsFor,
+  type Group,
+  type PropertyEquationDefinition,
+  type Quantity,
+  type Table,
+} from '@merestone/engine';
+import type { Duty } from './duty';
+import type { EquationInUse, FormField, FormItem, FormSection, RowPicker } from './duty-form';
+import type { EvaluatedSheet } from './evaluated-sheet';
+import { inFieldOrder, type SectionKey } from './field-order';
+import { givenGroups } from './given-groups';
+import { servesFor } from './serves-for';
+
+const TITLES: Readonly<Record<SectionKey, string>> = {
+  geometry: 'Geometry',
+  conditions: 'Fluid and conditions',
+  rest: 'The rest',
+};
+const MAX_NESTING = 3;
+
+/** The form for a duty, made from the sheet's definition and what has been chosen so far. */
+export function buildForm(sheet: EvaluatedSheet, duty: Duty): FormSection[] {
+  const { definition } = sheet;
+  const given = duty.mode === 'groups' ? givenGroups(definition) : { groups: [], replaced: new Set<string>() };
+  const pickers = (definition.tables ?? []).map((table) =>
+    rowPicker(table, table.name, definition.quantities, duty),
+  );
+  const filledByRow = new Set(pickers.flatMap((picker) => Object.keys(picker.chosen?.values ?? {})));
+  const asked = definition.quantities.filter((q) => !given.replaced.has(q.symbol) && !filledByRow.has(q.symbol));
+  const sections: FormSection[] = inFieldOrder(asked).map(({ section, quantities }) => ({
+    key: section,
+    title: TITLES[section],
+    items: quantities.map((quantity) => sheetField(quantity, sheet, duty)),
+  }));
+  if (given.groups.length > 0)
+    sections.unshift({ key: 'groups', title: 'Groups', items: given.groups.map(groupField) });
+  return withPickers(sections, pickers);
+}
+
+/** Tables describe the apparatus, so their pickers head the geometry. */
+function withPickers(sections: FormSection[], pickers: RowPicker[]): FormSection[] {
+  if (pickers.length === 0) return sections;
+  const geometry = sections.find((section) => section.key === 'geometry');
+  if (geometry) {
+    geometry.items.unshift(...pickers);
+    return sections;
+  }
+  return [{ key: 'geometry', title: TITLES.geometry, items: pickers }, ...sections];
+}
+
+function sheetField(quantity: Quantity, sheet: EvaluatedSheet, duty: Duty): FormField {
+  return quantityField(quantity, quantity.symbol, sheet, duty, 0);
+}
+
+function quantityField(
+  quantity: Quantity,
+  key: string,
+  sheet: EvaluatedSheet,
+  duty: Duty,
+  depth: number,
+): FormField {
+  const entry = QUANTITIES[quantity.is];
+  const choices = sheet.equations.filter(({ slug }) => quantity.equations?.includes(slug));
+  const chosen = depth < MAX_NESTING ? choices.find(({ slug }) => slug === duty.equations[key]) : undefined;
+  return {
+    kind: 'quantity',
+    key,
+    label: labelOf(quantity),
+    symbolTex: symbolTex(quantity.symbol, quantity.tex),
+    unit: quantity.unit,
+    units: unitsFor(quantity.unit, entry),
+    hint: quantity.meaning ?? entry?.hint ?? null,
+    optional: quantity.role === 'state',
+    equations: choices.map(({ slug, definition }) => ({ slug, title: definition.title })),
+    filledBy: chosen ? equationInUse(chosen.slug, chosen.definition, key, sheet, duty, depth) : null,
+  };
+}
+
+function labelOf(quantity: Quantity): string {
+  const title = QUANTITIES[quantity.is]?.title ?? quantity.is.replaceAll('-', ' ');
+  return quantity.at ? `${title}, ${quantity.at}` : title;
+}
+
+function groupField(group: Group): FormField {
+  return {
+    kind: 'group',
+    key: group.symbol,
+    label: group.name,
+    symbolTex: symbolTex(group.symbol, group.tex),
+    unit: '1',
+    units: ['1'],
+    hint: group.note ?? null,
+    optional: false,
+    equations: [],
+    filledBy: null,
+  };
+}
+
+function equationInUse(
+  slug: string,
+  definition: PropertyEquationDefinition,
+  key: string,
+  sheet: EvaluatedSheet,
+  duty: Duty,
+  depth: number,
+): EquationInUse {
+  const pickers = (definition.tables ?? []).map((table) =>
+    rowPicker(table, `${key}.${table.name}`, definition.quantities, duty),
+  );
+  const fromRow = new Set(pickers.flatMap((picker) => picker.rows.flatMap((row) => Object.keys(row.values))));
+  const own: FormItem[] = [...pickers];
+  const served: EquationInUse['served'] = [];
+  for (const quantity of definition.quantities) {
+    if (fromRow.has(quantity.symbol)) continue;
+    const onSheet = sheet.definition.quantities.find((q) => q.symbol !== key && servesFor(q.is, quantity.is));
+    if (onSheet) served.push({ key: onSheet.symbol, symbol: quantity.symbol, label: labelOf(onSheet) });
+    else own.push(quantityField(quantity, `${key}.${quantity.symbol}`, sheet, duty, depth + 1));
+  }
+  return { slug, title: definition.title, assumes: definition.assumes ?? null, own, served };
+}
+
+function rowPicker(table: Table, key: string, quantities: readonly Quantity[], duty: Duty): RowPicker {
+  const given = new Set(table.rows.flatMap((row) => Object.keys(row.values)));
+  return {
+    kind: 'row',
+    key,
+    title: table.title,
+    source: table.source ?? null,
+    rows: table.rows,
+    chosen: table.rows.find((row) => row.key === duty.rows[key]) ?? null,
+    columns: quantities
+      .filter((quantity) => given.has(quantity.symbol))
+      .map((quantity) => ({
+        symbol: quantity.symbol,
+        symbolTex: symbolTex(quantity.symbol, quantity.tex),
+        label: labelOf(quantity),
+        unit: quantity.unit,
+      })),
+  };
+}

@@ -1,0 +1,3 @@
+import type { Table } from '@merestone/engine';
+
+export type TableRow = Table['rows'][number];
