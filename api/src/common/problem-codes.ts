@@ -19,7 +19,6 @@ export const PROBLEM_CODES = {
   'foreign-origin': { status: 403, title: 'The request comes from another site' },
   'password-refused': { status: 403, title: 'The password was refused' },
   'not-found': { status: 404, title: 'Not found' },
-  'method-not-allowed': { status: 405, title: 'Not possible at this address' },
   'not-in-use': { status: 409, title: 'This revision is not in use' },
   stale: { status: 409, title: 'Somebody else changed this in the meantime' },
   conflict: { status: 409, title: 'This cannot be done in the present state' },
