@@ -6,6 +6,9 @@ export default defineConfig({
   test: {
     projects: [
       {
+        test: { name: 'workshop', include: ['packages/workshop/**/*.test.ts'], testTimeout: 120_000 },
+      },
+      {
         resolve: source,
         ssr: { resolve: source },
         test: { name: 'engine', include: ['packages/engine/src/**/*.test.ts'] },

@@ -1,0 +1,88 @@
+// npm run dev: Vite with hot reload on http://localhost:4170, in front of a server that follows its sources.
+import { spawn } from 'node:child_process';
+import { answer } from './house/answer.mjs';
+import { copyServerAssets } from './house/build-product.mjs';
+import { ensureInstalled } from './house/install.mjs';
+import { fromRoot, root } from './house/paths.mjs';
+import { exitCodeOf, runNode } from './house/run-command.mjs';
+
+const screensPort = '4170';
+const typescript = fromRoot('node_modules', 'typescript', 'bin', 'tsc');
+const serverProjects = ['packages/engine', 'packages/api-client', 'api'];
+
+/**
+ * @param {string} name
+ * @param {string[]} args for node
+ * @param {string} cwd
+ * @param {NodeJS.ProcessEnv} env
+ */
+const startChild = (name, args, cwd, env) => {
+  const child = spawn(process.execPath, args, { cwd, env, stdio: ['ignore', 'inherit', 'inherit'] });
+  return { name, child };
+};
+
+/** @param {{ name: string, child: import('node:child_process').ChildProcess }[]} children */
+const endTogether = (children) =>
+  new Promise((/** @type {(code: number) => void} */ resolve) => {
+    let running = children.length;
+    let answerCode = 0;
+    let ending = false;
+    const endAll = () => {
+      ending = true;
+      for (const { child } of children) child.kill('SIGTERM');
+    };
+    for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) process.on(signal, endAll);
+    for (const { name, child } of children) {
+      child.once('exit', (code, signal) => {
+        if (!ending) {
+          console.error(`${name} ended; the others end with it.`);
+          answerCode = exitCodeOf(code, signal) || 1;
+          endAll();
+        }
+        running -= 1;
+        if (running === 0) resolve(answerCode);
+      });
+    }
+  });
+
+await answer(async () => {
+  await ensureInstalled();
+  // Errors are shown by the watching compiler as well; the first pass only makes sure that there is something to run.
+  await runNode(typescript, ['-b', ...serverProjects], { cwd: root });
+  copyServerAssets();
+
+  const port = process.env.MERESTONE_PORT ?? '4171';
+  const env = {
+    ...process.env,
+    MERESTONE_PORT: port,
+    MERESTONE_API_PORT: port,
+    MERESTONE_ORIGIN: process.env.MERESTONE_ORIGIN ?? `http://localhost:${screensPort}`,
+  };
+  return endTogether([
+    startChild(
+      'The compiler',
+      [typescript, '-b', '-w', '--preserveWatchOutput', ...serverProjects],
+      root,
+      env,
+    ),
+    startChild(
+      'The server',
+      ['--watch', '--watch-preserve-output', '--enable-source-maps', fromRoot('api', 'dist', 'main.js')],
+      root,
+      env,
+    ),
+    startChild(
+      'Vite',
+      [
+        fromRoot('node_modules', 'vite', 'bin', 'vite.js'),
+        '--port',
+        screensPort,
+        '--strictPort',
+        '--clearScreen',
+        'false',
+      ],
+      fromRoot('web'),
+      env,
+    ),
+  ]);
+});
