@@ -1,4 +1,6 @@
 // The engine's whole public surface, written by hand.
+export { ENGINE_VERSION } from './engine-version.js';
+
 export {
   SHEET_FORMAT,
   PROPERTY_FORMAT,
@@ -23,6 +25,47 @@ export type {
   Table,
   WorkedCheck,
 } from './sheet/common-schema.js';
+export { checkStructure, checkPropertyStructure, type Structure } from './sheet/check-structure.js';
+export { compileCorrelation, compilePropertyEquation, type Compilation } from './sheet/compile-sheet.js';
+export type {
+  CompiledCorrelation,
+  CompiledEquation,
+  CompiledSheet,
+  PropertyLibrary,
+} from './sheet/compiled.js';
+export {
+  definitionTex,
+  propertyTex,
+  type DefinitionTex,
+  type LineTex,
+  type PartTex,
+} from './sheet/definition-tex.js';
+
 export * from './evaluation/outcome.js';
+export { evaluate } from './evaluation/evaluate.js';
+export {
+  runChecks,
+  runPropertyChecks,
+  propertyValue,
+  type CheckReport,
+  type CheckedValue,
+} from './evaluation/run-checks.js';
+export { SHORTEST_REASON, LONGEST_REASON } from './evaluation/check-deviations.js';
+export { unitTex, valueTex, valueText } from './evaluation/explain.js';
+
+export { holdAgainstBound, DEFAULT_REACH } from './bounds/hold-against-bound.js';
 export { stripGeometry } from './bounds/strip.js';
 export type { StripGeometry, StripInput, StripRun, StripRunKind } from './bounds/strip.js';
+
+export { convertBasis, BASES, type CoefficientInSI, type FluidState } from './basis/convert-basis.js';
+export { logMean } from './basis/flux.js';
+
+export { parse, type ExpressionFault, type Parsed } from './expression/parse.js';
+export { formatNumber, numberTex } from './expression/number-text.js';
+export { symbolTex } from './expression/symbol-tex.js';
+
+export { QUANTITIES, serves } from './quantity/dictionary.js';
+export type { DictionaryEntry, Sign } from './quantity/dictionary-entry.js';
+export { readUnit, type Unit, type UnitReading } from './quantity/unit.js';
+export { unitsFor, convert } from './quantity/unit-choices.js';
+export { CONSTANTS } from './quantity/constants.js';

@@ -60,7 +60,7 @@ function binary(tree: Tree & { kind: 'binary' }, leaf: Leaf): Set {
 function productSet(tree: Tree & { kind: 'binary' }, leaf: Leaf): Set {
   const left = within(set(tree.left, leaf), LEVEL.product);
   const right = within(set(tree.right, leaf), LEVEL.product);
-  const crossed = /^[\d(\\]?\d/.test(right) || (/^\\left\(/.test(right) && /\d$/.test(left));
+  const crossed = /^-?\d/.test(right.replace(/^(\{|\\left\()+/, ''));
   return { tex: `${left}${crossed ? ' \\times ' : ' \\, '}${right}`, level: LEVEL.product };
 }
 

@@ -1,5 +1,8 @@
 import type { Dimension } from './dimension.js';
 
+/** J/(mol K), product of the exact constants of the SI of 2019 (CODATA 2018). */
+export const MOLAR_GAS_CONSTANT = 8.314462618;
+
 /** Symbols that every expression may use and no sheet may redefine. */
 export const CONSTANTS: Readonly<
   Record<string, { value: number; unit: string; dimension: Dimension; name: string }>
@@ -11,9 +14,8 @@ export const CONSTANTS: Readonly<
     dimension: { m: 1, s: -2 },
     name: 'standard acceleration of free fall',
   },
-  /** Molar gas constant, product of the exact constants of the SI of 2019 (CODATA 2018). */
   R: {
-    value: 8.314462618,
+    value: MOLAR_GAS_CONSTANT,
     unit: 'J/(mol K)',
     dimension: { kg: 1, m: 2, s: -2, mol: -1, K: -1 },
     name: 'molar gas constant',

@@ -1,0 +1,21 @@
+import { serves } from '../quantity/dictionary.js';
+import type { Reckoner } from '../evaluation/reckoner.js';
+import type { FluidState } from './convert-basis.js';
+
+/** Reads temperature, pressure and concentration off a sheet's quantities, by dictionary name. */
+export function fluidStateOf(reckoner: Reckoner): FluidState {
+  const find = (name: string): number | null => {
+    for (const { definition } of reckoner.sheet.quantities.values())
+      if (serves(definition.is, name) && reckoner.solve(definition.symbol))
+        return reckoner.valueOf(definition.symbol);
+    return null;
+  };
+  const density = find('liquid-density');
+  const molarMass = find('solvent-molar-mass');
+  return {
+    temperature: find('gas-temperature'),
+    pressure: find('total-pressure'),
+    inertPressure: find('log-mean-inert-pressure'),
+    liquidConcentration: density !== null && molarMass !== null ? density / molarMass : null,
+  };
+}

@@ -1,0 +1,231 @@
+import {
+  convertBasis,
+  BASES,
+  type CoefficientInSI,
+  type FluidState,
+} from '../basis/convert-basis.js';
+import { fluidStateOf } from '../basis/fluid-state.js';
+import { fluxFrom, type FluxLine, type ReadForce } from '../basis/flux.js';
+import { symbolTex } from '../expression/symbol-tex.js';
+import { numberTex } from '../expression/number-text.js';
+import type { CompiledSheet } from '../sheet/compiled.js';
+import type { Coefficient, CorrelationDefinition, Part } from '../sheet/definition.js';
+import type { Work } from './reckon.js';
+import { lineSteps, propertyStep, valueTex } from './explain.js';
+import {
+  COEFFICIENT_BASES,
+  type CoefficientBasis,
+  type Conversion,
+  type EvaluationRequest,
+  type Finding,
+  type Numbers,
+  type PartOutcome,
+  type Problem,
+  type Step,
+} from './outcome.js';
+import { filledValue } from './supplies.js';
+
+type NumbersResult = { ok: true; numbers: Numbers } | { ok: false; problems: Problem[] };
+
+/** Puts together everything an evaluation may show once it has passed the bounds. */
+export function numbersOf(
+  definition: CorrelationDefinition,
+  sheet: CompiledSheet,
+  work: Work,
+  request: EvaluationRequest,
+  force: ReadForce | null,
+  findings: Finding[],
+  remarks: string[],
+): NumbersResult {
+  const { reckoner, supplies } = work;
+  const state = fluidStateOf(reckoner);
+  const parts = definition.parts
+    .filter(({ key }) => work.parts.has(key))
+    .map((part) => partOutcome(definition, part, work, request.bases, state));
+  const principal = parts.at(-1);
+  if (!principal)
+    return {
+      ok: false,
+      problems: [{ code: 'definition', field: 'parts', message: 'No part could be worked out.' }],
+    };
+  const flux = fluxOf(definition, work, force, state);
+  if (flux && !flux.ok) return { ok: false, problems: [flux.problem] };
+  const ofKind = (kind: string) =>
+    [...sheet.lines].filter(([s, { line }]) => line.kind === kind && reckoner.has(s));
+  return {
+    ok: true,
+    numbers: {
+      groups: Object.fromEntries(ofKind('group').map(([symbol]) => [symbol, reckoner.valueOf(symbol)])),
+      intermediates: Object.fromEntries(
+        ofKind('intermediate').map(([s, { unit }]) => [
+          s,
+          { value: reckoner.shownValueOf(s), unit: unit.text },
+        ]),
+      ),
+      result: principal.result,
+      coefficient: principal.coefficient,
+      conversions: principal.conversions,
+      parts,
+      flux: flux?.line.flux ?? null,
+      findings,
+      steps: [
+        ...supplies.filled.map((filled) => propertyStep(sheet, filled)),
+        ...lineSteps(reckoner),
+        ...parts.flatMap((part) =>
+          part.conversions.flatMap((conversion) => conversionStep(part, conversion)),
+        ),
+        ...(flux ? [fluxStep(flux.line)] : []),
+      ],
+      equations: supplies.filled.map((filled) => ({
+        symbol: filled.symbol,
+        key: filled.equation.key,
+        title: filled.equation.definition.title,
+        ...filledValue(sheet, filled),
+        ...(filled.equation.definition.assumes ? { assumes: filled.equation.definition.assumes } : {}),
+      })),
+      rows: Object.fromEntries(supplies.rows),
+      remarks: [...remarks, ...lackingRemarks(work)],
+    },
+  };
+}
+
+function lackingRemarks({ lacking }: Work): string[] {
+  return [...lacking].map(
+    ([title, missing]) => `${title} is left out: ${[...missing].join(', ')} not given.`,
+  );
+}
+
+function partOutcome(
+  definition: CorrelationDefinition,
+  part: Part,
+  { reckoner }: Work,
+  bases: CoefficientBasis[] | undefined,
+  state: FluidState,
+): PartOutcome {
+  const { result, coefficient } = part;
+  const solved = coefficient && reckoner.has(coefficient.symbol) ? coefficient : null;
+  const inSI = coefficientInSI(definition, part, reckoner);
+  return {
+    key: part.key,
+    title: part.title,
+    result: { symbol: result.symbol, value: reckoner.shownValueOf(result.symbol), unit: result.unit },
+    coefficient: solved
+      ? {
+          symbol: solved.symbol,
+          value: reckoner.shownValueOf(solved.symbol),
+          unit: solved.unit,
+          basis: solved.basis,
+          per: solved.per,
+          rateForm: solved.rateForm,
+        }
+      : null,
+    conversions: inSI ? conversionsOf(inSI, coefficient?.symbol ?? result.symbol, bases, state) : [],
+  };
+}
+
+/** The coefficient of a part in SI; a result that is itself a coefficient counts as on concentration. */
+function coefficientInSI(
+  definition: CorrelationDefinition,
+  part: Part,
+  reckoner: Work['reckoner'],
+): CoefficientInSI | null {
+  const read = readingOf(part);
+  if (!read || !reckoner.has(read.symbol)) return null;
+  const phase =
+    part.phase ?? (definition.phase === 'gas' ? 'gas' : definition.phase === 'liquid' ? 'liquid' : null);
+  const { basis, per, rateForm } = read;
+  return {
+    value: reckoner.valueOf(read.symbol),
+    basis,
+    per,
+    rateForm,
+    phase: phase ?? phaseByState(reckoner),
+  };
+}
+
+/** A sheet for gas or liquid is one for a gas as soon as a pressure is given. */
+function phaseByState(reckoner: Work['reckoner']): 'gas' | 'liquid' {
+  const { pressure } = fluidStateOf(reckoner);
+  return pressure === null ? 'liquid' : 'gas';
+}
+
+type Reading = Pick<Coefficient, 'symbol' | 'basis' | 'per' | 'rateForm'>;
+
+function readingOf({ result, coefficient }: Part): Reading | null {
+  if (coefficient) return coefficient;
+  const common = { symbol: result.symbol, basis: 'concentration', rateForm: 'dilute-or-equimolar' } as const;
+  if (result.kind === 'coefficient') return { ...common, per: 'area' };
+  if (result.kind === 'volumetric-coefficient') return { ...common, per: 'volume' };
+  return null;
+}
+
+function conversionsOf(
+  from: CoefficientInSI,
+  own: string,
+  bases: CoefficientBasis[] | undefined,
+  state: FluidState,
+): Conversion[] {
+  const wanted = bases ?? COEFFICIENT_BASES.filter((basis) => BASES[basis].phase === from.phase);
+  return wanted
+    .map((basis) => convertBasis(from, basis, state))
+    .filter(({ symbol }) => bases !== undefined || symbol !== own);
+}
+
+function fluxOf(definition: CorrelationDefinition, work: Work, force: ReadForce | null, state: FluidState) {
+  const principal = definition.parts.filter(({ key }) => work.parts.has(key)).at(-1);
+  const inSI = principal ? coefficientInSI(definition, principal, work.reckoner) : null;
+  if (!force) return null;
+  if (!inSI)
+    return {
+      ok: false as const,
+      problem: {
+        code: 'missing' as const,
+        field: 'drivingForce',
+        message: 'There is no coefficient here for a flux to be made from.',
+      },
+    };
+  return fluxFrom(inSI, force, state);
+}
+
+/** Formulas of the basis table, for the written-out steps. */
+const CONVERSION_TEX: Readonly<Record<CoefficientBasis, string>> = {
+  k_c: 'k_c',
+  k_G: '\\frac{k_c}{R\\,T}',
+  k_y: '\\frac{k_c\\,P}{R\\,T}',
+  F: 'k_y\\,\\frac{p_{\\mathrm{BM}}}{P}',
+  k_L: 'k_L',
+  k_x: '\\frac{k_L\\,\\rho}{M}',
+};
+
+function conversionStep(part: PartOutcome, { basis, symbol, value, unit, assumes }: Conversion): Step[] {
+  if (value === null || symbol === part.coefficient?.symbol) return [];
+  const letter = symbolTex(symbol.replace(/a$/, '')) + (symbol.endsWith('a') ? 'a' : '');
+  const low = assumes ? 'k_y' : CONVERSION_TEX[basis];
+  return [
+    {
+      kind: 'conversion',
+      symbol,
+      symbolTex: letter,
+      tex: `${letter} = ${low}`,
+      texWithNumbers: `${letter} = ${valueTex(value, unit)}`,
+      value,
+      unit,
+      note: `${part.title}, ${BASES[basis].words}${assumes ? `; assumes ${assumes}` : ''}`,
+    },
+  ];
+}
+
+function fluxStep({ flux, coefficient, coefficientSymbol, difference }: FluxLine): Step {
+  const k = symbolTex(coefficientSymbol);
+  const letter = { concentration: 'c', 'partial-pressure': 'p', 'mole-fraction': 'y' }[flux.basis];
+  return {
+    kind: 'flux',
+    symbol: 'N_A',
+    symbolTex: 'N_A',
+    tex: `N_A = ${k}\\,(${letter}_{A,i} - ${letter}_{A,b})`,
+    texWithNumbers: `N_A = ${numberTex(coefficient)} \\times ${numberTex(difference)} = ${valueTex(flux.value, flux.unit)}`,
+    value: flux.value,
+    unit: flux.unit,
+    note: 'Flux from the interface into the bulk',
+  };
+}

@@ -1,0 +1,147 @@
+import { compileTree, type Run } from '../expression/compile-tree.js';
+import type { Problem } from '../evaluation/outcome.js';
+import { CONSTANTS, isConstant } from '../quantity/constants.js';
+import { QUANTITIES } from '../quantity/dictionary.js';
+import { readUnit, type Unit } from '../quantity/unit.js';
+import { checkBounds } from './check-bounds.js';
+import { checkDimensions } from './check-dimensions.js';
+import { checkSymbols, definition } from './check-symbols.js';
+import { checkWorkedChecks } from './check-worked-checks.js';
+import type {
+  CompiledCorrelation,
+  CompiledEquation,
+  CompiledLine,
+  CompiledQuantity,
+  CompiledSheet,
+} from './compiled.js';
+import type { CorrelationDefinition, PropertyEquationDefinition } from './definition.js';
+import { linesOfCorrelation, linesOfPropertyEquation, type Calculable } from './lines.js';
+import { intervalOf } from './piece-intervals.js';
+import { readFormulas, type ReadLine } from './read-formulas.js';
+
+export type Compilation<T> = { ok: true; compiled: T } | { ok: false; problems: Problem[] };
+
+/** Checks a sheet's definition and makes it ready for evaluation. The value must have passed `checkStructure`. */
+export function compileCorrelation(sheet: CorrelationDefinition): Compilation<CompiledCorrelation> {
+  const calculable = linesOfCorrelation(sheet);
+  const result = compileSheet(calculable, repeatedParts(sheet));
+  return result.ok ? { ok: true, compiled: { definition: sheet, sheet: result.compiled } } : result;
+}
+
+/** The same for a property equation; `key` is its slug. */
+export function compilePropertyEquation(
+  key: string,
+  equation: PropertyEquationDefinition,
+): Compilation<CompiledEquation> {
+  const result = compileSheet(linesOfPropertyEquation(equation), []);
+  return result.ok ? { ok: true, compiled: { key, definition: equation, sheet: result.compiled } } : result;
+}
+
+function compileSheet(calculable: Calculable, found: Problem[]): Compilation<CompiledSheet> {
+  const problems = [
+    ...found,
+    ...checkSymbols(calculable),
+    ...checkBounds(calculable),
+    ...checkWorkedChecks(calculable),
+  ];
+  const formulas = readFormulas(calculable);
+  problems.push(...formulas.problems);
+  if (formulas.problems.length === 0)
+    problems.push(
+      ...checkDimensions(calculable, formulas.lines),
+      ...missingBounds(calculable, formulas.lines),
+    );
+  if (problems.length > 0) return { ok: false, problems };
+  return { ok: true, compiled: assemble(calculable, formulas.lines) };
+}
+
+function assemble(calculable: Calculable, lines: readonly ReadLine[]): CompiledSheet {
+  const quantities = new Map<string, CompiledQuantity>();
+  for (const [slot, quantity] of calculable.quantities.entries()) {
+    const entry = QUANTITIES[quantity.is];
+    if (entry)
+      quantities.set(quantity.symbol, { definition: quantity, entry, unit: unitAt(quantity.unit), slot });
+  }
+  const slots = new Map<string, { slot: number; unit: Unit }>(quantities);
+  for (const [i, { line }] of lines.entries())
+    slots.set(line.symbol, { slot: quantities.size + i, unit: unitAt(line.unit) });
+  const compiled = lines.map((read): [string, CompiledLine] => [read.line.symbol, compileLine(read, slots)]);
+  return {
+    quantities,
+    lines: new Map(compiled),
+    order: lines.map(({ line }) => line.symbol),
+    tables: new Map(calculable.tables.map((table) => [table.name, table])),
+    bounds: calculable.bounds,
+    slots: slots.size,
+    answers: calculable.answers,
+  };
+}
+
+function compileLine(
+  { line, formulas }: ReadLine,
+  slots: ReadonlyMap<string, { slot: number; unit: Unit }>,
+): CompiledLine {
+  const unit = unitAt(line.unit);
+  const leaf = leafReader(slots, line.dimensional);
+  return {
+    line,
+    unit,
+    slot: slots.get(line.symbol)?.slot ?? 0,
+    variants: formulas.map(({ title, when, tree, needs }) => {
+      const run = compileTree(tree, leaf);
+      return {
+        title,
+        when: when.map((condition) => ({ on: condition.on, interval: intervalOf(condition) })),
+        tree,
+        needs,
+        run: line.dimensional ? inSI(run, unit) : run,
+      };
+    }),
+  };
+}
+
+/** Slots hold SI; a dimensional formula reads and gives the sheet's own units. */
+function leafReader(slots: ReadonlyMap<string, { slot: number; unit: Unit }>, dimensional: boolean) {
+  return (name: string): Run => {
+    if (isConstant(name)) {
+      const value = CONSTANTS[name]?.value ?? Number.NaN;
+      return () => value;
+    }
+    const place = slots.get(name);
+    const slot = place?.slot ?? -1;
+    const { factor, offset } = place?.unit ?? { factor: 1, offset: 0 };
+    if (!dimensional || (factor === 1 && offset === 0)) return (values) => values[slot] ?? Number.NaN;
+    return (values) => ((values[slot] ?? Number.NaN) - offset) / factor;
+  };
+}
+
+function inSI(run: Run, { factor, offset }: Unit): Run {
+  if (factor === 1 && offset === 0) return run;
+  return (slots) => run(slots) * factor + offset;
+}
+
+function unitAt(text: string): Unit {
+  const reading = readUnit(text);
+  if (!reading.ok) throw new RangeError(`unit ${text} passed the check and cannot be read`);
+  return reading.unit;
+}
+
+/** A group that an equation stands on says how far it goes, or that nobody says so. */
+function missingBounds({ lines, bounds }: Calculable, read: readonly ReadLine[]): Problem[] {
+  const bounded = new Set(bounds.map(({ on }) => on));
+  const groups = new Set(lines.filter(({ kind }) => kind === 'group').map(({ symbol }) => symbol));
+  const results = read.filter(({ line }) => line.kind === 'result');
+  const used = new Set(results.flatMap(({ formulas }) => formulas.flatMap(({ needs }) => needs)));
+  return [...used]
+    .filter((symbol) => groups.has(symbol) && !bounded.has(symbol))
+    .map((symbol) =>
+      definition('bounds', `${symbol} has no bound; where none is on record say so with the basis "none".`),
+    );
+}
+
+function repeatedParts({ parts }: CorrelationDefinition): Problem[] {
+  const keys = parts.map(({ key }) => key);
+  return keys.flatMap((key, i) =>
+    keys.indexOf(key) < i ? [definition(`parts[${i}].key`, `There are two parts "${key}".`)] : [],
+  );
+}
