@@ -1,4 +1,4 @@
-import { formatNumber, numberTex } from '../expression/number-text.js';
+import { formatNumber, numberTex, putInTex } from '../expression/number-text.js';
 import { symbolTex } from '../expression/symbol-tex.js';
 import { treeTex } from '../expression/tree-tex.js';
 import { CONSTANTS } from '../quantity/constants.js';
@@ -62,7 +62,7 @@ export function propertyStep(sheet: CompiledSheet, filled: FilledQuantity): Step
     texWithNumbers: `${letter} = ${numbers} = ${valueTex(value, unit)}`,
     value,
     unit,
-    note: definition.assumes ? `${definition.title}; assumes ${definition.assumes}` : definition.title,
+    note: definition.assumes ? `${definition.title}. Assumes: ${definition.assumes}` : definition.title,
   };
 }
 
@@ -70,16 +70,11 @@ export function propertyStep(sheet: CompiledSheet, filled: FilledQuantity): Step
 function numbersTex(reckoner: Reckoner, tree: Parameters<typeof treeTex>[0], dimensional: boolean): string {
   return treeTex(tree, (name) => {
     const constant = CONSTANTS[name];
-    if (constant) return name === 'pi' ? { tex: '\\pi', compound: false } : leaf(constant.value);
+    if (constant) return name === 'pi' ? { tex: '\\pi', compound: false } : putInTex(constant.value);
     const unit = unitOf(reckoner.sheet, name);
     const si = reckoner.valueOf(name);
-    return leaf(dimensional && unit ? fromSI(si, unit) : si);
+    return putInTex(dimensional && unit ? fromSI(si, unit) : si);
   });
-}
-
-function leaf(value: number): { tex: string; compound: boolean } {
-  const tex = numberTex(value);
-  return { tex, compound: tex.includes('times') || value < 0 };
 }
 
 /** A value with its unit upright behind a thin space. */

@@ -1,9 +1,5 @@
-import {
-  convertBasis,
-  BASES,
-  type CoefficientInSI,
-  type FluidState,
-} from '../basis/convert-basis.js';
+import { conversionStep } from '../basis/conversion-steps.js';
+import { convertBasis, BASES, type CoefficientInSI, type FluidState } from '../basis/convert-basis.js';
 import { fluidStateOf } from '../basis/fluid-state.js';
 import { fluxFrom, type FluxLine, type ReadForce } from '../basis/flux.js';
 import { symbolTex } from '../expression/symbol-tex.js';
@@ -71,9 +67,7 @@ export function numbersOf(
       steps: [
         ...supplies.filled.map((filled) => propertyStep(sheet, filled)),
         ...lineSteps(reckoner),
-        ...parts.flatMap((part) =>
-          part.conversions.flatMap((conversion) => conversionStep(part, conversion)),
-        ),
+        ...definition.parts.flatMap((part) => conversionSteps(definition, part, work, parts, state)),
         ...(flux ? [fluxStep(flux.line)] : []),
       ],
       equations: supplies.filled.map((filled) => ({
@@ -159,6 +153,22 @@ function readingOf({ result, coefficient }: Part): Reading | null {
   return null;
 }
 
+function conversionSteps(
+  definition: CorrelationDefinition,
+  part: Part,
+  { reckoner }: Work,
+  outcomes: readonly PartOutcome[],
+  state: FluidState,
+): Step[] {
+  const outcome = outcomes.find(({ key }) => key === part.key);
+  const inSI = coefficientInSI(definition, part, reckoner);
+  if (!outcome || !inSI) return [];
+  const own = readingOf(part)?.symbol ?? part.result.symbol;
+  return outcome.conversions.flatMap(
+    (conversion) => conversionStep(part.title, own, inSI, state, conversion) ?? [],
+  );
+}
+
 function conversionsOf(
   from: CoefficientInSI,
   own: string,
@@ -185,34 +195,6 @@ function fluxOf(definition: CorrelationDefinition, work: Work, force: ReadForce 
       },
     };
   return fluxFrom(inSI, force, state);
-}
-
-/** Formulas of the basis table, for the written-out steps. */
-const CONVERSION_TEX: Readonly<Record<CoefficientBasis, string>> = {
-  k_c: 'k_c',
-  k_G: '\\frac{k_c}{R\\,T}',
-  k_y: '\\frac{k_c\\,P}{R\\,T}',
-  F: 'k_y\\,\\frac{p_{\\mathrm{BM}}}{P}',
-  k_L: 'k_L',
-  k_x: '\\frac{k_L\\,\\rho}{M}',
-};
-
-function conversionStep(part: PartOutcome, { basis, symbol, value, unit, assumes }: Conversion): Step[] {
-  if (value === null || symbol === part.coefficient?.symbol) return [];
-  const letter = symbolTex(symbol.replace(/a$/, '')) + (symbol.endsWith('a') ? 'a' : '');
-  const low = assumes ? 'k_y' : CONVERSION_TEX[basis];
-  return [
-    {
-      kind: 'conversion',
-      symbol,
-      symbolTex: letter,
-      tex: `${letter} = ${low}`,
-      texWithNumbers: `${letter} = ${valueTex(value, unit)}`,
-      value,
-      unit,
-      note: `${part.title}, ${BASES[basis].words}${assumes ? `; assumes ${assumes}` : ''}`,
-    },
-  ];
 }
 
 function fluxStep({ flux, coefficient, coefficientSymbol, difference }: FluxLine): Step {

@@ -11,6 +11,13 @@ export function numberTex(value: number, digits = 4): string {
   return `${mantissa}\\times 10^{${exponent}}`;
 }
 
+/** A value put into a formula: whole where it has few digits (101 325, 298.15), else in four. */
+export function putInTex(value: number): { tex: string; compound: boolean } {
+  const short = Math.abs(Number(value.toPrecision(6)) - value) <= 1e-12 * Math.abs(value);
+  const tex = numberTex(value, short ? 6 : 4);
+  return { tex, compound: tex.includes('times') || value < 0 };
+}
+
 /** Plain decimals between 0.001 and 100 000, a power of ten outside; trailing zeros show the digits meant. */
 function parts(value: number, digits: number): { mantissa: string; exponent: number | null } {
   if (value === 0) return { mantissa: '0', exponent: null };
