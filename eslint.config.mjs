@@ -108,7 +108,8 @@ export default defineConfig(
     },
   },
   {
-    files: toolConfigs,
+    // Tools ask for a default export, and packages without types of their own may have one.
+    files: [...toolConfigs, '**/*.d.ts'],
     rules: { 'no-restricted-syntax': 'off' },
   },
   {

@@ -32,12 +32,14 @@ const freePort = () =>
 
 /**
  * Starts the built product on a free port with a new data folder and waits until it answers.
- * @param {{ env?: Record<string, string>, port?: number }} [options] settings on top, such as MERESTONE_DEMO
+ * @param {object} [options]
+ * @param {Record<string, string>} [options.env] settings on top, such as MERESTONE_DEMO
+ * @param {number} [options.port]
+ * @param {string} [options.main] the server's own file, absolute
  * @returns {Promise<TestOffice>}
  * @throws {Error} with the server's own output when it ends early or does not answer in time
  */
-export const serveForTests = async ({ env = {}, port } = {}) => {
-  const main = fromRoot('api', 'dist', 'main.js');
+export const serveForTests = async ({ env = {}, port, main = fromRoot('api', 'dist', 'main.js') } = {}) => {
   if (!existsSync(main)) throw new Error('There is no built server: run `npm run build` first.');
   const data = await mkdtemp(join(tmpdir(), 'merestone-data-'));
   const chosen = port ?? (await freePort());
