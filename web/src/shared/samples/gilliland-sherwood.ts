@@ -145,7 +145,7 @@ export const idealGasDryAir: PropertyEquationDefinition = {
       kind: 'published',
       source: 'U.S. Standard Atmosphere 1976: 1.2250 kg/m³ at 288.15 K and 101 325 Pa',
       inputs: { P: { value: 101325 }, T: { value: 288.15 } },
-      expected: { rho: { value: 1.225 } },
+      expected: { value: { value: 1.225 } },
       tolerancePercent: 0.05,
     },
   ],

@@ -12,24 +12,26 @@ import type { EquationInUse, FormField, FormItem, FormSection, RowPicker } from 
 import type { EvaluatedSheet } from './evaluated-sheet';
 import { inFieldOrder, type SectionKey } from './field-order';
 import { givenGroups } from './given-groups';
-import { servesFor } from './serves-for';
+import { servingQuantity } from './serving-quantity';
 
 const TITLES: Readonly<Record<SectionKey, string>> = {
   geometry: 'Geometry',
   conditions: 'Fluid and conditions',
   rest: 'The rest',
 };
-const MAX_NESTING = 3;
 
 /** The form for a duty, made from the sheet's definition and what has been chosen so far. */
 export function buildForm(sheet: EvaluatedSheet, duty: Duty): FormSection[] {
   const { definition } = sheet;
-  const given = duty.mode === 'groups' ? givenGroups(definition) : { groups: [], replaced: new Set<string>() };
+  const given =
+    duty.mode === 'groups' ? givenGroups(definition) : { groups: [], replaced: new Set<string>() };
   const pickers = (definition.tables ?? []).map((table) =>
     rowPicker(table, table.name, definition.quantities, duty),
   );
   const filledByRow = new Set(pickers.flatMap((picker) => Object.keys(picker.chosen?.values ?? {})));
-  const asked = definition.quantities.filter((q) => !given.replaced.has(q.symbol) && !filledByRow.has(q.symbol));
+  const asked = definition.quantities.filter(
+    (q) => !given.replaced.has(q.symbol) && !filledByRow.has(q.symbol),
+  );
   const sections: FormSection[] = inFieldOrder(asked).map(({ section, quantities }) => ({
     key: section,
     title: TITLES[section],
@@ -51,20 +53,20 @@ function withPickers(sections: FormSection[], pickers: RowPicker[]): FormSection
   return [{ key: 'geometry', title: TITLES.geometry, items: pickers }, ...sections];
 }
 
+/** A quantity of the sheet; only these may be filled by a property equation. */
 function sheetField(quantity: Quantity, sheet: EvaluatedSheet, duty: Duty): FormField {
-  return quantityField(quantity, quantity.symbol, sheet, duty, 0);
+  const { symbol } = quantity;
+  const choices = sheet.equations.filter(({ slug }) => quantity.equations?.includes(slug));
+  const chosen = choices.find(({ slug }) => slug === duty.equations[symbol]);
+  return {
+    ...quantityField(quantity, symbol),
+    equations: choices.map(({ slug, definition }) => ({ slug, title: definition.title })),
+    filledBy: chosen ? equationInUse(chosen.slug, chosen.definition, symbol, sheet, duty) : null,
+  };
 }
 
-function quantityField(
-  quantity: Quantity,
-  key: string,
-  sheet: EvaluatedSheet,
-  duty: Duty,
-  depth: number,
-): FormField {
+function quantityField(quantity: Quantity, key: string): FormField {
   const entry = QUANTITIES[quantity.is];
-  const choices = sheet.equations.filter(({ slug }) => quantity.equations?.includes(slug));
-  const chosen = depth < MAX_NESTING ? choices.find(({ slug }) => slug === duty.equations[key]) : undefined;
   return {
     kind: 'quantity',
     key,
@@ -74,8 +76,8 @@ function quantityField(
     units: unitsFor(quantity.unit, entry),
     hint: quantity.meaning ?? entry?.hint ?? null,
     optional: quantity.role === 'state',
-    equations: choices.map(({ slug, definition }) => ({ slug, title: definition.title })),
-    filledBy: chosen ? equationInUse(chosen.slug, chosen.definition, key, sheet, duty, depth) : null,
+    equations: [],
+    filledBy: null,
   };
 }
 
@@ -105,7 +107,6 @@ function equationInUse(
   key: string,
   sheet: EvaluatedSheet,
   duty: Duty,
-  depth: number,
 ): EquationInUse {
   const pickers = (definition.tables ?? []).map((table) =>
     rowPicker(table, `${key}.${table.name}`, definition.quantities, duty),
@@ -115,9 +116,10 @@ function equationInUse(
   const served: EquationInUse['served'] = [];
   for (const quantity of definition.quantities) {
     if (fromRow.has(quantity.symbol)) continue;
-    const onSheet = sheet.definition.quantities.find((q) => q.symbol !== key && servesFor(q.is, quantity.is));
-    if (onSheet) served.push({ key: onSheet.symbol, symbol: quantity.symbol, label: labelOf(onSheet) });
-    else own.push(quantityField(quantity, `${key}.${quantity.symbol}`, sheet, duty, depth + 1));
+    const onSheet = servingQuantity(sheet.definition.quantities, quantity.is);
+    if (onSheet && onSheet.symbol !== key)
+      served.push({ key: onSheet.symbol, symbol: quantity.symbol, label: labelOf(onSheet) });
+    else own.push(quantityField(quantity, `${key}.${quantity.symbol}`));
   }
   return { slug, title: definition.title, assumes: definition.assumes ?? null, own, served };
 }

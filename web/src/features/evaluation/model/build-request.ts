@@ -26,7 +26,8 @@ export function buildRequest(sections: readonly FormSection[], duty: Duty): Buil
     const reading = readQuantity(duty.typed[field.key] ?? { text: '', unit: field.unit });
     if (reading.kind === 'problem') errors.push({ field: field.key, message: reading.message });
     if (reading.kind !== 'value') continue;
-    inputs[field.key] = field.kind === 'group' ? { value: reading.value } : { value: reading.value, unit: reading.unit };
+    inputs[field.key] =
+      field.kind === 'group' ? { value: reading.value } : { value: reading.value, unit: reading.unit };
   }
   for (const picker of pickersOf(sections)) if (picker.chosen) rows[picker.key] = picker.chosen.key;
   const force = readForce(duty, errors);
@@ -43,7 +44,10 @@ export function buildRequest(sections: readonly FormSection[], duty: Duty): Buil
 }
 
 /** The request with the reasons given for the symbols that lie outside. */
-export function withDeviations(request: EvaluationRequest, deviations: DeviationRequest[]): EvaluationRequest {
+export function withDeviations(
+  request: EvaluationRequest,
+  deviations: DeviationRequest[],
+): EvaluationRequest {
   return deviations.length === 0 ? request : { ...request, deviations };
 }
 

@@ -16,7 +16,10 @@ export interface NamedProblem {
 }
 
 /** Finds the field on show that a problem is about, following an equation's input to the sheet's own quantity. */
-export function fieldErrors(problems: readonly NamedProblem[], sections: readonly FormSection[]): FieldError[] {
+export function fieldErrors(
+  problems: readonly NamedProblem[],
+  sections: readonly FormSection[],
+): FieldError[] {
   const fields = fieldsOf(sections);
   const known = new Set([...fields.map((f) => f.key), ...pickersOf(sections).map((p) => `rows.${p.key}`)]);
   const found = new Map<string, FieldError>();

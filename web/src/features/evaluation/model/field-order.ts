@@ -4,7 +4,18 @@ export type SectionKey = 'geometry' | 'conditions' | 'rest';
 
 const SHAPE_UNITS = new Set(['m', 'm^2', 'm^3', '1/m']);
 const SHAPE_WORDS = /void|porosity|angle|aspect|number-of|turns|hydraulic|open-area|pitch/;
-const CONDITION_UNITS = ['K', 'Pa', 'm/s', 'kg/(m^2 s)', 'kg/(m s)', 'kg/s', 'm^3/s', 'm^2/s', '1/s', 'rad/s'];
+const CONDITION_UNITS = [
+  'K',
+  'Pa',
+  'm/s',
+  'kg/(m^2 s)',
+  'kg/(m s)',
+  'kg/s',
+  'm^3/s',
+  'm^2/s',
+  '1/s',
+  'rad/s',
+];
 
 /** Where a quantity stands in the head of an engineer: the apparatus, the fluid and its conditions, the rest. */
 export function sectionOf(quantity: Quantity): SectionKey {
@@ -26,7 +37,9 @@ export function rankOf(quantity: Quantity): number {
 }
 
 /** Quantities in the order in which they are asked for, section by section. */
-export function inFieldOrder(quantities: readonly Quantity[]): { section: SectionKey; quantities: Quantity[] }[] {
+export function inFieldOrder(
+  quantities: readonly Quantity[],
+): { section: SectionKey; quantities: Quantity[] }[] {
   const sections: SectionKey[] = ['geometry', 'conditions', 'rest'];
   return sections
     .map((section) => ({

@@ -1,7 +1,5 @@
 import type { CorrelationDefinition, Group } from '@merestone/engine';
-
-const NUMBER = /(?<![A-Za-z_0-9])(?:\d+\.?\d*|\.\d+)(?:[eE][+-]?\d+)?/g;
-const NAME = /[A-Za-z][A-Za-z0-9]*(?:_[A-Za-z0-9]+)?/g;
+import { namesIn } from './names-in';
 
 export interface GivenGroups {
   /** Groups to be asked for in place of their quantities. */
@@ -40,8 +38,4 @@ function namesOutsideGroups(definition: CorrelationDefinition): Set<string> {
     ]),
   ]);
   return new Set(names);
-}
-
-function namesIn(expression: string): string[] {
-  return expression.replace(NUMBER, ' ').match(NAME) ?? [];
 }

@@ -1,0 +1,70 @@
+import type { Conversion, Numbers } from '@merestone/engine';
+import { Figure } from '../../../shared/ui/figure';
+import { SymbolMark } from '../../../shared/ui/symbol-mark';
+import { Mark } from './mark';
+
+const MEANT: Readonly<Record<Conversion['basis'], string>> = {
+  k_c: 'gas, concentration',
+  k_G: 'gas, partial pressure',
+  k_y: 'gas, mole fraction',
+  F: 'free of drift',
+  k_L: 'liquid, concentration',
+  k_x: 'liquid, mole fraction',
+};
+
+/** The coefficient on the other bases, or what has to be known first. */
+export function BasesTable({ numbers, mark }: { numbers: Numbers; mark: string | null }) {
+  const parts = numbers.parts.filter((part) => part.conversions.length > 0);
+  return parts.map((part) => (
+    <div
+      key={part.key}
+      className="table-box"
+      tabIndex={0}
+      role="group"
+      aria-label={`Other bases, ${part.title}`}
+    >
+      <table className="set-table">
+        <thead>
+          <tr>
+            <th scope="col">
+              {parts.length > 1 ? `Other bases, ${part.title.toLowerCase()}` : 'Other bases'}
+            </th>
+            <th scope="col">Driving force</th>
+            <th scope="col" className="number">
+              Value
+            </th>
+          </tr>
+        </thead>
+        <tbody>
+          {part.conversions.map((conversion) => (
+            <BasisRow key={conversion.basis} conversion={conversion} mark={mark} />
+          ))}
+        </tbody>
+      </table>
+    </div>
+  ));
+}
+
+function BasisRow({ conversion, mark }: { conversion: Conversion; mark: string | null }) {
+  const { basis, symbol, value, unit, missing, assumes } = conversion;
+  return (
+    <tr>
+      <th scope="row">
+        <SymbolMark symbol={symbol} />
+      </th>
+      <td>
+        {MEANT[basis]}
+        {assumes ? <span className="table-words">takes for granted: {assumes}</span> : null}
+      </td>
+      <td className="number">
+        {value === null ? (
+          <span className="table-words">needs {missing.join(', ')}</span>
+        ) : (
+          <>
+            <Figure value={value} unit={unit} /> <Mark words={mark} />
+          </>
+        )}
+      </td>
+    </tr>
+  );
+}

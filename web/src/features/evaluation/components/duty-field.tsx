@@ -1,0 +1,70 @@
+import { InlineEquation } from '../../../shared/ui/equation';
+import { QuantityField } from '../../../shared/ui/quantity-field/quantity-field';
+import type { FormField } from '../model/duty-form';
+import { fieldId } from '../model/field-id';
+import type { DutyControls } from './duty-controls';
+import { DutyItem } from './duty-item';
+import { FilledQuantity } from './filled-quantity';
+
+interface DutyFieldProps {
+  field: FormField;
+  controls: DutyControls;
+}
+
+/** A quantity that is typed, or filled by a property equation where the sheet allows one. */
+export function DutyField({ field, controls }: DutyFieldProps) {
+  const { key, filledBy } = field;
+  const id = fieldId(key);
+  const symbol = <InlineEquation tex={field.symbolTex} />;
+  return (
+    <div className={filledBy && filledBy.own.length > 0 ? 'duty-item duty-item-wide' : 'duty-item'}>
+      {filledBy ? (
+        <FilledQuantity field={field} equation={filledBy} filled={controls.filledOf(key)} symbol={symbol} />
+      ) : (
+        <QuantityField
+          id={id}
+          label={field.label}
+          symbol={symbol}
+          typed={controls.duty.typed[key] ?? { text: '', unit: field.unit }}
+          units={field.units}
+          hint={field.hint}
+          optional={field.optional}
+          error={controls.errorOf(key)}
+          onChange={(typed) => controls.change({ do: 'type', key, typed })}
+        />
+      )}
+      {field.equations.length > 0 ? <SourceChoice field={field} controls={controls} /> : null}
+      {filledBy && filledBy.own.length > 0 ? (
+        <div className="duty-own" role="group" aria-label={`For ${filledBy.title}`}>
+          {filledBy.own.map((item) => (
+            <DutyItem key={item.key} item={item} controls={controls} />
+          ))}
+        </div>
+      ) : null}
+    </div>
+  );
+}
+
+/** Where the value comes from: typed in, or a published property equation. */
+function SourceChoice({ field, controls }: DutyFieldProps) {
+  return (
+    <label className="duty-source">
+      <span>
+        <span className="heard-only">{field.label}: </span>taken from
+      </span>
+      <select
+        value={field.filledBy?.slug ?? ''}
+        onChange={(event) =>
+          controls.change({ do: 'choose-equation', key: field.key, slug: event.target.value || null })
+        }
+      >
+        <option value="">my own value</option>
+        {field.equations.map(({ slug, title }) => (
+          <option key={slug} value={slug}>
+            {title}
+          </option>
+        ))}
+      </select>
+    </label>
+  );
+}

@@ -1,0 +1,83 @@
+import type { CorrelationDefinition, Numbers } from '@merestone/engine';
+import { Figure } from '../../../shared/ui/figure';
+import { SymbolMark } from '../../../shared/ui/symbol-mark';
+
+interface GroupsTableProps {
+  numbers: Numbers;
+  definition: CorrelationDefinition;
+}
+
+interface Row {
+  symbol: string;
+  name: string;
+  value: number;
+  unit: string;
+}
+
+/** Groups, named steps and results with their values. */
+export function GroupsTable({ numbers, definition }: GroupsTableProps) {
+  const rows = rowsOf(numbers, definition);
+  return (
+    <div className="table-box" tabIndex={0} role="group" aria-label="Groups and results">
+      <table className="set-table">
+        <thead>
+          <tr>
+            <th scope="col">Symbol</th>
+            <th scope="col">Groups and results</th>
+            <th scope="col" className="number">
+              Value
+            </th>
+          </tr>
+        </thead>
+        <tbody>
+          {rows.map(({ symbol, name, value, unit }) => (
+            <tr key={symbol}>
+              <th scope="row">
+                <SymbolMark symbol={symbol} />
+              </th>
+              <td>{name}</td>
+              <td className="number">
+                <Figure value={value} unit={unit} />
+              </td>
+            </tr>
+          ))}
+        </tbody>
+      </table>
+    </div>
+  );
+}
+
+function rowsOf(numbers: Numbers, definition: CorrelationDefinition): Row[] {
+  const groups = Object.entries(numbers.groups).map(([symbol, value]) => ({
+    symbol,
+    name: definition.groups.find((group) => group.symbol === symbol)?.name ?? 'group',
+    value,
+    unit: '1',
+  }));
+  const steps = Object.entries(numbers.intermediates).map(([symbol, { value, unit }]) => ({
+    symbol,
+    name: definition.intermediates?.find((line) => line.symbol === symbol)?.name ?? 'step',
+    value,
+    unit,
+  }));
+  const results = numbers.parts.map(({ title, result }) => ({
+    symbol: result.symbol,
+    name: numbers.parts.length > 1 ? title : (KINDS[kindOf(definition, result.symbol)] ?? title),
+    value: result.value,
+    unit: result.unit,
+  }));
+  return [...groups, ...steps, ...results];
+}
+
+const KINDS: Readonly<Record<string, string>> = {
+  Sherwood: 'Sherwood number',
+  Stanton: 'Stanton number of mass transfer',
+  'j-factor': 'j-factor of mass transfer',
+  coefficient: 'Coefficient as the source gives it',
+  'volumetric-coefficient': 'Volumetric coefficient as the source gives it',
+  'interfacial-area': 'Interfacial area per volume',
+};
+
+function kindOf(definition: CorrelationDefinition, symbol: string): string {
+  return definition.parts.find((part) => part.result.symbol === symbol)?.result.kind ?? '';
+}

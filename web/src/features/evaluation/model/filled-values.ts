@@ -1,0 +1,53 @@
+import { propertyValue, type InputValue, type PropertyLibrary } from '@merestone/engine';
+import type { BuiltRequest } from './build-request';
+import { fieldsOf, type FormField, type FormSection } from './duty-form';
+
+/** The value that a property equation puts into a field. */
+export interface FilledValue {
+  value: number;
+  unit: string;
+}
+
+/**
+ * What the chosen property equations come to, each as soon as its own inputs are there: also while other fields are
+ * still empty, and where a bound of the sheet refuses the result.
+ */
+export function filledValues(
+  library: PropertyLibrary,
+  { request }: BuiltRequest,
+  sections: readonly FormSection[],
+): ReadonlyMap<string, FilledValue> {
+  const fields = fieldsOf(sections);
+  const found = new Map<string, FilledValue>();
+  const pending = fields.filter((field) => field.filledBy !== null);
+  for (let round = 0; round < pending.length; round += 1)
+    for (const field of pending) {
+      if (found.has(field.key)) continue;
+      const value = valueOf(field, library, request.inputs, request.rows ?? {}, found);
+      if (value !== null) found.set(field.key, value);
+    }
+  return found;
+}
+
+function valueOf(
+  { key, unit, filledBy }: FormField,
+  library: PropertyLibrary,
+  inputs: Record<string, InputValue>,
+  rows: Record<string, string>,
+  found: ReadonlyMap<string, FilledValue>,
+): FilledValue | null {
+  const equation = filledBy ? library(filledBy.slug) : undefined;
+  if (!filledBy || !equation) return null;
+  const own: Record<string, InputValue> = {};
+  for (const [name, value] of Object.entries(inputs))
+    if (name.startsWith(`${key}.`)) own[name.slice(key.length + 1)] = value;
+  for (const { key: onSheet, symbol } of filledBy.served) {
+    const value = inputs[onSheet] ?? found.get(onSheet);
+    if (value) own[symbol] = value;
+  }
+  const ownRows = Object.entries(rows)
+    .filter(([name]) => name.startsWith(`${key}.`))
+    .map(([name, row]) => [name.slice(key.length + 1), row] as const);
+  const result = propertyValue(equation, { inputs: own, rows: Object.fromEntries(ownRows) });
+  return result.value === null ? null : { value: result.value, unit: equation.definition.unit || unit };
+}
