@@ -103,6 +103,7 @@ export default defineConfig(
     files: ['packages/workshop/**/*.mjs'],
     rules: {
       'no-console': 'off',
+      '@typescript-eslint/no-unsafe-argument': 'off',
       '@typescript-eslint/no-unsafe-assignment': 'off',
       '@typescript-eslint/no-unsafe-return': 'off',
     },
