@@ -1,13 +1,16 @@
 // npm run dev: Vite with hot reload on http://localhost:4170, in front of a server that follows its sources.
 import { spawn } from 'node:child_process';
+import { existsSync } from 'node:fs';
 import { answer } from './house/answer.mjs';
 import { copyServerAssets } from './house/build-product.mjs';
 import { ensureInstalled } from './house/install.mjs';
 import { fromRoot, root } from './house/paths.mjs';
+import { CannotGoOn } from './house/prerequisites.mjs';
 import { exitCodeOf, runNode } from './house/run-command.mjs';
 
 const screensPort = '4170';
 const typescript = fromRoot('node_modules', 'typescript', 'bin', 'tsc');
+const serverFile = fromRoot('api', 'dist', 'main.js');
 const serverProjects = ['packages/engine', 'packages/api-client', 'api'];
 
 /**
@@ -50,6 +53,8 @@ await answer(async () => {
   // Errors are shown by the watching compiler as well; the first pass only makes sure that there is something to run.
   await runNode(typescript, ['-b', ...serverProjects], { cwd: root });
   copyServerAssets();
+  if (!existsSync(serverFile))
+    throw new CannotGoOn(['There is no server to run yet: it did not compile; see above.']);
 
   const port = process.env.MERESTONE_PORT ?? '4171';
   const env = {
@@ -67,7 +72,7 @@ await answer(async () => {
     ),
     startChild(
       'The server',
-      ['--watch', '--watch-preserve-output', '--enable-source-maps', fromRoot('api', 'dist', 'main.js')],
+      ['--watch', '--watch-preserve-output', '--enable-source-maps', serverFile],
       root,
       env,
     ),

@@ -2,7 +2,7 @@ import { readFileSync } from 'node:fs';
 import { Parser } from 'expr-eval';
 import { compile } from 'mathjs';
 import { parse } from 'yaml';
-import { compileCorrelation, kernelFor, POINT } from '@merestone/engine';
+import { checkStructure, compileCorrelation, kernelFor, POINT } from '@merestone/engine';
 import { fromRoot } from '../house/paths.mjs';
 
 const points = 4096;
@@ -36,7 +36,9 @@ const duties = Array.from({ length: points }, (_, i) => ({
 
 const sheet = () => {
   const path = fromRoot('fixtures', 'correlations', 'wetted-wall', 'wetted-wall-gilliland-sherwood.yaml');
-  const result = compileCorrelation(parse(readFileSync(path, 'utf8')));
+  const structure = checkStructure(parse(readFileSync(path, 'utf8')));
+  if (!structure.ok) throw new Error(JSON.stringify(structure.problems));
+  const result = compileCorrelation(structure.definition);
   if (!result.ok) throw new Error(JSON.stringify(result.problems));
   return result.compiled.sheet;
 };
