@@ -1,4 +1,4 @@
-import { App, ConfigProvider } from 'antd';
+import { ConfigProvider } from 'antd';
 import type { ReactNode } from 'react';
 import { SWRConfig } from 'swr';
 import { asApiProblem } from '../shared/api/api-problem';
@@ -11,11 +11,9 @@ export function Providers({ children }: { children: ReactNode }) {
   const night = useNightSheet();
   return (
     <ConfigProvider theme={antdTheme(night)} wave={{ disabled: true }}>
-      <App component={false}>
-        <SWRConfig value={{ fetcher: getJson, shouldRetryOnError: mayPass, revalidateOnFocus: false }}>
-          {children}
-        </SWRConfig>
-      </App>
+      <SWRConfig value={{ fetcher: getJson, shouldRetryOnError: mayPass, revalidateOnFocus: false }}>
+        {children}
+      </SWRConfig>
     </ConfigProvider>
   );
 }

@@ -1,5 +1,4 @@
 import { Navigate, createBrowserRouter, type RouteObject } from 'react-router-dom';
-import { RequireSignIn } from '../shared/session/require-sign-in';
 import { paths } from '../shared/paths';
 import { PageFrame } from './layout/page-frame';
 import { NotFound } from './routes/not-found';
@@ -23,7 +22,10 @@ export const routes: RouteObject[] = [
             path: paths.signIn,
             lazy: async () => ({ Component: (await import('./routes/sign-in')).SignInRoute }),
           },
-          { element: <RequireSignIn />, children: signedInRoutes },
+          {
+            lazy: async () => ({ Component: (await import('./layout/signed-in-area')).SignedInArea }),
+            children: signedInRoutes,
+          },
           { path: '*', element: <NotFound /> },
         ],
       },

@@ -1,4 +1,5 @@
-import { App, Button } from 'antd';
+import { Button } from 'antd';
+import { useState } from 'react';
 import { Link, NavLink, useNavigate } from 'react-router-dom';
 import { asApiProblem } from '../../shared/api/api-problem';
 import { paths } from '../../shared/paths';
@@ -35,14 +36,14 @@ export function Masthead() {
 
 function SignedIn({ name, roles }: { name: string; roles: string[] }) {
   const { signOut } = useSession();
-  const { message } = App.useApp();
+  const [problem, setProblem] = useState<string | null>(null);
   const navigate = useNavigate();
   const leave = async () => {
     try {
       await signOut();
       await navigate(paths.signIn);
     } catch (thrown) {
-      void message.error(asApiProblem(thrown).title);
+      setProblem(asApiProblem(thrown).title);
     }
   };
   return (
@@ -52,6 +53,7 @@ function SignedIn({ name, roles }: { name: string; roles: string[] }) {
       <Button type="link" size="small" onClick={() => void leave()}>
         Sign out
       </Button>
+      {problem ? <span role="alert"> {problem}</span> : null}
     </p>
   );
 }
