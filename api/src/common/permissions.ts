@@ -6,7 +6,9 @@ import type { Role } from './roles.js';
  */
 const ROLES_BY_PERMISSION = {
   'register.read': ['engineer', 'reviewer', 'authority', 'auditor', 'administrator'],
+  'register.read-unapproved': ['reviewer', 'authority', 'auditor'],
   'correlation.evaluate': ['engineer', 'reviewer', 'authority'],
+  'evaluation.read-all': ['authority', 'auditor'],
   'correlation.draft': ['engineer'],
   'correlation.submit': ['engineer'],
   'correlation.comment': ['engineer', 'reviewer', 'authority'],

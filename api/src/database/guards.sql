@@ -113,3 +113,205 @@ CREATE TRIGGER person_role_stays_as_given BEFORE UPDATE ON person_role
 BEGIN
   SELECT RAISE(ABORT, 'roles are given and taken, not changed');
 END;
+
+-- The register: what a revision said, what standing it had, and who signed what, stays as it was written.
+
+CREATE TRIGGER revision_content_keeps_rows BEFORE UPDATE ON revision_content
+BEGIN
+  SELECT RAISE(ABORT, 'what a revision said cannot be changed');
+END;
+
+CREATE TRIGGER revision_content_keeps_all BEFORE DELETE ON revision_content
+BEGIN
+  SELECT RAISE(ABORT, 'what a revision said cannot be removed');
+END;
+
+CREATE TRIGGER revision_content_keeps_places BEFORE INSERT ON revision_content
+WHEN EXISTS (SELECT 1 FROM revision_content WHERE id = NEW.id OR (revision_id = NEW.revision_id AND iteration = NEW.iteration))
+BEGIN
+  SELECT RAISE(ABORT, 'what a revision said cannot be replaced');
+END;
+
+CREATE TRIGGER standing_event_keeps_rows BEFORE UPDATE ON standing_event
+BEGIN
+  SELECT RAISE(ABORT, 'standings cannot be changed');
+END;
+
+CREATE TRIGGER standing_event_keeps_all BEFORE DELETE ON standing_event
+BEGIN
+  SELECT RAISE(ABORT, 'standings cannot be removed');
+END;
+
+CREATE TRIGGER standing_event_keeps_places BEFORE INSERT ON standing_event
+WHEN EXISTS (SELECT 1 FROM standing_event WHERE id = NEW.id)
+BEGIN
+  SELECT RAISE(ABORT, 'standings cannot be replaced');
+END;
+
+CREATE TRIGGER submission_keeps_rows BEFORE UPDATE ON submission
+BEGIN
+  SELECT RAISE(ABORT, 'submissions cannot be changed');
+END;
+
+CREATE TRIGGER submission_keeps_all BEFORE DELETE ON submission
+BEGIN
+  SELECT RAISE(ABORT, 'submissions cannot be removed');
+END;
+
+CREATE TRIGGER submission_keeps_places BEFORE INSERT ON submission
+WHEN EXISTS (SELECT 1 FROM submission WHERE id = NEW.id)
+BEGIN
+  SELECT RAISE(ABORT, 'submissions cannot be replaced');
+END;
+
+CREATE TRIGGER review_keeps_rows BEFORE UPDATE ON review
+BEGIN
+  SELECT RAISE(ABORT, 'reviews cannot be changed');
+END;
+
+CREATE TRIGGER review_keeps_all BEFORE DELETE ON review
+BEGIN
+  SELECT RAISE(ABORT, 'reviews cannot be removed');
+END;
+
+CREATE TRIGGER review_keeps_places BEFORE INSERT ON review
+WHEN EXISTS (SELECT 1 FROM review WHERE id = NEW.id)
+BEGIN
+  SELECT RAISE(ABORT, 'reviews cannot be replaced');
+END;
+
+CREATE TRIGGER review_assignment_keeps_rows BEFORE UPDATE ON review_assignment
+BEGIN
+  SELECT RAISE(ABORT, 'assignments of reviewers cannot be changed');
+END;
+
+CREATE TRIGGER review_assignment_keeps_all BEFORE DELETE ON review_assignment
+BEGIN
+  SELECT RAISE(ABORT, 'assignments of reviewers cannot be removed');
+END;
+
+CREATE TRIGGER review_assignment_keeps_places BEFORE INSERT ON review_assignment
+WHEN EXISTS (SELECT 1 FROM review_assignment WHERE id = NEW.id OR (revision_id = NEW.revision_id AND reviewer_id = NEW.reviewer_id))
+BEGIN
+  SELECT RAISE(ABORT, 'assignments of reviewers cannot be replaced');
+END;
+
+CREATE TRIGGER comment_keeps_rows BEFORE UPDATE ON comment
+BEGIN
+  SELECT RAISE(ABORT, 'comments cannot be changed');
+END;
+
+CREATE TRIGGER comment_keeps_all BEFORE DELETE ON comment
+BEGIN
+  SELECT RAISE(ABORT, 'comments cannot be removed');
+END;
+
+CREATE TRIGGER comment_keeps_places BEFORE INSERT ON comment
+WHEN EXISTS (SELECT 1 FROM comment WHERE id = NEW.id)
+BEGIN
+  SELECT RAISE(ABORT, 'comments cannot be replaced');
+END;
+
+CREATE TRIGGER approval_keeps_rows BEFORE UPDATE ON approval
+BEGIN
+  SELECT RAISE(ABORT, 'approvals cannot be changed');
+END;
+
+CREATE TRIGGER approval_keeps_all BEFORE DELETE ON approval
+BEGIN
+  SELECT RAISE(ABORT, 'approvals cannot be removed');
+END;
+
+CREATE TRIGGER approval_keeps_places BEFORE INSERT ON approval
+WHEN EXISTS (SELECT 1 FROM approval WHERE id = NEW.id OR revision_id = NEW.revision_id)
+BEGIN
+  SELECT RAISE(ABORT, 'approvals cannot be replaced');
+END;
+
+CREATE TRIGGER evaluation_keeps_rows BEFORE UPDATE ON evaluation
+BEGIN
+  SELECT RAISE(ABORT, 'kept evaluations cannot be changed');
+END;
+
+CREATE TRIGGER evaluation_keeps_all BEFORE DELETE ON evaluation
+BEGIN
+  SELECT RAISE(ABORT, 'kept evaluations cannot be removed');
+END;
+
+CREATE TRIGGER evaluation_keeps_places BEFORE INSERT ON evaluation
+WHEN EXISTS (SELECT 1 FROM evaluation WHERE id = NEW.id OR rowid = NEW.rowid)
+BEGIN
+  SELECT RAISE(ABORT, 'kept evaluations cannot be replaced');
+END;
+
+CREATE TRIGGER correlation_keeps_rows BEFORE UPDATE ON correlation
+BEGIN
+  SELECT RAISE(ABORT, 'correlations cannot be changed');
+END;
+
+CREATE TRIGGER correlation_keeps_all BEFORE DELETE ON correlation
+BEGIN
+  SELECT RAISE(ABORT, 'correlations cannot be removed');
+END;
+
+CREATE TRIGGER correlation_keeps_places BEFORE INSERT ON correlation
+WHEN EXISTS (SELECT 1 FROM correlation WHERE id = NEW.id OR slug = NEW.slug)
+BEGIN
+  SELECT RAISE(ABORT, 'correlations cannot be replaced');
+END;
+
+CREATE TRIGGER property_equation_keeps_rows BEFORE UPDATE ON property_equation
+BEGIN
+  SELECT RAISE(ABORT, 'property equations cannot be changed');
+END;
+
+CREATE TRIGGER property_equation_keeps_all BEFORE DELETE ON property_equation
+BEGIN
+  SELECT RAISE(ABORT, 'property equations cannot be removed');
+END;
+
+CREATE TRIGGER property_equation_keeps_places BEFORE INSERT ON property_equation
+WHEN EXISTS (SELECT 1 FROM property_equation WHERE id = NEW.id OR slug = NEW.slug)
+BEGIN
+  SELECT RAISE(ABORT, 'property equations cannot be replaced');
+END;
+
+-- A revision keeps its identity; only a draft that came with the library gets an originator.
+
+CREATE TRIGGER revision_keeps_identity BEFORE UPDATE ON revision
+WHEN OLD.id <> NEW.id
+  OR OLD.correlation_id IS NOT NEW.correlation_id
+  OR OLD.property_equation_id IS NOT NEW.property_equation_id
+  OR OLD.number <> NEW.number
+  OR OLD.created_at <> NEW.created_at
+  OR OLD.originator_id <> 'system'
+BEGIN
+  SELECT RAISE(ABORT, 'revisions cannot be changed');
+END;
+
+CREATE TRIGGER revision_keeps_all BEFORE DELETE ON revision
+BEGIN
+  SELECT RAISE(ABORT, 'revisions cannot be removed');
+END;
+
+CREATE TRIGGER revision_keeps_places BEFORE INSERT ON revision
+WHEN EXISTS (
+  SELECT 1 FROM revision
+  WHERE id = NEW.id
+    OR (correlation_id = NEW.correlation_id AND number = NEW.number)
+    OR (property_equation_id = NEW.property_equation_id AND number = NEW.number)
+)
+BEGIN
+  SELECT RAISE(ABORT, 'revisions cannot be replaced');
+END;
+
+-- Content is frozen with the first standing that is neither draft nor in review.
+
+CREATE TRIGGER revision_content_is_frozen BEFORE INSERT ON revision_content
+WHEN EXISTS (
+  SELECT 1 FROM standing_event
+  WHERE revision_id = NEW.revision_id AND standing NOT IN ('draft', 'in review')
+)
+BEGIN
+  SELECT RAISE(ABORT, 'the content of this revision is frozen');
+END;

@@ -11,15 +11,19 @@ export const ACTS = {
   'correlation.drafted': 'drafted a correlation',
   'revision.drafted': 'drafted a next revision',
   'revision.submitted': 'submitted a revision for review',
+  'revision.taken-back': 'took a revision back for changes',
+  'revision.taken-over': 'took over a draft of the library',
   'revision.commented': 'commented on a revision',
   'revision.reviewed': 'reviewed a revision',
   'revision.approved': 'approved a revision',
   'revision.superseded': 'superseded a revision',
   'revision.declined': 'declined a revision',
   'revision.suspended': 'suspended a revision',
+  'revision.reinstated': 'reinstated a suspended revision',
   'revision.withdrawn': 'withdrew a revision',
   'evaluation.deviated': 'evaluated outside a bound',
-  'property-equation.added': 'added a property equation',
+  'property-equation.drafted': 'drafted a property equation',
+  'geometries.added': 'added geometries',
 } as const satisfies Record<string, string>;
 
 export type Act = keyof typeof ACTS;

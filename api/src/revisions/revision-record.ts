@@ -1,0 +1,32 @@
+import type { Standing } from '../common/standing.js';
+
+export type SubjectKind = 'correlation' | 'property-equation';
+
+/** Names one revision of a correlation or a property equation. */
+export interface RevisionKey {
+  readonly kind: SubjectKind;
+  readonly slug: string;
+  readonly number: number;
+}
+
+/** A revision as it stands now: identity, last standing and latest content. */
+export interface RevisionRecord extends RevisionKey {
+  readonly id: number;
+  readonly originatorId: string;
+  readonly createdAt: string;
+  readonly standing: Standing;
+  /** When it got that standing. */
+  readonly standingAt: string;
+  readonly iteration: number;
+  readonly hash: string;
+}
+
+const PATHS: Record<SubjectKind, string> = {
+  correlation: 'correlations',
+  'property-equation': 'property-equations',
+};
+
+/** The revision's path as in the API; the journal names it so. */
+export function subjectOf(key: RevisionKey): string {
+  return `${PATHS[key.kind]}/${key.slug}/revisions/${key.number}`;
+}
