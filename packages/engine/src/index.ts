@@ -50,6 +50,7 @@ export {
   type CheckReport,
   type CheckedValue,
 } from './evaluation/run-checks.js';
+export { kernelFor, POINT, type Kernel, type PointStatus } from './evaluation/kernel.js';
 export { SHORTEST_REASON, LONGEST_REASON } from './evaluation/check-deviations.js';
 export { unitTex, valueTex, valueText } from './evaluation/explain.js';
 

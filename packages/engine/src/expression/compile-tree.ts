@@ -1,106 +1,128 @@
-import { FUNCTIONS, type Tree } from './tree.js';
+import { FUNCTIONS, type BinaryOperator, type Tree } from './tree.js';
 
 /** An expression as a closure over a vector of values. */
 export type Run = (slots: Float64Array) => number;
 
+/** How a symbol is read: from a slot, as a fixed value, or through a closure. */
+export type SymbolReading = { slot: number } | { fixed: number } | { run: Run };
+
+/** A part of an expression on its way to a closure: fixed values are folded, plain slots are read directly. */
+interface Operand {
+  run: Run;
+  fixed: number | null;
+  slot: number | null;
+}
+
 /**
- * Turns a tree into a closure; `leaf` says how a symbol is read. Our own code runs, never text:
- * each node is one small function, with the frequent forms (constant factors and powers) made direct.
+ * Turns a tree into a closure; `symbol` says how a name is read. Only our own small functions run, never text:
+ * one a node, with the frequent forms (fixed factors and powers, bare symbols) made direct.
  */
-export function compileTree(tree: Tree, leaf: (name: string) => Run): Run {
-  const constant = constantOf(tree);
-  if (constant !== null) return () => constant;
+export function compileTree(tree: Tree, symbol: (name: string) => SymbolReading): Run {
+  return operandOf(tree, symbol).run;
+}
+
+/** The value of a tree without symbols; null where it has some. */
+export function constantOf(tree: Tree): number | null {
+  return operandOf(tree, () => ({ run: () => Number.NaN })).fixed;
+}
+
+function operandOf(tree: Tree, symbol: (name: string) => SymbolReading): Operand {
   switch (tree.kind) {
-    case 'number': {
-      const { value } = tree;
-      return () => value;
-    }
+    case 'number':
+      return fixed(tree.value);
     case 'symbol':
-      return leaf(tree.name);
+      return read(symbol(tree.name));
     case 'negate': {
-      const operand = compileTree(tree.operand, leaf);
-      return (slots) => -operand(slots);
+      const operand = operandOf(tree.operand, symbol);
+      if (operand.fixed !== null) return fixed(-operand.fixed);
+      const { run } = operand;
+      return computed((slots) => -run(slots));
     }
-    case 'binary':
-      return compileBinary(tree, leaf);
+    case 'binary': {
+      const left = operandOf(tree.left, symbol);
+      const right = operandOf(tree.right, symbol);
+      if (left.fixed !== null && right.fixed !== null)
+        return fixed(combine(tree.operator, left.fixed, right.fixed));
+      return computed(binaryRun(tree.operator, left, right));
+    }
     case 'call':
-      return compileCall(tree, leaf);
+      return callOperand(
+        tree,
+        tree.operands.map((operand) => operandOf(operand, symbol)),
+      );
   }
 }
 
-function compileBinary(tree: Tree & { kind: 'binary' }, leaf: (name: string) => Run): Run {
-  if (tree.operator === '^') return compilePower(tree, leaf);
-  const left = compileTree(tree.left, leaf);
-  const right = compileTree(tree.right, leaf);
-  const factor = constantOf(tree.left);
-  switch (tree.operator) {
+function fixed(value: number): Operand {
+  return { run: () => value, fixed: value, slot: null };
+}
+
+function computed(run: Run): Operand {
+  return { run, fixed: null, slot: null };
+}
+
+function read(reading: SymbolReading): Operand {
+  if ('fixed' in reading) return fixed(reading.fixed);
+  if ('run' in reading) return computed(reading.run);
+  const { slot } = reading;
+  return { run: (slots) => slots[slot] ?? Number.NaN, fixed: null, slot };
+}
+
+function binaryRun(operator: BinaryOperator, left: Operand, right: Operand): Run {
+  const { run: a } = left;
+  const { run: b } = right;
+  switch (operator) {
     case '+':
-      return (slots) => left(slots) + right(slots);
+      return (slots) => a(slots) + b(slots);
     case '-':
-      return (slots) => left(slots) - right(slots);
+      return (slots) => a(slots) - b(slots);
     case '*':
-      if (factor !== null) return (slots) => factor * right(slots);
-      return (slots) => left(slots) * right(slots);
+      return productRun(left, right);
     case '/':
-      return (slots) => left(slots) / right(slots);
+      return quotientRun(left, right);
+    case '^':
+      return powerRun(left, right);
   }
 }
 
-function compilePower(tree: Tree & { kind: 'binary' }, leaf: (name: string) => Run): Run {
-  const base = compileTree(tree.left, leaf);
-  const exponent = constantOf(tree.right);
-  if (exponent === null) {
-    const run = compileTree(tree.right, leaf);
-    return (slots) => base(slots) ** run(slots);
-  }
+function productRun({ run: a, fixed: factor, slot: i }: Operand, { run: b, slot: j }: Operand): Run {
+  if (factor !== null) return (slots) => factor * b(slots);
+  if (i !== null && j !== null) return (slots) => (slots[i] ?? Number.NaN) * (slots[j] ?? Number.NaN);
+  if (j !== null) return (slots) => a(slots) * (slots[j] ?? Number.NaN);
+  return (slots) => a(slots) * b(slots);
+}
+
+function quotientRun({ run: a, slot: i }: Operand, { run: b, slot: j }: Operand): Run {
+  if (j !== null) return (slots) => a(slots) / (slots[j] ?? Number.NaN);
+  if (i !== null) return (slots) => (slots[i] ?? Number.NaN) / b(slots);
+  return (slots) => a(slots) / b(slots);
+}
+
+function powerRun({ run: base, slot }: Operand, { run: b, fixed: exponent }: Operand): Run {
+  if (exponent === null) return (slots) => base(slots) ** b(slots);
   if (exponent === 0.5) return (slots) => Math.sqrt(base(slots));
   if (exponent === 2)
     return (slots) => {
       const value = base(slots);
       return value * value;
     };
+  if (slot !== null) return (slots) => (slots[slot] ?? Number.NaN) ** exponent;
   return (slots) => base(slots) ** exponent;
 }
 
-function compileCall(tree: Tree & { kind: 'call' }, leaf: (name: string) => Run): Run {
-  const [first, second, ...rest] = tree.operands.map((operand) => compileTree(operand, leaf));
-  if (!first) throw new RangeError(`${tree.name} without an operand passed the parser`);
-  if (!second) {
-    const apply = FUNCTIONS[tree.name].apply as (value: number) => number;
-    return (slots) => apply(first(slots));
-  }
-  const apply = FUNCTIONS[tree.name].apply as (...values: number[]) => number;
-  if (rest.length === 0) return (slots) => apply(first(slots), second(slots));
+function callOperand({ name }: Tree & { kind: 'call' }, operands: readonly Operand[]): Operand {
+  const apply: (...values: number[]) => number = FUNCTIONS[name].apply;
+  const values = operands.map((operand) => operand.fixed).filter((value) => value !== null);
+  if (values.length === operands.length) return fixed(apply(...values));
+  const [first, second, ...rest] = operands.map(({ run }) => run);
+  if (!first) throw new RangeError(`${name} without an operand passed the parser`);
+  if (!second) return computed((slots) => apply(first(slots)));
+  if (rest.length === 0) return computed((slots) => apply(first(slots), second(slots)));
   const all = [first, second, ...rest];
-  return (slots) => apply(...all.map((run) => run(slots)));
+  return computed((slots) => apply(...all.map((run) => run(slots))));
 }
 
-/** The value of a tree without symbols; null where it has some. */
-export function constantOf(tree: Tree): number | null {
-  switch (tree.kind) {
-    case 'number':
-      return tree.value;
-    case 'symbol':
-      return null;
-    case 'negate': {
-      const value = constantOf(tree.operand);
-      return value === null ? null : -value;
-    }
-    case 'binary': {
-      const left = constantOf(tree.left);
-      const right = constantOf(tree.right);
-      return left === null || right === null ? null : combine(tree.operator, left, right);
-    }
-    case 'call': {
-      const values = tree.operands.map(constantOf);
-      const known = values.filter((value) => value !== null);
-      if (known.length < values.length) return null;
-      return (FUNCTIONS[tree.name].apply as (...values: number[]) => number)(...known);
-    }
-  }
-}
-
-function combine(operator: '+' | '-' | '*' | '/' | '^', left: number, right: number): number {
+function combine(operator: BinaryOperator, left: number, right: number): number {
   switch (operator) {
     case '+':
       return left + right;

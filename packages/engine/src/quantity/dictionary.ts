@@ -1,4 +1,4 @@
-import type { DictionaryEntry } from './dictionary-entry.js';
+import type { DictionaryEntry, DictionaryPart } from './dictionary-entry.js';
 import { beds } from './dictionary/beds.js';
 import { dispersions } from './dictionary/dispersions.js';
 import { apparatusLengths } from './dictionary/apparatus-lengths.js';
@@ -10,20 +10,24 @@ import { properties } from './dictionary/properties.js';
 import { propertyInputs } from './dictionary/property-inputs.js';
 import { states } from './dictionary/states.js';
 
+const PARTS: readonly DictionaryPart[] = [
+  beds,
+  dispersions,
+  apparatusLengths,
+  flow,
+  interfaceStates,
+  lengths,
+  localVelocities,
+  properties,
+  propertyInputs,
+  states,
+];
+
 /** The quantity dictionary, by name. Forms that serve several sheets, and property equations, are keyed by these names. */
 export const QUANTITIES: Readonly<Record<string, DictionaryEntry>> = Object.freeze(
-  Object.assign(
+  PARTS.reduce<Record<string, DictionaryEntry>>(
+    (all, part) => Object.assign(all, part),
     Object.create(null) as Record<string, DictionaryEntry>,
-    states,
-    properties,
-    lengths,
-    flow,
-    beds,
-    dispersions,
-    interfaceStates,
-    propertyInputs,
-    apparatusLengths,
-    localVelocities,
   ),
 );
 

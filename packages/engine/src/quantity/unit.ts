@@ -169,7 +169,7 @@ function splitAtSlashes(plain: string): string[] {
     if (c === '(') depth += 1;
     if (c === ')') depth -= 1;
     if (c === '/' && depth === 0) sides.push('');
-    else sides[sides.length - 1] += c;
+    else sides.push(`${sides.pop() ?? ''}${c}`);
   }
   return sides;
 }

@@ -1,4 +1,4 @@
-import { compileTree, type Run } from '../expression/compile-tree.js';
+import { compileTree, type Run, type SymbolReading } from '../expression/compile-tree.js';
 import type { Problem } from '../evaluation/outcome.js';
 import { CONSTANTS, isConstant } from '../quantity/constants.js';
 import { QUANTITIES } from '../quantity/dictionary.js';
@@ -82,13 +82,13 @@ function compileLine(
   slots: ReadonlyMap<string, { slot: number; unit: Unit }>,
 ): CompiledLine {
   const unit = unitAt(line.unit);
-  const leaf = leafReader(slots, line.dimensional);
+  const symbol = symbolReader(slots, line.dimensional);
   return {
     line,
     unit,
     slot: slots.get(line.symbol)?.slot ?? 0,
     variants: formulas.map(({ title, when, tree, needs }) => {
-      const run = compileTree(tree, leaf);
+      const run = compileTree(tree, symbol);
       return {
         title,
         when: when.map((condition) => ({ on: condition.on, interval: intervalOf(condition) })),
@@ -101,17 +101,14 @@ function compileLine(
 }
 
 /** Slots hold SI; a dimensional formula reads and gives the sheet's own units. */
-function leafReader(slots: ReadonlyMap<string, { slot: number; unit: Unit }>, dimensional: boolean) {
-  return (name: string): Run => {
-    if (isConstant(name)) {
-      const value = CONSTANTS[name]?.value ?? Number.NaN;
-      return () => value;
-    }
+function symbolReader(slots: ReadonlyMap<string, { slot: number; unit: Unit }>, dimensional: boolean) {
+  return (name: string): SymbolReading => {
+    if (isConstant(name)) return { fixed: CONSTANTS[name]?.value ?? Number.NaN };
     const place = slots.get(name);
     const slot = place?.slot ?? -1;
     const { factor, offset } = place?.unit ?? { factor: 1, offset: 0 };
-    if (!dimensional || (factor === 1 && offset === 0)) return (values) => values[slot] ?? Number.NaN;
-    return (values) => ((values[slot] ?? Number.NaN) - offset) / factor;
+    if (!dimensional || (factor === 1 && offset === 0)) return { slot };
+    return { run: (values) => ((values[slot] ?? Number.NaN) - offset) / factor };
   };
 }
 
