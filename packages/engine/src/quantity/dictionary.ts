@@ -23,12 +23,12 @@ const PARTS: readonly DictionaryPart[] = [
   states,
 ];
 
+/** No inherited names: `constructor` is not in the dictionary. */
+const NOTHING = Object.create(null) as Record<string, DictionaryEntry>;
+
 /** The quantity dictionary, by name. Forms that serve several sheets, and property equations, are keyed by these names. */
 export const QUANTITIES: Readonly<Record<string, DictionaryEntry>> = Object.freeze(
-  PARTS.reduce<Record<string, DictionaryEntry>>(
-    (all, part) => Object.assign(all, part),
-    Object.create(null) as Record<string, DictionaryEntry>,
-  ),
+  PARTS.reduce((all, part) => Object.assign(all, part), NOTHING),
 );
 
 /** Whether a value of `given` serves where `wanted` is asked for. */
