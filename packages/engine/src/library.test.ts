@@ -8,6 +8,7 @@ import {
   checkStructure,
   compileCorrelation,
   compilePropertyEquation,
+  evaluate,
   runChecks,
   runPropertyChecks,
   serves,
@@ -15,6 +16,7 @@ import {
   type CompiledCorrelation,
   type CompiledEquation,
   type CorrelationDefinition,
+  type EvaluationRequest,
 } from './index.js';
 
 /**
@@ -137,5 +139,55 @@ describe('the library as a whole', () => {
     expect(sheetEntries.length).toBeGreaterThanOrEqual(24);
     expect(new Set(sheetEntries.map(({ slug }) => slug)).size).toBe(sheetEntries.length);
     expect(new Set(sheetEntries.map(({ folder }) => folder)).size).toBeGreaterThanOrEqual(12);
+  });
+});
+
+describe('duties', () => {
+  function duty(slug: string, request: EvaluationRequest) {
+    const entry = sheetEntries.find((one) => one.slug === slug);
+    if (!entry) throw new Error(`no sheet ${slug}`);
+    return evaluate(sheet(entry), request, find);
+  }
+  const moistAir = {
+    inputs: {
+      u: { value: 5 },
+      d: { value: 25.4, unit: 'mm' },
+      P: { value: 1, unit: 'atm' },
+      T: { value: 35, unit: 'degC' },
+      T_i: { value: 22, unit: 'degC' },
+      phi: { value: 0.3 },
+    },
+    equations: {
+      rho: 'air-density-ideal',
+      mu: 'air-viscosity-sutherland',
+      D: 'water-vapour-air-diffusivity-marrero-mason',
+      p_BM: 'log-mean-inert-pressure',
+      p_Ai: 'water-psat-iapws',
+      p_Ab: 'water-vapour-bulk-pressure',
+    },
+  };
+
+  it('fills everything of a humidifier from property equations', () => {
+    // The same equations worked through by a separate script.
+    const evaluation = duty('wetted-wall-gilliland-sherwood', moistAir);
+    if (!evaluation.ok || evaluation.outcome.outcome === 'refused') throw new Error('refused');
+    expect(evaluation.outcome.groups['Re']).toBeCloseTo(7720.529, 2);
+    expect(evaluation.outcome.coefficient?.value).toBeCloseTo(0.033739079, 8);
+    expect(evaluation.outcome.equations.map(({ symbol }) => symbol)).toContain('p_BM');
+  });
+
+  it('gives no coefficient where no inert gas is left at the interface', () => {
+    const evaluation = duty('wetted-wall-gilliland-sherwood', {
+      ...moistAir,
+      inputs: { ...moistAir.inputs, T_i: { value: 101, unit: 'degC' } },
+    });
+    expect(evaluation.ok).toBe(false);
+  });
+
+  it('refuses a Schmidt number at which nobody measured', () => {
+    const evaluation = duty('pipe-turbulent-linton-sherwood', {
+      inputs: { Re: { value: 20000 }, Sc: { value: 300 } },
+    });
+    expect(evaluation.ok && evaluation.outcome.outcome).toBe('refused');
   });
 });
