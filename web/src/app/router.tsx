@@ -8,6 +8,11 @@ import { RouteError } from './routes/route-error';
 const signedInRoutes: RouteObject[] = [
   { path: '/', element: <Navigate to={paths.start} replace /> },
   { path: '/register', lazy: async () => ({ Component: (await import('./routes/register')).RegisterRoute }) },
+  { path: '/register/:slug', lazy: async () => ({ Component: (await import('./routes/sheet')).SheetRoute }) },
+  {
+    path: '/register/:slug/revisions/:n',
+    lazy: async () => ({ Component: (await import('./routes/sheet')).SheetRoute }),
+  },
 ];
 
 export const routes: RouteObject[] = [

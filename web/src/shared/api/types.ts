@@ -1,5 +1,6 @@
 import type {
   Bound,
+  CheckReport,
   CorrelationDefinition,
   Finding,
   Outcome,
@@ -92,20 +93,6 @@ export interface CorrelationPage {
   facets: { geometry: FacetCount[]; phase: FacetCount[]; standing: FacetCount[] };
 }
 
-export interface CheckReport {
-  title: string;
-  kind: 'published' | 'computed';
-  passed: boolean;
-  values: {
-    symbol: string;
-    expected: number;
-    found: number | null;
-    deviationPercent: number | null;
-    unit: string;
-  }[];
-  findings: Finding[];
-  problems: { code: string; field: string; message: string }[];
-}
 export interface SheetEquation {
   slug: string;
   revision: number;

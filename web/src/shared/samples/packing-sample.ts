@@ -26,7 +26,11 @@ export const wettedArea: CorrelationDefinition = {
       name: 'packing',
       title: 'Packing',
       rows: [
-        { key: 'raschig-ceramic-25', label: 'Raschig rings, ceramic, 25 mm', values: { a_t: 190, sigma_c: 0.061 } },
+        {
+          key: 'raschig-ceramic-25',
+          label: 'Raschig rings, ceramic, 25 mm',
+          values: { a_t: 190, sigma_c: 0.061 },
+        },
         { key: 'pall-steel-25', label: 'Pall rings, steel, 25 mm', values: { a_t: 205, sigma_c: 0.075 } },
       ],
     },

@@ -1,9 +1,17 @@
-import { compileCorrelation, compilePropertyEquation, runChecks, type CorrelationDefinition } from '@merestone/engine';
+import {
+  compileCorrelation,
+  compilePropertyEquation,
+  runChecks,
+  type CorrelationDefinition,
+} from '@merestone/engine';
 import type { Sheet } from '../api/types';
 import { gillilandSherwood, idealGasDryAir } from './gilliland-sherwood';
 
 /** A sheet as the server would send it, about a sample definition. Made for tests. */
-export function sampleSheet(definition: CorrelationDefinition = gillilandSherwood, over: Partial<Sheet> = {}): Sheet {
+export function sampleSheet(
+  definition: CorrelationDefinition = gillilandSherwood,
+  over: Partial<Sheet> = {},
+): Sheet {
   const compiled = compileCorrelation(definition);
   if (!compiled.ok) throw new Error(compiled.problems.map((p) => `${p.field}: ${p.message}`).join('; '));
   const equation = compilePropertyEquation('ideal-gas-dry-air', idealGasDryAir);

@@ -1,5 +1,5 @@
 import 'katex/dist/katex.min.css';
-import type { ReactNode } from 'react';
+import { memo, type ReactNode } from 'react';
 import { BlockMath, InlineMath } from 'react-katex';
 import './equation.css';
 
@@ -14,7 +14,7 @@ interface EquationProps {
 }
 
 /** A displayed equation with its number; wide ones scroll inside themselves, reachable by keyboard. */
-export function Equation({ tex, number, children, id }: EquationProps) {
+export const Equation = memo(function Equation({ tex, number, children, id }: EquationProps) {
   return (
     <div className="equation" id={id}>
       <div
@@ -29,9 +29,9 @@ export function Equation({ tex, number, children, id }: EquationProps) {
       {children ? <div className="equation-words">{children}</div> : null}
     </div>
   );
-}
+});
 
-/** Mathematics in a line of text. */
-export function InlineEquation({ tex }: { tex: string }) {
+/** Mathematics in a line of text. Typesetting is dear beside a keystroke, so it is done once for each text. */
+export const InlineEquation = memo(function InlineEquation({ tex }: { tex: string }) {
   return <InlineMath math={tex} renderError={() => <code>{tex}</code>} />;
-}
+});

@@ -1,5 +1,6 @@
 import type { Conversion, Numbers } from '@merestone/engine';
 import { Figure } from '../../../shared/ui/figure';
+import { SetTable } from '../../../shared/ui/set-table';
 import { SymbolMark } from '../../../shared/ui/symbol-mark';
 import { Mark } from './mark';
 
@@ -16,32 +17,22 @@ const MEANT: Readonly<Record<Conversion['basis'], string>> = {
 export function BasesTable({ numbers, mark }: { numbers: Numbers; mark: string | null }) {
   const parts = numbers.parts.filter((part) => part.conversions.length > 0);
   return parts.map((part) => (
-    <div
-      key={part.key}
-      className="table-box"
-      tabIndex={0}
-      role="group"
-      aria-label={`Other bases, ${part.title}`}
-    >
-      <table className="set-table">
-        <thead>
-          <tr>
-            <th scope="col">
-              {parts.length > 1 ? `Other bases, ${part.title.toLowerCase()}` : 'Other bases'}
-            </th>
-            <th scope="col">Driving force</th>
-            <th scope="col" className="number">
-              Value
-            </th>
-          </tr>
-        </thead>
-        <tbody>
-          {part.conversions.map((conversion) => (
-            <BasisRow key={conversion.basis} conversion={conversion} mark={mark} />
-          ))}
-        </tbody>
-      </table>
-    </div>
+    <SetTable key={part.key} label={`Other bases, ${part.title}`}>
+      <thead>
+        <tr>
+          <th scope="col">{parts.length > 1 ? `Other bases, ${part.title.toLowerCase()}` : 'Other bases'}</th>
+          <th scope="col">Driving force</th>
+          <th scope="col" className="number">
+            Value
+          </th>
+        </tr>
+      </thead>
+      <tbody>
+        {part.conversions.map((conversion) => (
+          <BasisRow key={conversion.basis} conversion={conversion} mark={mark} />
+        ))}
+      </tbody>
+    </SetTable>
   ));
 }
 

@@ -1,5 +1,6 @@
 import type { CorrelationDefinition, Numbers } from '@merestone/engine';
 import { Figure } from '../../../shared/ui/figure';
+import { SetTable } from '../../../shared/ui/set-table';
 import { SymbolMark } from '../../../shared/ui/symbol-mark';
 
 interface GroupsTableProps {
@@ -18,32 +19,30 @@ interface Row {
 export function GroupsTable({ numbers, definition }: GroupsTableProps) {
   const rows = rowsOf(numbers, definition);
   return (
-    <div className="table-box" tabIndex={0} role="group" aria-label="Groups and results">
-      <table className="set-table">
-        <thead>
-          <tr>
-            <th scope="col">Symbol</th>
-            <th scope="col">Groups and results</th>
-            <th scope="col" className="number">
-              Value
+    <SetTable label="Groups and results">
+      <thead>
+        <tr>
+          <th scope="col">Symbol</th>
+          <th scope="col">Groups and results</th>
+          <th scope="col" className="number">
+            Value
+          </th>
+        </tr>
+      </thead>
+      <tbody>
+        {rows.map(({ symbol, name, value, unit }) => (
+          <tr key={symbol}>
+            <th scope="row">
+              <SymbolMark symbol={symbol} />
             </th>
+            <td>{name}</td>
+            <td className="number">
+              <Figure value={value} unit={unit} />
+            </td>
           </tr>
-        </thead>
-        <tbody>
-          {rows.map(({ symbol, name, value, unit }) => (
-            <tr key={symbol}>
-              <th scope="row">
-                <SymbolMark symbol={symbol} />
-              </th>
-              <td>{name}</td>
-              <td className="number">
-                <Figure value={value} unit={unit} />
-              </td>
-            </tr>
-          ))}
-        </tbody>
-      </table>
-    </div>
+        ))}
+      </tbody>
+    </SetTable>
   );
 }
 

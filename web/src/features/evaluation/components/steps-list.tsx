@@ -1,4 +1,5 @@
 import type { Step } from '@merestone/engine';
+import { memo } from 'react';
 import { Equation } from '../../../shared/ui/equation';
 import { Figure } from '../../../shared/ui/figure';
 import { MarginNote } from '../../../shared/ui/margin-note';
@@ -25,7 +26,7 @@ const WORDS: Readonly<Record<Step['kind'], string>> = {
 const CARRIES_MARK = new Set<Step['kind']>(['result', 'coefficient', 'conversion', 'flux', 'intermediate']);
 
 /** The whole calculation in numbered lines, each in symbols and with the values put in. */
-export function StepsList({ steps, firstNumber, mark }: StepsListProps) {
+export const StepsList = memo(function StepsList({ steps, firstNumber, mark }: StepsListProps) {
   return (
     <section aria-labelledby="written-out">
       <h2 id="written-out">Written out</h2>
@@ -34,7 +35,7 @@ export function StepsList({ steps, firstNumber, mark }: StepsListProps) {
           Every number below that rests on the deviation is <Mark words={mark} />.
         </p>
       ) : null}
-      <ol className="steps">
+      <ol className="steps" aria-label="Steps">
         {steps.map((step, i) => (
           <li key={`${step.kind} ${step.symbol}`}>
             <MarginRow notes={<StepNote step={step} mark={mark} />}>
@@ -48,7 +49,7 @@ export function StepsList({ steps, firstNumber, mark }: StepsListProps) {
       </ol>
     </section>
   );
-}
+});
 
 function StepNote({ step, mark }: { step: Step; mark: string | null }) {
   return (

@@ -8,6 +8,7 @@ import { fieldErrors, type FieldError } from '../model/field-error';
 import { filledValues, type FilledValue } from '../model/filled-values';
 import { askedOf } from '../model/keeping';
 import { previewOf, type Preview } from '../model/preview';
+import { readingsOf } from '../model/readings';
 import { shownOutcome } from '../model/shown-outcome';
 import { useCompiledSheet } from './use-compiled-sheet';
 import { useDuty } from './use-duty';
@@ -21,10 +22,9 @@ export function useEvaluation(sheet: EvaluatedSheet, personId: string) {
   const [duty, change] = useDuty(dutyKey(personId, sheet.slug));
   const engine = useCompiledSheet(sheet);
   const { keeping, keep, forget } = useKeeping(sheet.slug, sheet.revision);
-  const form = useMemo(() => {
-    const sections = buildForm(sheet, duty);
-    return { sections, built: buildRequest(sections, duty) };
-  }, [sheet, duty]);
+  const { mode, equations, rows } = duty;
+  const sections = useMemo(() => buildForm(sheet, { mode, equations, rows }), [sheet, mode, equations, rows]);
+  const form = useMemo(() => ({ sections, built: buildRequest(sections, duty) }), [sections, duty]);
   const settled = useSettled(form, SETTLE_MS);
   const preview = useMemo(
     (): Preview => (engine.ok ? previewOf(engine, settled.built, settled.sections) : { state: 'empty' }),
@@ -38,7 +38,11 @@ export function useEvaluation(sheet: EvaluatedSheet, personId: string) {
   const [summary, setSummary] = useState<FieldError[]>([]);
 
   const asked = askedOf(form.built.request);
-  const shown = shownOutcome(preview, keeping, asked);
+  const shown = useMemo(() => shownOutcome(preview, keeping, asked), [preview, keeping, asked]);
+  const readings = useMemo(
+    () => readingsOf(shown, settled.built.request.inputs, filled, sheet),
+    [shown, settled, filled, sheet],
+  );
   const errors = useMemo((): FieldError[] => {
     const ofServer =
       keeping.state === 'failed' && keeping.asked === asked
@@ -68,13 +72,14 @@ export function useEvaluation(sheet: EvaluatedSheet, personId: string) {
     sheet,
     duty,
     change,
-    sections: form.sections,
+    sections,
     started: form.built.started,
     definitionProblems: engine.ok ? [] : engine.problems,
     preview,
     filled,
     keeping,
     shown,
+    readings,
     errors,
     /** What kept the last press of the button from going through; empty once it is all put right. */
     summary: errors.length > 0 || preview.state === 'empty' ? summary : [],

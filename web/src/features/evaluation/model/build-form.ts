@@ -7,7 +7,7 @@ import {
   type Quantity,
   type Table,
 } from '@merestone/engine';
-import type { Duty } from './duty';
+import type { DutyChoices } from './duty';
 import type { EquationInUse, FormField, FormItem, FormSection, RowPicker } from './duty-form';
 import type { EvaluatedSheet } from './evaluated-sheet';
 import { inFieldOrder, type SectionKey } from './field-order';
@@ -21,7 +21,7 @@ const TITLES: Readonly<Record<SectionKey, string>> = {
 };
 
 /** The form for a duty, made from the sheet's definition and what has been chosen so far. */
-export function buildForm(sheet: EvaluatedSheet, duty: Duty): FormSection[] {
+export function buildForm(sheet: EvaluatedSheet, duty: DutyChoices): FormSection[] {
   const { definition } = sheet;
   const given =
     duty.mode === 'groups' ? givenGroups(definition) : { groups: [], replaced: new Set<string>() };
@@ -54,7 +54,7 @@ function withPickers(sections: FormSection[], pickers: RowPicker[]): FormSection
 }
 
 /** A quantity of the sheet; only these may be filled by a property equation. */
-function sheetField(quantity: Quantity, sheet: EvaluatedSheet, duty: Duty): FormField {
+function sheetField(quantity: Quantity, sheet: EvaluatedSheet, duty: DutyChoices): FormField {
   const { symbol } = quantity;
   const choices = sheet.equations.filter(({ slug }) => quantity.equations?.includes(slug));
   const chosen = choices.find(({ slug }) => slug === duty.equations[symbol]);
@@ -106,7 +106,7 @@ function equationInUse(
   definition: PropertyEquationDefinition,
   key: string,
   sheet: EvaluatedSheet,
-  duty: Duty,
+  duty: DutyChoices,
 ): EquationInUse {
   const pickers = (definition.tables ?? []).map((table) =>
     rowPicker(table, `${key}.${table.name}`, definition.quantities, duty),
@@ -124,7 +124,7 @@ function equationInUse(
   return { slug, title: definition.title, assumes: definition.assumes ?? null, own, served };
 }
 
-function rowPicker(table: Table, key: string, quantities: readonly Quantity[], duty: Duty): RowPicker {
+function rowPicker(table: Table, key: string, quantities: readonly Quantity[], duty: DutyChoices): RowPicker {
   const given = new Set(table.rows.flatMap((row) => Object.keys(row.values)));
   return {
     kind: 'row',

@@ -24,6 +24,9 @@ export interface Duty {
   reasons: Record<string, string>;
 }
 
+/** What decides which fields there are; what is typed into them does not. */
+export type DutyChoices = Pick<Duty, 'mode' | 'equations' | 'rows'>;
+
 export const EMPTY_DUTY: Duty = {
   mode: 'quantities',
   typed: {},

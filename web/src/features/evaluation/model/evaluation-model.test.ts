@@ -49,7 +49,16 @@ describe('the form made from a definition', () => {
   it('asks for geometry first, then temperature and pressure, then what follows from them', () => {
     const sections = buildForm(sheet, EMPTY_DUTY);
     expect(sections.map((section) => section.title)).toEqual(['Geometry', 'Fluid and conditions']);
-    expect(fieldsOf(sections).map((field) => field.key)).toEqual(['d', 'T', 'P', 'u', 'rho', 'mu', 'D', 'p_BM']);
+    expect(fieldsOf(sections).map((field) => field.key)).toEqual([
+      'd',
+      'T',
+      'P',
+      'u',
+      'rho',
+      'mu',
+      'D',
+      'p_BM',
+    ]);
   });
 
   it('labels a field with the dictionary title and offers units of its dimension', () => {
@@ -130,7 +139,11 @@ describe('the preview', () => {
   });
 
   it('leads a missing input of an equation to the field of the sheet that serves it', () => {
-    const duty = dutyOf(...typed({ d: ['25', 'mm'] }), { do: 'choose-equation', key: 'rho', slug: 'ideal-gas-dry-air' });
+    const duty = dutyOf(...typed({ d: ['25', 'mm'] }), {
+      do: 'choose-equation',
+      key: 'rho',
+      slug: 'ideal-gas-dry-air',
+    });
     const sections = buildForm(sheet, duty);
     const errors = fieldErrors([{ code: 'missing', field: 'inputs.rho.T', message: 'needed' }], sections);
     expect(errors).toEqual([{ field: 'T', message: 'needed' }]);
@@ -146,7 +159,9 @@ describe('filled values', () => {
     });
     const sections = buildForm(sheet, duty);
     // U.S. Standard Atmosphere 1976: 1.2250 kg/m³ at 15 °C and 101 325 Pa
-    expect(filledValues(engine.library, buildRequest(sections, duty), sections).get('rho')?.value).toBeCloseTo(1.225, 3);
+    expect(
+      filledValues(engine.library, buildRequest(sections, duty), sections).get('rho')?.value,
+    ).toBeCloseTo(1.225, 3);
   });
 });
 
@@ -159,7 +174,10 @@ describe('the stored duty', () => {
     });
     storeDuty(window.localStorage, 'k', duty);
     expect(readStoredDuty(window.localStorage, 'k')).toEqual(duty);
-    window.localStorage.setItem('k', '{"typed":{"u":{"text":5},"__proto__":{"text":"1","unit":"m"}},"mode":"x"}');
+    window.localStorage.setItem(
+      'k',
+      '{"typed":{"u":{"text":5},"__proto__":{"text":"1","unit":"m"}},"mode":"x"}',
+    );
     expect(readStoredDuty(window.localStorage, 'k')).toEqual(EMPTY_DUTY);
     window.localStorage.setItem('k', 'not json');
     expect(readStoredDuty(window.localStorage, 'k')).toEqual(EMPTY_DUTY);

@@ -1,0 +1,100 @@
+import type { CheckReport } from '@merestone/engine';
+import { memo } from 'react';
+import type { Sheet } from '../../../shared/api/types';
+import { formatNumber } from '../../../shared/format/format-number';
+import { Figure } from '../../../shared/ui/figure';
+import { MarginNote } from '../../../shared/ui/margin-note';
+import { SetTable } from '../../../shared/ui/set-table';
+import { MarginRow } from '../../../shared/ui/sheet-page';
+import { SymbolMark } from '../../../shared/ui/symbol-mark';
+
+/** The worked checks that every start of the machine recomputes. */
+export const ChecksSection = memo(function ChecksSection({ sheet }: { sheet: Sheet }) {
+  const { checks } = sheet;
+  return (
+    <MarginRow
+      notes={
+        <div className="notes-beside-heading">
+          <MarginNote title="Checks">{summaryOf(checks)}</MarginNote>
+        </div>
+      }
+    >
+      <h2>Worked checks</h2>
+      <SetTable label="Worked checks">
+        <thead>
+          <tr>
+            <th scope="col">Check</th>
+            <th scope="col" className="number">
+              Expected
+            </th>
+            <th scope="col" className="number">
+              Found
+            </th>
+            <th scope="col" className="number">
+              Deviation
+            </th>
+            <th scope="col">Outcome</th>
+          </tr>
+        </thead>
+        {checks.map((check) => (
+          <CheckRows key={check.title} check={check} />
+        ))}
+      </SetTable>
+    </MarginRow>
+  );
+});
+
+function CheckRows({ check }: { check: CheckReport }) {
+  return (
+    <tbody>
+      <tr className="check-title">
+        <th scope="rowgroup" colSpan={4}>
+          {check.title}
+          <span className="symbol-note">
+            {check.kind === 'published' ? 'Published example' : 'Computed by us, guards against slips only'}
+            {check.source ? `: ${check.source.replace(/\.$/, '')}` : ''}; within {check.tolerancePercent} %.{' '}
+            {check.note ?? ''}
+          </span>
+        </th>
+        <td>{check.passed ? 'reproduces' : <strong className="check-fails">does not reproduce</strong>}</td>
+      </tr>
+      {check.values.map(({ symbol, expected, found, deviationPercent, unit, passed }) => (
+        <tr key={symbol}>
+          <th scope="row">
+            <SymbolMark symbol={symbol} />
+          </th>
+          <td className="number">
+            <Figure value={expected} unit={unit} exactly />
+          </td>
+          <td className="number">{found === null ? 'none' : <Figure value={found} unit={unit} />}</td>
+          <td className="number">
+            {deviationPercent === null ? '' : `${formatNumber(deviationPercent, 2)} %`}
+          </td>
+          <td>{passed ? 'within' : 'outside'}</td>
+        </tr>
+      ))}
+      {check.problems.map(({ message }) => (
+        <tr key={message}>
+          <td colSpan={5}>{message}</td>
+        </tr>
+      ))}
+      {check.findings.map(({ message }) => (
+        <tr key={message}>
+          <td colSpan={5} className="symbol-note">
+            The example itself lies outside: {message}
+          </td>
+        </tr>
+      ))}
+    </tbody>
+  );
+}
+
+function summaryOf(checks: readonly CheckReport[]): string {
+  const good = checks.filter((check) => check.passed).length;
+  const published = checks.filter((check) => check.kind === 'published').length;
+  const kinds =
+    published === 0
+      ? 'None is a published example.'
+      : `${published === 1 ? 'One is a published example' : `${published} are published examples`}.`;
+  return `${good} of ${checks.length} worked ${checks.length === 1 ? 'check reproduces' : 'checks reproduce'}. ${kinds}`;
+}

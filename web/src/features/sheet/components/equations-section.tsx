@@ -1,0 +1,86 @@
+import type { DefinitionTex, LineTex } from '@merestone/engine';
+import { memo } from 'react';
+import type { Sheet } from '../../../shared/api/types';
+import { formatDay } from '../../../shared/format/format-date';
+import { Equation, InlineEquation } from '../../../shared/ui/equation';
+import { MarginNote } from '../../../shared/ui/margin-note';
+import { MarginRow } from '../../../shared/ui/sheet-page';
+import { VERIFICATION_WORDS } from '../model/plain-words';
+import { SourceNotes } from './source-notes';
+
+interface EquationsSectionProps {
+  sheet: Sheet;
+  tex: DefinitionTex | null;
+}
+
+/** The numbered equations, with their source and how far they have been verified beside them. */
+export const EquationsSection = memo(function EquationsSection({ sheet, tex }: EquationsSectionProps) {
+  return (
+    <MarginRow notes={<EquationNotes sheet={sheet} />}>
+      <div className="sheet-equations">
+        {tex ? (
+          <NumberedEquations tex={tex} />
+        ) : (
+          <p>The equations of this draft cannot be set yet: its definition does not hold together.</p>
+        )}
+      </div>
+    </MarginRow>
+  );
+});
+
+function EquationNotes({ sheet }: { sheet: Sheet }) {
+  const { verification, sources } = sheet.definition;
+  return (
+    <>
+      <SourceNotes sources={sources} />
+      <MarginNote title="Verification">
+        <p>{VERIFICATION_WORDS[verification.status]}</p>
+        <p>{verification.note}</p>
+      </MarginNote>
+      {sheet.approval ? (
+        <MarginNote title="Approved">
+          by {sheet.approval.by.name} on {formatDay(sheet.approval.at)}. {sheet.approval.meaning}
+        </MarginNote>
+      ) : null}
+    </>
+  );
+}
+
+function NumberedEquations({ tex }: { tex: DefinitionTex }) {
+  let number = 0;
+  const several = tex.parts.length > 1;
+  return (
+    <>
+      {tex.intermediates.map((line) => (
+        <Line key={line.symbol} line={line} number={(number += 1)} />
+      ))}
+      {tex.parts.map((part) => (
+        <section key={part.key} aria-label={part.title}>
+          {several ? <h3>{part.title}</h3> : null}
+          <Line line={part.result} number={(number += 1)} />
+          {part.coefficient ? <Line line={part.coefficient} number={(number += 1)} /> : null}
+        </section>
+      ))}
+    </>
+  );
+}
+
+/** One equation; of pieces each with the conditions it holds under, all under one number. */
+function Line({ line, number }: { line: LineTex; number: number }) {
+  return line.formulas.map(({ tex, whenTex, title }, i) => (
+    <Equation
+      key={tex + (whenTex ?? '')}
+      tex={`${line.symbolTex} = ${tex}`}
+      {...(line.formulas.length === 1
+        ? { number }
+        : { number: `${number}${'abcdefghijklmnopqrstuvwxyz'[i] ?? ''}` })}
+    >
+      {whenTex ? (
+        <>
+          {title ? `${title}: ` : 'for '}
+          <InlineEquation tex={whenTex} />
+        </>
+      ) : null}
+    </Equation>
+  ));
+}

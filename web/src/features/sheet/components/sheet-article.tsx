@@ -1,0 +1,65 @@
+import { compileCorrelation, definitionTex } from '@merestone/engine';
+import { useMemo, type ReactNode } from 'react';
+import { Link } from 'react-router-dom';
+import type { Sheet } from '../../../shared/api/types';
+import { paths } from '../../../shared/paths';
+import { RunningHead } from '../../../shared/ui/running-head';
+import { SheetPage } from '../../../shared/ui/sheet-page';
+import type { LiveReadings } from '../model/live-readings';
+import { inWords } from '../model/in-words';
+import { BoundsSection } from './bounds-section';
+import { ChecksSection } from './checks-section';
+import { DutySection } from './duty-section';
+import { EquationsSection } from './equations-section';
+import { HistorySection } from './history-section';
+import { PropertyEquationsSection } from './property-equations-section';
+import { StandingNotice } from './standing-notice';
+import { SymbolsSection } from './symbols-section';
+import './sheet-article.css';
+
+interface SheetArticleProps {
+  sheet: Sheet;
+  live: LiveReadings;
+  /** The form for a duty. */
+  duty: ReactNode;
+  /** What the duty comes to; told the number of its first equation. */
+  outcome: (firstNumber: number) => ReactNode;
+}
+
+/** A sheet as a handbook page: equation, where it holds, the duty and its result, then everything behind it. */
+export function SheetArticle({ sheet, live, duty, outcome }: SheetArticleProps) {
+  const { definition } = sheet;
+  const tex = useMemo(() => {
+    const compilation = compileCorrelation(definition);
+    return compilation.ok ? definitionTex(compilation.compiled) : null;
+  }, [definition]);
+  const equations = tex
+    ? tex.intermediates.length + tex.parts.flatMap((p) => [p.result, p.coefficient ?? []].flat()).length
+    : 0;
+  return (
+    <SheetPage
+      title={sheet.title}
+      subtitle={definition.summary}
+      runningHead={
+        <RunningHead
+          geometry={<Link to={paths.geometry(sheet.geometry)}>{sheet.geometryName}</Link>}
+          correlation={inWords(definition.authors)}
+          revision={sheet.revision}
+          standing={sheet.standing}
+          hash={sheet.hash}
+        />
+      }
+    >
+      <StandingNotice sheet={sheet} />
+      <EquationsSection sheet={sheet} tex={tex} />
+      <BoundsSection sheet={sheet} live={live} />
+      <DutySection definition={definition}>{duty}</DutySection>
+      {outcome(equations + 1)}
+      <SymbolsSection definition={definition} tex={tex} live={live} />
+      <PropertyEquationsSection equations={sheet.equations} />
+      <ChecksSection sheet={sheet} />
+      <HistorySection sheet={sheet} />
+      <p className="sheet-caution">{sheet.caution}</p>
+    </SheetPage>
+  );
+}

@@ -1,0 +1,96 @@
+import type { Bound, BoundNature, CorrelationDefinition, Source } from '@merestone/engine';
+
+type Definition = CorrelationDefinition;
+
+/** What each coded word of a sheet means, said plainly. */
+export const VERIFICATION_WORDS: Readonly<Record<Definition['verification']['status'], string>> = {
+  'published-example': 'Recomputed from a published worked example.',
+  'expression-seen': 'Expression seen in a source.',
+  'from-memory': 'From memory, to be checked against the source.',
+};
+
+export const NATURE_WORDS: Readonly<Record<BoundNature, string>> = {
+  data: 'where the data end',
+  regime: 'change of regime',
+  definition: 'edge of the formula’s meaning',
+  physical: 'physically possible values',
+};
+
+export const BASIS_WORDS: Readonly<Record<Bound['basis'], string>> = {
+  stated: 'stated in the source',
+  handbook: 'from a handbook',
+  'common-practice': 'common practice, no source',
+  none: 'no bound on record',
+};
+
+export const READ_WORDS: Readonly<Record<Source['read'], string>> = {
+  seen: 'The source was seen.',
+  memory: 'From memory, the source was not seen.',
+};
+
+export const STATE_WORDS: Readonly<Record<Definition['propertyState'], string>> = {
+  film: 'Properties at the film, midway between interface and bulk.',
+  bulk: 'Properties of the bulk.',
+  interface: 'Properties at the interface.',
+  inlet: 'Properties at the inlet.',
+  'not-stated': 'The source does not say at which state properties are taken.',
+};
+
+export const AVERAGING_WORDS: Readonly<Record<Definition['averaging'], string>> = {
+  average: 'mean over the surface',
+  local: 'local value',
+  'not-stated': 'not said whether local or mean',
+};
+
+export const WALL_WORDS: Readonly<Record<Definition['wall'], string>> = {
+  'constant-concentration': 'constant concentration at the surface',
+  'constant-flux': 'constant flux at the surface',
+  'not-applicable': 'no wall condition applies',
+  'not-stated': 'wall condition not stated',
+};
+
+export const FORCE_WORDS: Readonly<Record<Definition['drivingForce'], string>> = {
+  local: 'reduced with the local driving force',
+  'log-mean': 'reduced with the log-mean driving force',
+  inlet: 'reduced with the driving force at the inlet',
+  'not-stated': 'driving force of the data not stated',
+};
+
+const STATISTIC_WORDS: Readonly<Record<NonNullable<Definition['accuracy']>['statistic'], string>> = {
+  max: 'at most',
+  mean: 'mean deviation',
+  rms: 'root-mean-square deviation',
+  '95 %': 'for 95 % of the data',
+  'not-stated': 'statistic not stated',
+};
+
+/** `±20 % (mean deviation) of Sh, 128 points.` */
+export function accuracyText(accuracy: Definition['accuracy']): string {
+  if (accuracy === null) return 'No accuracy is on record.';
+  const { valuePercent, statistic, of, text } = accuracy;
+  const figure =
+    valuePercent === null
+      ? ''
+      : `±${valuePercent} % (${STATISTIC_WORDS[statistic]})${of ? ` of ${of}` : ''}. `;
+  return `${figure}${text}`;
+}
+
+/** Nature and basis of a bound in words: `where the data end, stated in the source (p. 516)`. */
+export function boundWords({ stretches, basis, place }: Bound): string {
+  const natures = new Set(
+    stretches.flatMap(({ lo, hi }) => [lo?.nature, hi?.nature].filter((n) => n !== undefined)),
+  );
+  const ends = stretches.length === 1 ? endsOf(stretches[0]) : [];
+  const nature =
+    natures.size > 1 && ends.length === 2
+      ? ends.join('; ')
+      : [...natures].map((n) => NATURE_WORDS[n]).join(', ');
+  const from = `${BASIS_WORDS[basis]}${place ? ` (${place})` : ''}`;
+  return nature ? `${nature}; ${from}` : from;
+}
+
+function endsOf(stretch: Bound['stretches'][number] | undefined): string[] {
+  const lo = stretch?.lo ? [`lower: ${NATURE_WORDS[stretch.lo.nature]}`] : [];
+  const hi = stretch?.hi ? [`upper: ${NATURE_WORDS[stretch.hi.nature]}`] : [];
+  return [...lo, ...hi];
+}
