@@ -54,9 +54,13 @@ export { kernelFor, POINT, type Kernel, type PointStatus } from './evaluation/ke
 export { SHORTEST_REASON, LONGEST_REASON } from './evaluation/check-deviations.js';
 export { unitTex, valueTex, valueText } from './evaluation/explain.js';
 
+export { inspectCorrelation, type InspectionReport } from './inspection/inspect-correlation.js';
+export { INSPECTION_TOPICS, type InspectionTopic, type Remark } from './inspection/remark.js';
+
 export { holdAgainstBound, DEFAULT_REACH } from './bounds/hold-against-bound.js';
 export { stripGeometry } from './bounds/strip.js';
-export type { StripGeometry, StripInput, StripRun, StripRunKind } from './bounds/strip.js';
+export type { StripGeometry, StripInput, StripRun, StripRunKind, StripStone } from './bounds/strip.js';
+export type { StripAxis, StripScale } from './bounds/strip-axis.js';
 
 export { convertBasis, BASES, type CoefficientInSI, type FluidState } from './basis/convert-basis.js';
 export { logMean } from './basis/flux.js';

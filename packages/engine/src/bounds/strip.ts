@@ -1,5 +1,6 @@
 import type { Finding } from '../evaluation/outcome.js';
 import type { Stretch } from '../sheet/common-schema.js';
+import { naturalAxis, placer, type StripAxis, type StripScale } from './strip-axis.js';
 
 export type StripRunKind = 'permitted' | 'ground' | 'dotted' | 'hatched';
 
@@ -9,45 +10,73 @@ export interface StripRun {
   to: number;
 }
 
+export interface StripStone {
+  at: number;
+  value: number;
+  side: 'lo' | 'hi';
+  /** Whether the limit itself still belongs to the range. */
+  closed: boolean;
+  /** The limit lies beyond the axis and is drawn at its edge. */
+  offAxis: boolean;
+}
+
 /** The picture of a bound in shares of its width (0 left, 1 right): the same for screen, table and PDF. */
 export interface StripGeometry {
-  scale: 'log' | 'linear';
+  scale: StripScale;
   runs: StripRun[];
-  stones: { at: number; value: number; side: 'lo' | 'hi'; closed: boolean }[];
-  plumb: { at: number; state: Finding['kind'] } | null;
+  stones: StripStone[];
+  plumb: { at: number; state: Finding['kind']; offAxis: boolean } | null;
+  /** Whole powers of ten on a log axis. */
+  decades: { at: number; exponent: number }[];
   /** The values at the two ends of the axis. */
-  axis: { from: number; to: number };
+  axis: StripAxis;
 }
 
 export interface StripInput {
   stretches: readonly Stretch[];
+  /** Null and what is not finite draw no plumb line. */
   value?: number | null;
   state?: Finding['kind'];
   /** Fix the axis so that several strips can be compared; else it follows limits and value. */
-  axis?: { from: number; to: number };
+  axis?: StripAxis;
 }
 
-/** Lays out a bound strip. Log axis where all figures are positive, else linear. */
+const PAST_A_BOUND: readonly Finding['kind'][] = ['outside', 'past-reach', 'between'];
+
+/** Lays out a bound strip. Log axis where all limits are positive, else linear. */
 export function stripGeometry(input: StripInput): StripGeometry {
-  const figures = limitsOf(input.stretches);
-  const value = input.value ?? null;
-  const all = value === null || !Number.isFinite(value) ? figures : [...figures, value];
-  const scale = [...all, ...(input.axis ? [input.axis.from] : [])].every((v) => v > 0) ? 'log' : 'linear';
-  const axis = input.axis ?? naturalAxis(all, scale);
+  const { stretches } = input;
+  const limits = limitsOf(stretches);
+  const value = input.value != null && Number.isFinite(input.value) ? input.value : null;
+  const scale = scaleOf(limits, value, input.axis);
+  const axis = input.axis ?? naturalAxis(stretches, scale, value);
   const place = placer(axis, scale);
+  const off = (v: number) => v < axis.from || v > axis.to;
+  const state = input.state ?? 'within';
   return {
     scale,
     axis,
-    runs: runsOf(input.stretches, place, value, input.state),
-    stones: input.stretches.flatMap(({ lo, hi }) => [
-      ...(lo
-        ? [{ at: place(lo.value), value: lo.value, side: 'lo' as const, closed: lo.closed ?? true }]
-        : []),
-      ...(hi
-        ? [{ at: place(hi.value), value: hi.value, side: 'hi' as const, closed: hi.closed ?? true }]
-        : []),
-    ]),
-    plumb: value === null ? null : { at: place(value), state: input.state ?? 'within' },
+    runs: [
+      ...groundRuns(stretches, place),
+      ...(value !== null && PAST_A_BOUND.includes(state) ? hatch(limits.map(place), place(value)) : []),
+    ],
+    stones: stretches.flatMap(({ lo, hi }) =>
+      (['lo', 'hi'] as const).flatMap((side) => {
+        const end = side === 'lo' ? lo : hi;
+        if (!end) return [];
+        return [
+          {
+            at: place(end.value),
+            value: end.value,
+            side,
+            closed: end.closed ?? true,
+            offAxis: off(end.value),
+          },
+        ];
+      }),
+    ),
+    plumb: value === null ? null : { at: place(value), state, offAxis: off(value) },
+    decades: scale === 'log' ? decadesOf(axis, place) : [],
   };
 }
 
@@ -55,32 +84,22 @@ function limitsOf(stretches: readonly Stretch[]): number[] {
   return stretches.flatMap(({ lo, hi }) => [lo?.value, hi?.value]).filter((v) => v !== undefined);
 }
 
-/** A margin of half a decade (log) or a quarter of the span (linear) beyond the outermost figure. */
-function naturalAxis(figures: number[], scale: 'log' | 'linear'): { from: number; to: number } {
-  if (figures.length === 0) return scale === 'log' ? { from: 0.1, to: 10 } : { from: 0, to: 1 };
-  const low = Math.min(...figures);
-  const high = Math.max(...figures);
-  if (scale === 'log') {
-    const pad = Math.max(0.3, Math.log10(high / low) * 0.28);
-    return { from: low / 10 ** pad, to: high * 10 ** pad };
-  }
-  const pad = Math.max((high - low) * 0.25, Math.abs(high) * 0.25, 1e-12);
-  return { from: low - pad, to: high + pad };
+/** The limits decide; a value that cannot be, such as Re = 0, must not turn the axis over. */
+function scaleOf(limits: number[], value: number | null, axis: StripAxis | undefined): StripScale {
+  if (axis) return axis.from > 0 ? 'log' : 'linear';
+  if (limits.length === 0) return value === null || value > 0 ? 'log' : 'linear';
+  return limits.every((v) => v > 0) ? 'log' : 'linear';
 }
 
-function placer(axis: { from: number; to: number }, scale: 'log' | 'linear'): (value: number) => number {
-  const map = scale === 'log' ? Math.log : (v: number) => v;
-  const a = map(axis.from);
-  const span = map(axis.to) - a || 1;
-  return (value) => Math.min(1, Math.max(0, (map(value) - a) / span));
+function decadesOf(axis: StripAxis, place: (value: number) => number): StripGeometry['decades'] {
+  const first = Math.ceil(Math.log10(axis.from) - 1e-9);
+  const last = Math.floor(Math.log10(axis.to) + 1e-9);
+  const exponents = Array.from({ length: Math.max(0, last - first + 1) }, (_, index) => first + index);
+  return exponents.map((exponent) => ({ at: place(10 ** exponent), exponent }));
 }
 
-function runsOf(
-  stretches: readonly Stretch[],
-  place: (value: number) => number,
-  value: number | null,
-  state: Finding['kind'] | undefined,
-): StripRun[] {
+/** Ground between the stretches, and each stretch; a side without a stated limit runs out dotted. */
+function groundRuns(stretches: readonly Stretch[], place: (value: number) => number): StripRun[] {
   if (stretches.length === 0) return [{ kind: 'dotted', from: 0, to: 1 }];
   const runs: StripRun[] = [];
   let end = 0;
@@ -91,34 +110,33 @@ function runsOf(
     runs.push({ kind: 'permitted', from, to });
     end = to;
   }
-  const last = stretches.at(-1);
-  if (last?.hi && end < 1) runs.push({ kind: 'ground', from: end, to: 1 });
-  openEnds(stretches, runs);
-  if (value !== null && state !== 'within' && state !== 'near' && state !== 'unchecked')
-    runs.push(...hatch(stretches, place, value));
-  return runs;
+  if (stretches.at(-1)?.hi && end < 1) runs.push({ kind: 'ground', from: end, to: 1 });
+  return runOut(stretches, runs);
 }
 
-/** Where no limit is stated on a side, the permitted stretch runs out dotted. */
-function openEnds(stretches: readonly Stretch[], runs: StripRun[]): void {
-  const OUT = 0.12;
-  const first = runs.find((run) => run.kind === 'permitted');
+/** Share of the width over which an open side runs out. */
+const RUN_OUT = 0.12;
+
+function runOut(stretches: readonly Stretch[], runs: StripRun[]): StripRun[] {
+  const before: StripRun[] = [];
+  const after: StripRun[] = [];
+  const permitted = runs.filter((run) => run.kind === 'permitted');
+  const first = permitted[0];
   if (first && !stretches[0]?.lo) {
-    first.from = Math.min(OUT, first.to);
-    runs.unshift({ kind: 'dotted', from: 0, to: first.from });
+    first.from = Math.min(RUN_OUT, first.to);
+    before.push({ kind: 'dotted', from: 0, to: first.from });
   }
-  const last = runs.filter((run) => run.kind === 'permitted').at(-1);
+  const last = permitted.at(-1);
   if (last && !stretches.at(-1)?.hi) {
-    last.to = Math.max(1 - OUT, last.from);
-    runs.push({ kind: 'dotted', from: last.to, to: 1 });
+    last.to = Math.max(1 - RUN_OUT, last.from);
+    after.push({ kind: 'dotted', from: last.to, to: 1 });
   }
+  return [...before, ...runs, ...after].filter((run) => run.to > run.from);
 }
 
 /** From the nearest stone to the plumb line. */
-function hatch(stretches: readonly Stretch[], place: (v: number) => number, value: number): StripRun[] {
-  const at = place(value);
-  const stones = limitsOf(stretches).map(place);
+function hatch(stones: number[], at: number): StripRun[] {
   if (stones.length === 0) return [];
   const nearest = stones.reduce((best, s) => (Math.abs(s - at) < Math.abs(best - at) ? s : best));
-  return [{ kind: 'hatched', from: Math.min(nearest, at), to: Math.max(nearest, at) }];
+  return nearest === at ? [] : [{ kind: 'hatched', from: Math.min(nearest, at), to: Math.max(nearest, at) }];
 }

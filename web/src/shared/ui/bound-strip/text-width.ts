@@ -1,0 +1,19 @@
+const THIN_SPACES = /[\u2009\u202f]/;
+const NARROW = /[.,:;'|ilj!()[\] \u00b7]/;
+const RAISED = /[\u2070\u00b9\u00b2\u00b3\u2074-\u207b]/;
+const WIDE = /[mwMW%@°×<>]/;
+
+/** Width of a label in pixels, estimated a little on the wide side; measuring would need the font to be loaded first. */
+export function textWidth(text: string, fontSize: number): number {
+  let ems = 0;
+  for (const char of text) ems += emsOf(char);
+  return ems * fontSize;
+}
+
+function emsOf(char: string): number {
+  if (THIN_SPACES.test(char)) return 0.2;
+  if (RAISED.test(char)) return 0.38;
+  if (NARROW.test(char)) return 0.3;
+  if (WIDE.test(char)) return 0.8;
+  return 0.55;
+}
