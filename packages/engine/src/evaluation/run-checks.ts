@@ -12,6 +12,7 @@ import { findingsOf } from './findings-of.js';
 import { readInputs } from './given-values.js';
 import type { EvaluationRequest, Finding, Problem } from './outcome.js';
 import { reckon } from './reckon.js';
+import type { Reckoner } from './reckoner.js';
 import { checkChoices } from './supplies.js';
 
 export interface CheckedValue {
@@ -81,6 +82,18 @@ function runCheck(sheet: CompiledSheet, check: WorkedCheck, library: PropertyLib
     ),
     problems,
   };
+}
+
+/** The point of a worked check with every part worked out that can be; null where its inputs cannot be used. */
+export function reckonCheck(
+  sheet: CompiledSheet,
+  check: WorkedCheck,
+  library: PropertyLibrary,
+): Reckoner | null {
+  const request: EvaluationRequest = { inputs: check.inputs, rows: check.rows, equations: check.equations };
+  const given = readInputs(sheet, request, library);
+  if (given.problems.length > 0 || checkChoices(sheet, request, library).length > 0) return null;
+  return reckon(sheet, request, given.values, library).reckoner;
 }
 
 function unsolved(symbol: string, missing: ReadonlySet<string>, faults: readonly Problem[]): Problem[] {
