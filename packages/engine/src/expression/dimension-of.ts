@@ -62,6 +62,8 @@ function binary(tree: Tree & { kind: 'binary' }, symbol: (name: string) => Dimen
 function raised(base: Dimension, exponent: Dimension, constant: number | null): Dimension {
   if (!isDimensionless(exponent))
     throw new DimensionFault(`an exponent has the dimension ${dimensionText(exponent)}`);
+  if (constant !== null && !Number.isFinite(constant))
+    throw new DimensionFault('an exponent has no finite value');
   if (constant !== null) return power(base, constant);
   if (!isDimensionless(base))
     throw new DimensionFault(

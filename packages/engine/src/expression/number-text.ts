@@ -1,4 +1,4 @@
-/** A number in few significant digits, as plain text: `52 300`, `0.610`, `1.84e-5`. */
+/** A number in few significant digits, as plain text: `52 300`, `0.61`, `1.84e-5`. */
 export function formatNumber(value: number, digits = 4): string {
   const { mantissa, exponent } = parts(value, digits);
   return exponent === null ? group(mantissa, '\u2009') : `${mantissa}e${exponent}`;
@@ -18,7 +18,7 @@ export function putInTex(value: number): { tex: string; compound: boolean } {
   return { tex, compound: tex.includes('times') || value < 0 };
 }
 
-/** Plain decimals between 0.001 and 100 000, a power of ten outside; trailing zeros show the digits meant. */
+/** Plain decimals from 0.001 to below a million, a power of ten outside. */
 function parts(value: number, digits: number): { mantissa: string; exponent: number | null } {
   if (value === 0) return { mantissa: '0', exponent: null };
   if (!Number.isFinite(value)) return { mantissa: String(value), exponent: null };

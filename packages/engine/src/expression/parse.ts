@@ -51,9 +51,29 @@ function checkText(text: string): void {
   if (comment >= 0) throw new Refusal(comment + 1, 'comments have no place in an expression');
   const radix = /(?<![A-Za-z0-9_])0[xXbB][0-9A-Fa-f]/.exec(text);
   if (radix) throw new Refusal(radix.index + 1, 'numbers are decimal; hexadecimal and binary are refused');
-  const member = /[A-Za-z_)]\s*\.|\.\s*[A-Za-z_]/.exec(text);
+  const member = /[A-Za-z_)]\s*\.|(?<!\d)\.\s*[A-Za-z_]/.exec(text);
   if (member) throw new Refusal(text.indexOf('.', member.index) + 1, 'member access with a dot is refused');
+  checkNumbers(text);
   checkDepth(text);
+  checkOperands(text);
+}
+
+/** Numbers that a double cannot hold would become infinity or zero without a word. */
+function checkNumbers(text: string): void {
+  for (const match of text.matchAll(/(?<![A-Za-z0-9_.])([\d.]+)(?:[eE][+-]?\d+)?/g)) {
+    const value = Number(match[0]);
+    if (value === Infinity) throw new Refusal(match.index + 1, 'a number is too large to be represented');
+    if (value === 0 && /[1-9]/.test(match[1] ?? ''))
+      throw new Refusal(match.index + 1, 'a number is too small to be represented');
+  }
+}
+
+/** Where an operand should stand: after an operator, a comma, an opening bracket, or at the start. */
+const MISSING_OPERAND = /(?:^|[-+*/^,])\s*(?=[*/^,)]|$)|\(\s*(?=[*/^,]|$)|(?<![A-Za-z0-9_]\s*)\(\s*(?=\))/;
+
+function checkOperands(text: string): void {
+  const gap = MISSING_OPERAND.exec(text);
+  if (gap) throw new Refusal(gap.index + gap[0].length + 1, 'an operand is missing here');
 }
 
 function checkDepth(text: string): void {
@@ -72,8 +92,9 @@ function readTokens(text: string): RawToken[] {
     return tokensOf(text);
   } catch (error) {
     const message = error instanceof Error ? error.message : '';
+    // The parser counts on to the end of the token it stumbles over; a person looks at the token.
     const column = /\[\d+:(\d+)\]/.exec(message);
-    throw new Refusal(column ? Number(column[1]) : null, 'not an expression that can be read');
+    throw new Refusal(column ? Number(column[1]) - 1 : null, 'not an expression that can be read');
   }
 }
 
@@ -124,7 +145,6 @@ function node(token: RawToken, pop: () => Tree, text: string): Tree {
 function numberNode(value: unknown, text: string): Tree {
   if (typeof value !== 'number')
     throw new Refusal(placeOf(String(value), text), 'only numbers stand in an expression');
-  if (!Number.isFinite(value)) throw new Refusal(null, 'a number is too large to be represented');
   return { kind: 'number', value };
 }
 

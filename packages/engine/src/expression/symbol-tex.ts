@@ -3,6 +3,7 @@ const GREEK = new Set([
   'beta',
   'gamma',
   'delta',
+  'eps',
   'epsilon',
   'zeta',
   'eta',
@@ -32,7 +33,7 @@ const GREEK = new Set([
 /** Dimensionless numbers are set upright (ISO 80000-11 sets them in italics; two-letter names read better upright, as handbooks do). */
 const UPRIGHT = /^(Re|Sc|Sh|Pe|Gr|Ra|Ga|We|Fr|Gz|Le|St|Nu|Pr|Bo|Eo|Ca|Mo|Bi|Fo|Da|Ar|Ta)$/;
 
-/** TeX of a symbol: Greek by name, what follows `_` as subscript, numbers such as Re upright. */
+/** TeX of a symbol: Greek by name (`eps` for short), what follows `_` as subscript, numbers such as Re upright. */
 export function symbolTex(symbol: string, override?: string): string {
   if (override) return override;
   const [head = symbol, sub] = symbol.split('_');
@@ -53,12 +54,12 @@ function split(head: string): { letter: string; tail: string } {
 }
 
 function greek(name: string): string {
-  if (name === 'epsilon') return '\\varepsilon';
+  if (name === 'epsilon' || name === 'eps') return '\\varepsilon';
   if (name === 'phi') return '\\varphi';
   return `\\${name}`;
 }
 
 function subscriptTex(text: string): string {
   if (GREEK.has(text)) return greek(text);
-  return text.length === 1 ? (/[0-9]/.test(text) ? text : text) : `\\mathrm{${text}}`;
+  return text.length === 1 ? text : `\\mathrm{${text}}`;
 }

@@ -1,15 +1,16 @@
-import { constantOf } from './compile-tree.js';
 import { numberTex } from './number-text.js';
 import type { Tree } from './tree.js';
 
 /** How a symbol is set: its letter, or its value. A set value may need brackets under a power. */
 export type Leaf = (name: string) => { tex: string; compound: boolean };
 
-const LEVEL = { sum: 1, product: 2, negate: 2, power: 3, atom: 4 } as const;
+const LEVEL = { sum: 1, product: 2, power: 3, atom: 4 } as const;
 
 interface Set {
   tex: string;
   level: number;
+  /** Of something with a minus in front: the same without it. */
+  unsigned?: Set;
 }
 
 /** Sets a tree as TeX: fractions as fractions, powers as powers, brackets only where they are needed. */
@@ -23,10 +24,10 @@ function set(tree: Tree, leaf: Leaf): Set {
       return numberSet(tree.value);
     case 'symbol': {
       const { tex, compound } = leaf(tree.name);
-      return { tex, level: compound ? LEVEL.product : LEVEL.atom };
+      return { tex, level: tex.startsWith('-') ? LEVEL.sum : compound ? LEVEL.product : LEVEL.atom };
     }
     case 'negate':
-      return { tex: `-${within(set(tree.operand, leaf), LEVEL.product)}`, level: LEVEL.sum };
+      return negated(set(tree.operand, leaf));
     case 'binary':
       return binary(tree, leaf);
     case 'call':
@@ -36,44 +37,58 @@ function set(tree: Tree, leaf: Leaf): Set {
 
 function numberSet(value: number): Set {
   const tex = numberTex(value, 12);
-  return { tex, level: tex.includes('times') || value < 0 ? LEVEL.product : LEVEL.atom };
+  return { tex, level: tex.includes('times') ? LEVEL.product : LEVEL.atom };
+}
+
+function negated(operand: Set): Set {
+  return { tex: `-${within(operand, LEVEL.product)}`, level: LEVEL.sum, unsigned: operand };
 }
 
 function binary(tree: Tree & { kind: 'binary' }, leaf: Leaf): Set {
+  const left = set(tree.left, leaf);
+  const right = set(tree.right, leaf);
   switch (tree.operator) {
     case '+':
-    case '-': {
-      const left = set(tree.left, leaf).tex;
-      const right = within(set(tree.right, leaf), tree.operator === '-' ? LEVEL.product : LEVEL.sum);
-      return { tex: `${left} ${tree.operator} ${right}`, level: LEVEL.sum };
-    }
+    case '-':
+      return sum(tree.operator, left, right);
     case '*':
-      return productSet(tree, leaf);
+      return product(left, right);
     case '/':
-      return fraction(tree, leaf);
+      return fraction(left, right);
     case '^':
-      return raised(tree, leaf);
+      return {
+        tex: `{${within(left, LEVEL.atom)}}^{${plainFraction(tree.right, leaf) ?? right.tex}}`,
+        level: LEVEL.power,
+      };
   }
 }
 
-/** Factors stand side by side; a cross comes between where two numbers would run together. */
-function productSet(tree: Tree & { kind: 'binary' }, leaf: Leaf): Set {
-  const left = within(set(tree.left, leaf), LEVEL.product);
-  const right = within(set(tree.right, leaf), LEVEL.product);
-  const crossed = /^-?\d/.test(right.replace(/^(\{|\\left\()+/, ''));
-  return { tex: `${left}${crossed ? ' \\times ' : ' \\, '}${right}`, level: LEVEL.product };
+function sum(operator: '+' | '-', left: Set, right: Set): Set {
+  const bracketed = operator === '-' || right.tex.startsWith('-');
+  return {
+    tex: `${left.tex} ${operator} ${within(right, bracketed ? LEVEL.product : LEVEL.sum)}`,
+    level: LEVEL.sum,
+  };
 }
 
-function fraction(tree: Tree & { kind: 'binary' }, leaf: Leaf): Set {
-  const whole = constantOf(tree.left) !== null && constantOf(tree.right) !== null;
-  if (whole) return { tex: `${set(tree.left, leaf).tex}/${set(tree.right, leaf).tex}`, level: LEVEL.product };
-  return { tex: `\\frac{${set(tree.left, leaf).tex}}{${set(tree.right, leaf).tex}}`, level: LEVEL.product };
+/** Factors stand side by side; a cross comes between where two numbers would run together or read as a mixed number. */
+function product(left: Set, right: Set): Set {
+  if (left.unsigned) return negated(product(left.unsigned, right));
+  const [first, second] = [within(left, LEVEL.product), within(right, LEVEL.product)];
+  const crossed = /^\d/.test(second.replace(/^(\{|\\left\(|\\frac\{)+/, ''));
+  return { tex: `${first}${crossed ? ' \\times ' : ' \\, '}${second}`, level: LEVEL.product };
 }
 
-function raised(tree: Tree & { kind: 'binary' }, leaf: Leaf): Set {
-  const base = set(tree.left, leaf);
-  const exponent = set(tree.right, leaf).tex;
-  return { tex: `{${within(base, LEVEL.atom)}}^{${exponent}}`, level: LEVEL.power };
+function fraction(left: Set, right: Set): Set {
+  if (left.unsigned) return negated(fraction(left.unsigned, right));
+  return { tex: `\\frac{${left.tex}}{${right.tex}}`, level: LEVEL.product };
+}
+
+/** A fraction of two plain numbers stands on the line in an exponent, as in Sc^{1/3}; null for anything else. */
+function plainFraction(tree: Tree, leaf: Leaf): string | null {
+  if (tree.kind !== 'binary' || tree.operator !== '/' || tree.right.kind !== 'number') return null;
+  const over = tree.left.kind === 'negate' ? tree.left.operand : tree.left;
+  return over.kind === 'number' ? `${set(tree.left, leaf).tex}/${set(tree.right, leaf).tex}` : null;
 }
 
 function call(tree: Tree & { kind: 'call' }, leaf: Leaf): Set {
