@@ -54,6 +54,7 @@ export { kernelFor, POINT, type Kernel, type PointStatus } from './evaluation/ke
 export { SHORTEST_REASON, LONGEST_REASON } from './evaluation/check-deviations.js';
 export { unitTex, valueTex, valueText } from './evaluation/explain.js';
 
+export { compareDefinitions, type Difference } from './comparison/compare-definitions.js';
 export { inspectCorrelation, type InspectionReport } from './inspection/inspect-correlation.js';
 export { INSPECTION_TOPICS, type InspectionTopic, type Remark } from './inspection/remark.js';
 
