@@ -36,7 +36,7 @@ const rooms = [
 const kinds = [
   { category: 'file', pattern: '{packages,api,web}/**/*' },
   { category: 'test', pattern: '**/*.test.{ts,tsx}' },
-  { category: 'test', pattern: '{api/test,web/e2e}/**/*' },
+  { category: 'test', pattern: '{api/test,web/e2e,packages/engine/src/testing}/**/*' },
   { category: 'controller', pattern: '**/*.controller.ts' },
   { category: 'service', pattern: '**/*.service.ts' },
   { category: 'repository', pattern: '**/*.repository.ts' },

@@ -120,6 +120,7 @@ const forbidden: Record<string, Import[]> = {
   'nothing but a test imports from a test': [
     [`${feature}/correlations.service.ts`, './correlations.service.test.js'],
     [`${feature}/correlations.service.ts`, '../../test/support/create-test-app.js'],
+    ['packages/engine/src/expression/parse.ts', '../testing/random-tree.js'],
     ['web/src/features/register/register-page.tsx', './register-page.test'],
   ],
 };
@@ -131,6 +132,8 @@ const allowed: Import[] = [
   ['packages/engine/src/expression/tokens-of.ts', 'expr-eval'],
   ['packages/engine/src/expression/parse.test.ts', 'mathjs'],
   ['packages/engine/src/expression/parse.test.ts', 'node:fs'],
+  ['packages/engine/src/expression/parse.test.ts', '../testing/random-tree.js'],
+  ['packages/engine/src/testing/random-tree.ts', 'fast-check'],
   [`${feature}/correlations.controller.ts`, './correlations.service.js'],
   [`${feature}/correlations.controller.ts`, './dto/sheet.dto.js'],
   [`${feature}/correlations.controller.ts`, '../common/access/permission.decorator.js'],
