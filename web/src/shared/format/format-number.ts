@@ -6,7 +6,11 @@ export interface SetNumber {
   exponent: number | null;
 }
 
-const THIN = '\u2009';
+/**
+ * Between groups of figures and before a unit. It must not break a line; the no-break space of Source Serif 4 is narrow
+ * enough (0.24 em), its thin one so narrow that groups run together.
+ */
+export const NUMBER_SPACE = '\u00a0';
 const MINUS = '\u2212';
 const SUPERSCRIPTS: Record<string, string> = {
   '-': '\u207b',
@@ -47,6 +51,11 @@ export function formatNumber(value: number, digits = 4): string {
   return inline(setNumber(value, digits));
 }
 
+/** One line of text, rounded, without closing zeros: `0.61`, where room is short. */
+export function formatBriefly(value: number, digits = 4): string {
+  return Number.isFinite(value) ? formatExactly(Number(value.toPrecision(digits))) : formatNumber(value);
+}
+
 /** One line of text with every digit on record: `35 000`. */
 export function formatExactly(value: number): string {
   return inline(setExactly(value));
@@ -69,7 +78,7 @@ function inline({ mantissa, exponent }: SetNumber): string {
   if (exponent === null) return mantissa;
   return mantissa === '1'
     ? `10${superscript(exponent)}`
-    : `${mantissa}${THIN}×${THIN}10${superscript(exponent)}`;
+    : `${mantissa}${NUMBER_SPACE}×${NUMBER_SPACE}10${superscript(exponent)}`;
 }
 
 /** From JavaScript's own decimal text to a set number. */
@@ -91,6 +100,6 @@ function plainText(text: string): string {
 /** Groups of three on the left of the point, from four figures on; thin spaces, never commas. */
 function group(text: string): string {
   const [whole = '', fraction] = text.replace('-', MINUS).split('.');
-  const grouped = whole.replace(/\B(?=(\d{3})+$)/g, THIN);
+  const grouped = whole.replace(/\B(?=(\d{3})+$)/g, NUMBER_SPACE);
   return fraction === undefined ? grouped : `${grouped}.${fraction}`;
 }

@@ -1,4 +1,4 @@
-import { superscript } from './format-number';
+import { NUMBER_SPACE, superscript } from './format-number';
 
 const SPELLED: Record<string, string> = {
   degC: '°C',
@@ -22,5 +22,5 @@ export function formatUnit(unit: string): string {
     .replace(/[A-Za-z]+/g, (name) => SPELLED[name] ?? name)
     .replace(/\^\(?(-?\d+)\)?/g, (_whole, exponent: string) => superscript(Number(exponent)))
     .replace(/\*/g, '\u00b7')
-    .replace(/ /g, '\u2009');
+    .replace(/ /g, NUMBER_SPACE);
 }

@@ -1,4 +1,4 @@
-import { fullPrecision, setExactly, setNumber } from '../format/format-number';
+import { NUMBER_SPACE, fullPrecision, setExactly, setNumber } from '../format/format-number';
 import { formatUnit } from '../format/format-unit';
 
 interface FigureProps {
@@ -26,11 +26,11 @@ export function Figure({ value, unit = '1', digits = 4, exactly = false }: Figur
       {exponent !== null && mantissa === '1' ? null : mantissa}
       {exponent === null ? null : (
         <>
-          {mantissa === '1' ? '10' : '\u2009×\u200910'}
+          {mantissa === '1' ? '10' : `${NUMBER_SPACE}×${NUMBER_SPACE}10`}
           <sup>{String(exponent).replace('-', '\u2212')}</sup>
         </>
       )}
-      {set ? `\u2009${set}` : null}
+      {set ? `${NUMBER_SPACE}${set}` : null}
     </data>
   );
 }

@@ -34,6 +34,6 @@ export function shortHash(hash: string): string {
     hash
       .slice(0, 12)
       .match(/.{1,4}/g)
-      ?.join('\u2009') ?? hash
+      ?.join('\u00a0') ?? hash
   );
 }

@@ -1,6 +1,7 @@
 import type { Numbers, UsedEquation } from '@merestone/engine';
 import { symbolText } from '../../../shared/format/symbol-parts';
 import { formatUnit } from '../../../shared/format/format-unit';
+import { NUMBER_SPACE } from '../../../shared/format/format-number';
 import { coefficientWords } from './coefficient-words';
 import type { EvaluatedSheet } from './evaluated-sheet';
 import { notableFindings } from './refusing-findings';
@@ -118,7 +119,7 @@ function provenanceLines(shown: CopyTextInput['shown']): string[] {
 
 /** Every digit: what is pasted elsewhere is not rounded twice. */
 function line(symbol: string, value: number, unit: string): string {
-  const set = formatUnit(unit).replaceAll('\u2009', ' ');
+  const set = formatUnit(unit).replaceAll(NUMBER_SPACE, ' ');
   return `${symbolText(symbol)} = ${value}${set ? ` ${set}` : ''}`;
 }
 

@@ -1,4 +1,5 @@
 import type { StripStone } from '@merestone/engine';
+import { NUMBER_SPACE } from '../../format/format-number';
 import { placeLabels, type PlacedLabel } from './place-labels';
 import type { StripMeasures } from './strip-measures';
 import { withUnit } from './strip-words';
@@ -32,5 +33,5 @@ export function carvedLabels(
 function carved({ value, side, closed }: StripStone, unit: string): string {
   const figure = withUnit(value, unit);
   if (closed) return figure;
-  return side === 'lo' ? `>\u2009${figure}` : `<\u2009${figure}`;
+  return side === 'lo' ? `>${NUMBER_SPACE}${figure}` : `<${NUMBER_SPACE}${figure}`;
 }

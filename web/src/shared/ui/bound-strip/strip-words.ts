@@ -1,5 +1,5 @@
 import type { Finding, Stretch } from '@merestone/engine';
-import { formatExactly, formatNumber } from '../../format/format-number';
+import { NUMBER_SPACE, formatBriefly, formatExactly, formatNumber } from '../../format/format-number';
 import { formatUnit } from '../../format/format-unit';
 
 /** A value as it stands against its bound; a finding of the engine is one. */
@@ -29,9 +29,10 @@ function pastWords({ value, lo, hi, ratio }: Reading): string {
   const side = below && !above ? 'lower' : 'upper';
   if (ratio === null || !Number.isFinite(ratio) || ratio <= 0)
     return below ? 'below the lower bound' : 'above the upper bound';
-  const times = formatNumber(ratio, ratio < 1.1 ? 4 : 3);
   if (ratio === 1) return `on the ${side} bound, which is left out`;
-  return side === 'upper' ? `${times} × the upper bound` : `${times} × below the lower bound`;
+  // As the engine's findings say it: the value as a multiple of the bound it has passed.
+  const multiple = side === 'upper' ? ratio : 1 / ratio;
+  return `${formatNumber(multiple, Math.abs(multiple - 1) < 0.1 ? 4 : 3)} × the ${side} bound`;
 }
 
 /** `2 000 to 35 000`; what is left out and what is not stated is said. */
@@ -63,9 +64,9 @@ export function stripText(
   return `${range} ${now}${now ? words : words.charAt(0).toUpperCase() + words.slice(1)}.`;
 }
 
-/** A figure with its unit in one line; exactly as on record unless a number of digits is given. */
+/** A figure with its unit in one line; exactly as on record unless told how many digits to keep. */
 export function withUnit(value: number, unit: string, digits?: number): string {
   const set = formatUnit(unit);
-  const number = digits === undefined ? formatExactly(value) : formatNumber(value, digits);
-  return set ? `${number}\u2009${set}` : number;
+  const number = digits === undefined ? formatExactly(value) : formatBriefly(value, digits);
+  return set ? `${number}${NUMBER_SPACE}${set}` : number;
 }
