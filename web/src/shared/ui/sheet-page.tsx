@@ -33,12 +33,20 @@ export function SheetPage({ title, heading, subtitle, runningHead, margin, child
   );
 }
 
+interface MarginRowProps {
+  /** Stands over the notes' first line as well, so that it is read before them. */
+  heading?: ReactNode;
+  notes?: ReactNode;
+  children: ReactNode;
+}
+
 /** A stretch of the main column with its own notes beside it; on a phone they fold in under it. */
-export function MarginRow({ notes, children }: { notes?: ReactNode; children: ReactNode }) {
+export function MarginRow({ heading, notes, children }: MarginRowProps) {
   return (
     <div className="margin-row">
-      <div className="margin-row-main">{children}</div>
+      {heading}
       {notes ? <div className="margin-row-notes">{notes}</div> : null}
+      <div className="margin-row-main">{children}</div>
     </div>
   );
 }

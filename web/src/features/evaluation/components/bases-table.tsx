@@ -1,4 +1,5 @@
 import type { Conversion, Numbers } from '@merestone/engine';
+import { lowerFirst } from '../../../shared/format/lower-first';
 import { Figure } from '../../../shared/ui/figure';
 import { SetTable } from '../../../shared/ui/set-table';
 import { SymbolMark } from '../../../shared/ui/symbol-mark';
@@ -45,7 +46,7 @@ function BasisRow({ conversion, mark }: { conversion: Conversion; mark: string |
       </th>
       <td>
         {MEANT[basis]}
-        {assumes ? <span className="table-words">takes for granted: {assumes}</span> : null}
+        {assumes ? <span className="table-words">takes for granted: {lowerFirst(assumes)}</span> : null}
       </td>
       <td className="number">
         {value === null ? (

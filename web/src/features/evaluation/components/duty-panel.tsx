@@ -5,7 +5,7 @@ import type { EvaluationState } from '../hooks/use-evaluation';
 import { hasContent } from '../hooks/use-duty';
 import { fieldId } from '../model/field-id';
 import type { DutyControls } from './duty-controls';
-import { DutyItem } from './duty-item';
+import { DutySection } from './duty-section';
 import { ModeSwitch } from './mode-switch';
 import './duty-panel.css';
 
@@ -46,14 +46,7 @@ export function DutyPanel({ evaluation, notInUse }: DutyPanelProps) {
       />
       <ModeSwitch definition={evaluation.sheet.definition} duty={duty} change={change} />
       {sections.map((section) => (
-        <fieldset key={section.key} className="duty-section">
-          <legend>{section.title}</legend>
-          <div className="duty-grid">
-            {section.items.map((item) => (
-              <DutyItem key={item.key} item={item} controls={controls} />
-            ))}
-          </div>
-        </fieldset>
+        <DutySection key={section.key} section={section} controls={controls} />
       ))}
       <div className="duty-acts">
         <Button

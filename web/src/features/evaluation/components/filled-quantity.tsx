@@ -1,5 +1,6 @@
 import type { ReactNode } from 'react';
 import { formatUnit } from '../../../shared/format/format-unit';
+import { lowerFirst } from '../../../shared/format/lower-first';
 import { Figure } from '../../../shared/ui/figure';
 import type { EquationInUse, FormField } from '../model/duty-form';
 import { fieldId } from '../model/field-id';
@@ -44,6 +45,6 @@ export function FilledQuantity({ field, equation, filled, symbol }: FilledQuanti
 
 function wordsFor({ title, assumes, served }: EquationInUse): string {
   const from = served.length > 0 ? `, from ${served.map((s) => s.label.toLowerCase()).join(' and ')}` : '';
-  const taking = assumes ? `; takes for granted: ${assumes.replace(/\.$/, '')}` : '';
+  const taking = assumes ? `; takes for granted: ${lowerFirst(assumes).replace(/\.$/, '')}` : '';
   return `Filled by “${title}”${from}${taking}.`;
 }

@@ -1,5 +1,6 @@
 import {
   QUANTITIES,
+  serves,
   symbolTex,
   unitsFor,
   type Group,
@@ -32,11 +33,14 @@ export function buildForm(sheet: EvaluatedSheet, duty: DutyChoices): FormSection
   const asked = definition.quantities.filter(
     (q) => !given.replaced.has(q.symbol) && !filledByRow.has(q.symbol),
   );
-  const sections: FormSection[] = inFieldOrder(asked).map(({ section, quantities }) => ({
-    key: section,
-    title: TITLES[section],
-    items: quantities.map((quantity) => sheetField(quantity, sheet, duty)),
-  }));
+  const needed = neededByEquations(sheet, duty);
+  const idle = asked.filter((quantity) => isIdle(quantity, sheet, needed));
+  const fieldOf = (quantity: Quantity) => sheetField(quantity, sheet, duty, needed);
+  const sections: FormSection[] = inFieldOrder(asked.filter((quantity) => !idle.includes(quantity))).map(
+    ({ section, quantities }) => ({ key: section, title: TITLES[section], items: quantities.map(fieldOf) }),
+  );
+  if (idle.length > 0)
+    sections.push({ key: 'idle', title: 'More that may be given', items: idle.map(fieldOf), folded: true });
   if (given.groups.length > 0)
     sections.unshift({ key: 'groups', title: 'Groups', items: given.groups.map(groupField) });
   return withPickers(sections, pickers);
@@ -53,13 +57,39 @@ function withPickers(sections: FormSection[], pickers: RowPicker[]): FormSection
   return [{ key: 'geometry', title: TITLES.geometry, items: pickers }, ...sections];
 }
 
+/** Quantities of the sheet that a chosen property equation takes as inputs. */
+function neededByEquations({ definition, equations }: EvaluatedSheet, duty: DutyChoices): Set<string> {
+  const chosen = Object.entries(duty.equations).flatMap(([symbol, slug]) => {
+    const listed = definition.quantities.find((q) => q.symbol === symbol)?.equations?.includes(slug);
+    const equation = listed ? equations.find((e) => e.slug === slug) : undefined;
+    return equation ? equation.definition.quantities : [];
+  });
+  return new Set(chosen.flatMap((input) => servingQuantity(definition.quantities, input.is)?.symbol ?? []));
+}
+
+/** What other bases are made from; worth asking for beside the quantities of the formula. */
+const SERVES_BASES = ['gas-temperature', 'total-pressure', 'log-mean-inert-pressure', 'solvent-molar-mass'];
+
+/** A state that no formula, bound, basis or chosen equation uses. */
+function isIdle({ role, is, symbol }: Quantity, sheet: EvaluatedSheet, needed: ReadonlySet<string>): boolean {
+  if (role !== 'state' || needed.has(symbol)) return false;
+  const bounded = sheet.definition.bounds.some((bound) => bound.on === symbol);
+  return !bounded && !SERVES_BASES.some((name) => serves(is, name));
+}
+
 /** A quantity of the sheet; only these may be filled by a property equation. */
-function sheetField(quantity: Quantity, sheet: EvaluatedSheet, duty: DutyChoices): FormField {
+function sheetField(
+  quantity: Quantity,
+  sheet: EvaluatedSheet,
+  duty: DutyChoices,
+  needed: ReadonlySet<string>,
+): FormField {
   const { symbol } = quantity;
   const choices = sheet.equations.filter(({ slug }) => quantity.equations?.includes(slug));
   const chosen = choices.find(({ slug }) => slug === duty.equations[symbol]);
   return {
     ...quantityField(quantity, symbol),
+    optional: quantity.role === 'state' && !needed.has(symbol),
     equations: choices.map(({ slug, definition }) => ({ slug, title: definition.title })),
     filledBy: chosen ? equationInUse(chosen.slug, chosen.definition, symbol, sheet, duty) : null,
   };

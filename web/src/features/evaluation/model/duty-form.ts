@@ -46,6 +46,8 @@ export interface FormSection {
   key: string;
   title: string;
   items: FormItem[];
+  /** Folded away unless something stands in it: nothing asked for so far needs it. */
+  folded?: boolean;
 }
 
 /** All fields on show, those under an equation included. */

@@ -1,10 +1,18 @@
-import { symbolTex, type Bound, type CorrelationDefinition, type Finding } from '@merestone/engine';
+import {
+  QUANTITIES,
+  symbolTex,
+  type Bound,
+  type CorrelationDefinition,
+  type Finding,
+} from '@merestone/engine';
 import type { Sheet } from '../../../shared/api/types';
+import { BoundStrip } from '../../../shared/ui/bound-strip/bound-strip';
 import { InlineEquation } from '../../../shared/ui/equation';
 import { MarginNote } from '../../../shared/ui/margin-note';
 import { MarginRow } from '../../../shared/ui/sheet-page';
 import type { LiveReadings } from '../model/live-readings';
 import { boundWords } from '../model/plain-words';
+import { sentence } from '../model/sentence';
 
 interface BoundsSectionProps {
   sheet: Sheet;
@@ -15,8 +23,7 @@ interface BoundsSectionProps {
 export function BoundsSection({ sheet, live }: BoundsSectionProps) {
   const { definition } = sheet;
   return (
-    <MarginRow notes={<BoundNotes definition={definition} />}>
-      <h2>Where it holds</h2>
+    <MarginRow heading={<h2>Where it holds</h2>} notes={<BoundNotes definition={definition} />}>
       <ul className="bounds">
         {definition.bounds.map((bound) => (
           <BoundLine
@@ -32,15 +39,28 @@ export function BoundsSection({ sheet, live }: BoundsSectionProps) {
 }
 
 function BoundNotes({ definition }: { definition: CorrelationDefinition }) {
-  if (definition.restrictions.length === 0) return null;
+  const { restrictions, bounds } = definition;
+  const told = bounds.filter((bound) => bound.place !== undefined || bound.note !== undefined);
   return (
-    <div className="notes-beside-heading">
-      {definition.restrictions.map((restriction) => (
-        <MarginNote key={restriction} title="Only for">
-          {restriction}
+    <>
+      {told.length > 0 ? (
+        <MarginNote title="Bounds">
+          {told.map(({ on, place, note }) => (
+            <p key={on}>
+              <InlineEquation tex={symbolOf(definition, on).tex} />:{' '}
+              {[place, note].filter(Boolean).map(sentence).join(' ')}
+            </p>
+          ))}
         </MarginNote>
-      ))}
-    </div>
+      ) : null}
+      {restrictions.length > 0 ? (
+        <MarginNote title="Only for">
+          {restrictions.map((restriction) => (
+            <p key={restriction}>{sentence(restriction)}</p>
+          ))}
+        </MarginNote>
+      ) : null}
+    </>
   );
 }
 
@@ -51,17 +71,17 @@ interface BoundLineProps {
 }
 
 function BoundLine({ bound, definition, finding }: BoundLineProps) {
-  const { tex, name } = symbolOf(definition, bound.on);
+  const { tex, name, unit } = symbolOf(definition, bound.on);
   return (
-    <li className="bound-line">
-      <span className="bound-symbol" title={name}>
-        <InlineEquation tex={tex} />
-      </span>
-      <span className="bound-strip">{finding?.message}</span>
-      <span className="bound-words">
-        {boundWords(bound)}
-        {bound.note ? ` ${bound.note}` : ''}
-      </span>
+    <li>
+      <BoundStrip
+        symbol={<InlineEquation tex={tex} />}
+        label={`${name}, ${bound.on}`}
+        stretches={bound.stretches}
+        unit={unit}
+        reading={finding ?? null}
+        note={boundWords(bound)}
+      />
     </li>
   );
 }
@@ -72,7 +92,11 @@ function symbolOf(
 ): { tex: string; name: string; unit: string } {
   const quantity = definition.quantities.find(({ symbol }) => symbol === on);
   if (quantity)
-    return { tex: symbolTex(on, quantity.tex), name: quantity.is.replaceAll('-', ' '), unit: quantity.unit };
+    return {
+      tex: symbolTex(on, quantity.tex),
+      name: QUANTITIES[quantity.is]?.title ?? quantity.is.replaceAll('-', ' '),
+      unit: quantity.unit,
+    };
   const group = definition.groups.find(({ symbol }) => symbol === on);
   if (group) return { tex: symbolTex(on, group.tex), name: group.name, unit: '1' };
   const line = definition.intermediates?.find(({ symbol }) => symbol === on);

@@ -13,13 +13,9 @@ export const ChecksSection = memo(function ChecksSection({ sheet }: { sheet: She
   const { checks } = sheet;
   return (
     <MarginRow
-      notes={
-        <div className="notes-beside-heading">
-          <MarginNote title="Checks">{summaryOf(checks)}</MarginNote>
-        </div>
-      }
+      heading={<h2>Worked checks</h2>}
+      notes={<MarginNote title="Checks">{summaryOf(checks)}</MarginNote>}
     >
-      <h2>Worked checks</h2>
       <SetTable label="Worked checks">
         <thead>
           <tr>

@@ -12,8 +12,7 @@ interface DutySectionProps {
 /** The duty, with what has to be minded while filling it in. */
 export function DutySection({ definition, children }: DutySectionProps) {
   return (
-    <MarginRow notes={<DutyNotes definition={definition} />}>
-      <h2 id="your-duty">Your duty</h2>
+    <MarginRow heading={<h2 id="your-duty">Your duty</h2>} notes={<DutyNotes definition={definition} />}>
       {children}
     </MarginRow>
   );
@@ -21,13 +20,13 @@ export function DutySection({ definition, children }: DutySectionProps) {
 
 function DutyNotes({ definition }: { definition: CorrelationDefinition }) {
   return (
-    <div className="notes-beside-heading">
+    <>
       <MarginNote title="Property state">{STATE_WORDS[definition.propertyState]}</MarginNote>
       {definition.cautions.map((caution) => (
         <MarginNote key={caution} title="Mind">
           {caution}
         </MarginNote>
       ))}
-    </div>
+    </>
   );
 }

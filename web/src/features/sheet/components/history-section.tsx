@@ -18,8 +18,7 @@ const VERDICTS: Readonly<Record<Sheet['reviews'][number]['verdict'], string>> = 
 /** Revisions with their standing, what happened to this one, and who reviewed it. */
 export const HistorySection = memo(function HistorySection({ sheet }: { sheet: Sheet }) {
   return (
-    <MarginRow notes={<HistoryNotes sheet={sheet} />}>
-      <h2>History</h2>
+    <MarginRow heading={<h2>History</h2>} notes={<HistoryNotes sheet={sheet} />}>
       <SetTable label="Revisions">
         <thead>
           <tr>
@@ -63,7 +62,7 @@ export const HistorySection = memo(function HistorySection({ sheet }: { sheet: S
 function HistoryNotes({ sheet }: { sheet: Sheet }) {
   const { evaluations, calculations } = sheet.usage;
   return (
-    <div className="notes-beside-heading">
+    <>
       <MarginNote title="Used in">
         {`${count(calculations, 'calculation')}, ${count(evaluations, 'kept evaluation')}.`}
       </MarginNote>
@@ -73,7 +72,7 @@ function HistoryNotes({ sheet }: { sheet: Sheet }) {
           {reviewer.name} {VERDICTS[verdict]}, {formatDay(at)}.{note ? ` ${note}` : ''}
         </MarginNote>
       ))}
-    </div>
+    </>
   );
 }
 

@@ -2,8 +2,8 @@ import { QUANTITIES } from '@merestone/engine';
 import { memo } from 'react';
 import { Link } from 'react-router-dom';
 import type { SheetEquation } from '../../../shared/api/types';
+import { lowerFirst } from '../../../shared/format/lower-first';
 import { paths } from '../../../shared/paths';
-import { Citation } from './source-notes';
 
 /** The published property equations that may fill a quantity of the sheet. */
 export const PropertyEquationsSection = memo(function PropertyEquationsSection({
@@ -20,12 +20,10 @@ export const PropertyEquationsSection = memo(function PropertyEquationsSection({
           <li key={slug}>
             <Link to={paths.propertyEquation(slug)}>{definition.title}</Link>, rev {revision}, for{' '}
             {(QUANTITIES[definition.gives]?.title ?? definition.gives.replaceAll('-', ' ')).toLowerCase()}
-            {definition.assumes ? `; takes for granted: ${definition.assumes.replace(/\.$/, '')}` : ''}.
-            {definition.sources[0] ? (
-              <span className="symbol-note">
-                <Citation source={definition.sources[0]} />
-              </span>
-            ) : null}
+            {definition.assumes
+              ? `; takes for granted: ${lowerFirst(definition.assumes).replace(/\.$/, '')}`
+              : ''}
+            .
           </li>
         ))}
       </ul>

@@ -2,6 +2,7 @@ import type { Source } from '@merestone/engine';
 import { MarginNote } from '../../../shared/ui/margin-note';
 import { formatCitation } from '../model/format-citation';
 import { READ_WORDS } from '../model/plain-words';
+import { sentence } from '../model/sentence';
 
 /** Each source with the place in it, what it gave, and whether anybody has read it for this sheet. */
 export function SourceNotes({ sources }: { sources: readonly Source[] }) {
@@ -11,10 +12,8 @@ export function SourceNotes({ sources }: { sources: readonly Source[] }) {
       title={sources.length > 1 ? `Source ${i + 1}` : 'Source'}
     >
       <p>
-        <Citation source={source} />
+        <Citation source={source} /> {sentence(source.gives)} {READ_WORDS[source.read]}
       </p>
-      {source.gives ? <p>{source.gives}</p> : null}
-      <p>{READ_WORDS[source.read]}</p>
     </MarginNote>
   ));
 }

@@ -31,8 +31,7 @@ interface SymbolRow {
 /** Every symbol: what it means here, how it is defined, its unit, and its value in the duty above. */
 export const SymbolsSection = memo(function SymbolsSection({ definition, tex, live }: SymbolsSectionProps) {
   return (
-    <MarginRow notes={<SymbolNotes definition={definition} />}>
-      <h2>Symbols</h2>
+    <MarginRow heading={<h2>Symbols</h2>} notes={<SymbolNotes definition={definition} />}>
       <SetTable label="Symbols">
         <thead>
           <tr>
@@ -68,10 +67,10 @@ function SymbolNotes({ definition }: { definition: CorrelationDefinition }) {
   const { averaging, wall, drivingForce, accuracy } = definition;
   const sentence = [AVERAGING_WORDS[averaging], WALL_WORDS[wall], FORCE_WORDS[drivingForce]].join('; ');
   return (
-    <div className="notes-beside-heading">
+    <>
       <MarginNote title="Meant as">{`${sentence.charAt(0).toUpperCase()}${sentence.slice(1)}.`}</MarginNote>
       <MarginNote title="Accuracy">{accuracyText(accuracy)}</MarginNote>
-    </div>
+    </>
   );
 }
 

@@ -75,22 +75,16 @@ export function accuracyText(accuracy: Definition['accuracy']): string {
   return `${figure}${text}`;
 }
 
-/** Nature and basis of a bound in words: `where the data end, stated in the source (p. 516)`. */
-export function boundWords({ stretches, basis, place }: Bound): string {
-  const natures = new Set(
-    stretches.flatMap(({ lo, hi }) => [lo?.nature, hi?.nature].filter((n) => n !== undefined)),
-  );
-  const ends = stretches.length === 1 ? endsOf(stretches[0]) : [];
+/** Nature and basis of a bound in words: `where the data end, stated in the source`. */
+export function boundWords({ stretches, basis }: Bound): string {
+  const ends = stretches.flatMap(({ lo, hi }) => [
+    ...(lo ? [['lower', NATURE_WORDS[lo.nature]] as const] : []),
+    ...(hi ? [['upper', NATURE_WORDS[hi.nature]] as const] : []),
+  ]);
+  const natures = new Set(ends.map(([, nature]) => nature));
   const nature =
-    natures.size > 1 && ends.length === 2
-      ? ends.join('; ')
-      : [...natures].map((n) => NATURE_WORDS[n]).join(', ');
-  const from = `${BASIS_WORDS[basis]}${place ? ` (${place})` : ''}`;
-  return nature ? `${nature}; ${from}` : from;
-}
-
-function endsOf(stretch: Bound['stretches'][number] | undefined): string[] {
-  const lo = stretch?.lo ? [`lower: ${NATURE_WORDS[stretch.lo.nature]}`] : [];
-  const hi = stretch?.hi ? [`upper: ${NATURE_WORDS[stretch.hi.nature]}`] : [];
-  return [...lo, ...hi];
+    natures.size > 1 && stretches.length === 1
+      ? ends.map(([side, words]) => `${side}: ${words}`).join('; ')
+      : [...natures].join(', ');
+  return nature ? `${nature}; ${BASIS_WORDS[basis]}` : BASIS_WORDS[basis];
 }
