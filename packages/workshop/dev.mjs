@@ -6,7 +6,7 @@ import { copyServerAssets } from './house/build-product.mjs';
 import { ensureInstalled } from './house/install.mjs';
 import { fromRoot, root } from './house/paths.mjs';
 import { CannotGoOn } from './house/prerequisites.mjs';
-import { exitCodeOf, runNode } from './house/run-command.mjs';
+import { endTogether, runNode } from './house/run-command.mjs';
 
 const screensPort = '4170';
 const typescript = fromRoot('node_modules', 'typescript', 'bin', 'tsc');
@@ -23,30 +23,6 @@ const startChild = (name, args, cwd, env) => {
   const child = spawn(process.execPath, args, { cwd, env, stdio: ['ignore', 'inherit', 'inherit'] });
   return { name, child };
 };
-
-/** @param {{ name: string, child: import('node:child_process').ChildProcess }[]} children */
-const endTogether = (children) =>
-  new Promise((/** @type {(code: number) => void} */ resolve) => {
-    let running = children.length;
-    let answerCode = 0;
-    let ending = false;
-    const endAll = () => {
-      ending = true;
-      for (const { child } of children) child.kill('SIGTERM');
-    };
-    for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) process.on(signal, endAll);
-    for (const { name, child } of children) {
-      child.once('exit', (code, signal) => {
-        if (!ending) {
-          console.error(`${name} ended; the others end with it.`);
-          answerCode = exitCodeOf(code, signal) || 1;
-          endAll();
-        }
-        running -= 1;
-        if (running === 0) resolve(answerCode);
-      });
-    }
-  });
 
 await answer(async () => {
   await ensureInstalled();

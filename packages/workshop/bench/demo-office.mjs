@@ -28,7 +28,7 @@ export const signIn = async (origin, role = 'engineer') => {
  * An approved sheet and a duty that it answers: the inputs of one of its own worked checks.
  * @param {string} origin
  * @param {string} cookie
- * @returns {Promise<{ slug: string, duty: Duty }>}
+ * @returns {Promise<{ slug: string, title: string, duty: Duty }>}
  */
 export const approvedSheet = async (origin, cookie) => {
   const headers = { cookie };
@@ -36,8 +36,8 @@ export const approvedSheet = async (origin, cookie) => {
   const { items } = await (await fetch(`${origin}/api/correlations?standing=approved`, { headers })).json();
   for (const { slug } of items) {
     const address = `${origin}/api/correlations/${slug}`;
-    /** @type {{ definition: { checks: Duty[] } }} */
-    const { definition } = await (await fetch(address, { headers })).json();
+    /** @type {{ title: string, definition: { checks: Duty[] } }} */
+    const { title, definition } = await (await fetch(address, { headers })).json();
     for (const { inputs, rows, equations } of definition.checks) {
       const duty = { inputs, rows, equations };
       const answer = await fetch(`${address}/evaluations`, {
@@ -45,7 +45,7 @@ export const approvedSheet = async (origin, cookie) => {
         headers: { ...headers, 'content-type': 'application/json' },
         body: JSON.stringify(duty),
       });
-      if (answer.ok) return { slug, duty };
+      if (answer.ok) return { slug, title, duty };
     }
   }
   throw new Error('No approved sheet answers one of its own checks.');

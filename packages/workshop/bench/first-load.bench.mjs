@@ -8,9 +8,10 @@ import { approvedSheet, signIn } from './demo-office.mjs';
  * @param {string} origin
  * @param {string} path
  * @param {string} cookie empty for nobody
+ * @param {string} sign a selector for what is to be seen on that page and on no other
  * @returns {Promise<{ total: number, largest: number }>} gzip kB
  */
-const weigh = async (origin, path, cookie) => {
+const weigh = async (origin, path, cookie, sign) => {
   const browser = await launchBrowser();
   try {
     await browser.context.addCookies(
@@ -29,7 +30,7 @@ const weigh = async (origin, path, cookie) => {
       if (/javascript/.test(response.headers()['content-type'] ?? '')) scripts.push(response);
     });
     await page.goto(origin + path, { waitUntil: 'networkidle' });
-    await page.getByRole('heading').first().waitFor();
+    await page.locator(sign).first().waitFor();
     if (new URL(page.url()).pathname !== path) throw new Error(`${path} led to ${page.url()}.`);
     const weights = await Promise.all(
       scripts.map(async (response) => gzipSync(await response.body()).length / 1000),
@@ -45,16 +46,22 @@ export const run = async () => {
   const office = await serveForTests();
   try {
     const cookie = await signIn(office.origin);
-    const { slug } = await approvedSheet(office.origin, cookie);
+    const { slug, title } = await approvedSheet(office.origin, cookie);
     const pages = [
-      { what: 'sign-in', path: '/sign-in', cookie: '', limit: 200 },
-      { what: 'register', path: '/register', cookie, limit: 400 },
-      { what: `sheet (${slug})`, path: `/register/${slug}`, cookie, limit: 400 },
+      { what: 'sign-in', path: '/sign-in', cookie: '', sign: 'input[type=password]', limit: 200 },
+      { what: 'register', path: '/register', cookie, sign: `text=${title}`, limit: 400 },
+      {
+        what: `sheet (${slug})`,
+        path: `/register/${slug}`,
+        cookie,
+        sign: `h1:has-text(${JSON.stringify(title)})`,
+        limit: 400,
+      },
     ];
     const rows = [];
     let largest = 0;
     for (const page of pages) {
-      const weight = await weigh(office.origin, page.path, page.cookie);
+      const weight = await weigh(office.origin, page.path, page.cookie, page.sign);
       largest = Math.max(largest, weight.largest);
       const met = weight.total <= page.limit;
       rows.push({ what: page.what, value: weight.total, unit: 'kB', aim: `≤ ${String(page.limit)}`, met });

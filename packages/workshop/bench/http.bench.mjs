@@ -41,7 +41,7 @@ export const run = async () => {
         {
           what: 'health : evaluation',
           value: health.requests.average / evaluations.requests.average,
-          unit: '× ',
+          unit: '×',
         },
       ],
       notes: [

@@ -66,3 +66,31 @@ export const standInFrontOf = (child) =>
       resolve(exitCodeOf(code, signal));
     });
   });
+
+/**
+ * Lives as long as all of its children: a signal, or the end of one, ends the others.
+ * @param {{ name: string, child: import('node:child_process').ChildProcess }[]} children
+ * @returns {Promise<number>} 0 after a signal, else what the first one ended with (never 0)
+ */
+export const endTogether = (children) =>
+  new Promise((/** @type {(code: number) => void} */ resolve) => {
+    let running = children.length;
+    let answerCode = 0;
+    let ending = false;
+    const endAll = () => {
+      ending = true;
+      for (const { child } of children) child.kill('SIGTERM');
+    };
+    for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) process.on(signal, endAll);
+    for (const { name, child } of children) {
+      child.once('exit', (code, signal) => {
+        if (!ending) {
+          console.error(`${name} ended; the others end with it.`);
+          answerCode = exitCodeOf(code, signal) || 1;
+          endAll();
+        }
+        running -= 1;
+        if (running === 0) resolve(answerCode);
+      });
+    }
+  });

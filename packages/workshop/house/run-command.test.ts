@@ -3,7 +3,7 @@ import { mkdtempSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { exitCodeOf, run } from './run-command.mjs';
+import { endTogether, exitCodeOf, run } from './run-command.mjs';
 
 describe('running another program', () => {
   it('answers with its exit code, or 128 and the number of the signal', async () => {
@@ -54,5 +54,18 @@ describe('standing in front of a server', () => {
     expect(output).toContain('tidied up');
     expect(code).toBe(0);
     expect((await endWith('SIGINT')).code).toBe(7);
+  });
+});
+
+describe('ending together', () => {
+  it('ends the others with the first that ends, and answers with its exit code', async () => {
+    const lasting = spawn(process.execPath, ['-e', 'setInterval(() => undefined, 1000)']);
+    const failing = spawn(process.execPath, ['-e', 'setTimeout(() => process.exit(5), 100)']);
+    const code = await endTogether([
+      { name: 'The lasting one', child: lasting },
+      { name: 'The failing one', child: failing },
+    ]);
+    expect(code).toBe(5);
+    expect(lasting.signalCode).toBe('SIGTERM');
   });
 });

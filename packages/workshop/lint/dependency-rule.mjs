@@ -141,7 +141,7 @@ const prohibitions = [
     message: '{{to.module.source}} belongs to the server.',
   },
   {
-    from: local([...api, 'engine']),
+    from: { element: { type: [...api, 'engine'] }, file: product },
     disallow: { to: { module: { source: ['react*', 'antd', 'swr', 'katex', '@merestone/api-client'] } } },
     message: '{{to.module.source}} belongs to the screens.',
   },
@@ -177,6 +177,7 @@ const prohibitions = [
   },
   {
     from: { element: { type: api }, file: { categories: 'dto' } },
+    dependency: { kind: 'value' },
     disallow: {
       to: [
         { file: { categories: ['controller', 'service', 'repository', 'nest-module'] } },

@@ -204,6 +204,11 @@ describe('the dependency rule', () => {
     );
   });
 
+  it('lets a DTO name the type of what it shows', async () => {
+    const text = `import type { Shown } from '../correlations.read-model.js';\n`;
+    expect(await complaints(`${feature}/dto/sheet.dto.ts`, text)).toEqual([]);
+  });
+
   it('cannot be switched off beside a line', async () => {
     const text = `// eslint-disable-next-line boundaries/dependencies\nimport { x } from '../../app/paths';\n`;
     const messages = await complaints('web/src/shared/ui/equation.tsx', text);
