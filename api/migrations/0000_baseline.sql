@@ -223,8 +223,7 @@ CREATE TABLE `standing_event` (
 CREATE INDEX `standing_event_by_revision` ON `standing_event` (`revision_id`,`id`);--> statement-breakpoint
 CREATE TABLE `session` (
 	`id_hash` text PRIMARY KEY NOT NULL,
-	`person_id` text,
-	`data` text NOT NULL,
+	`person_id` text NOT NULL,
 	`started_at` text NOT NULL,
 	`seen_at` text NOT NULL,
 	`idle_until` text NOT NULL,

@@ -19,6 +19,8 @@ export interface ProblemExtras {
   readonly fields?: readonly FieldProblem[] | undefined;
   readonly findings?: readonly Finding[] | undefined;
   readonly alternatives?: readonly Alternative[] | undefined;
+  /** Sent as Retry-After. */
+  readonly retryAfterSeconds?: number | undefined;
   /** For the log alone: never leaves the server. */
   readonly log?: string | undefined;
 }

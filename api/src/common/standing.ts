@@ -13,3 +13,6 @@ export type Standing = (typeof STANDINGS)[number];
 /** Why a revision was withdrawn. */
 export const WITHDRAWAL_CLASSES = ['error-in-sheet', 'error-in-source', 'unsafe'] as const;
 export type WithdrawalClass = (typeof WITHDRAWAL_CLASSES)[number];
+
+/** Standings that only those concerned see: not yet, or never, the office's word. */
+export const UNAPPROVED: readonly Standing[] = ['draft', 'in review', 'declined'];

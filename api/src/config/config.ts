@@ -5,11 +5,11 @@ export interface PasswordCost {
   readonly lanes: number;
 }
 
-/** How often somebody may try to sign in within the window before being told to wait. */
+/** How many attempts at a password may fail within the window before everybody concerned must wait. */
 export interface SignInLimits {
   readonly windowSeconds: number;
   readonly perAddress: number;
-  readonly perEmail: number;
+  readonly perPerson: number;
 }
 
 export interface SessionSpans {
@@ -41,7 +41,7 @@ export class Config {
     this.origin = settings.origin;
     this.webFolder = settings.webFolder;
     this.passwordCost = settings.passwordCost ?? { memoryKiB: 19 * 1024, passes: 2, lanes: 1 };
-    this.signInLimits = settings.signInLimits ?? { windowSeconds: 60, perAddress: 20, perEmail: 8 };
+    this.signInLimits = settings.signInLimits ?? { windowSeconds: 300, perAddress: 50, perPerson: 10 };
     this.sessionSpans = settings.sessionSpans ?? { idleMinutes: 60, absoluteHours: 12 };
   }
 

@@ -1,4 +1,4 @@
-import { Global, Module } from '@nestjs/common';
+import { Global, Module, type OnApplicationShutdown } from '@nestjs/common';
 import { Clock } from '../common/clock.js';
 import { Connection } from './connection.js';
 import { databaseProvider } from './database.provider.js';
@@ -10,4 +10,11 @@ import { Writer } from './write.js';
   providers: [databaseProvider, Writer, Clock],
   exports: [Connection, Writer, Clock],
 })
-export class DatabaseModule {}
+export class DatabaseModule implements OnApplicationShutdown {
+  constructor(private readonly connection: Connection) {}
+
+  /** After every other module: Nest ends modules from the outermost to the innermost, and this one uses none. */
+  onApplicationShutdown(): void {
+    this.connection.close();
+  }
+}

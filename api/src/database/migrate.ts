@@ -19,7 +19,12 @@ export function assertSqliteVersion(version: string): void {
   }
 }
 
-export interface MigrationReport {
+export interface MigrationReport extends GuardReport {
+  /** Whether there was no schema before. */
+  readonly wasNew: boolean;
+}
+
+export interface GuardReport {
   /** Guards that were not there, or not as they should be, and were put in place. */
   readonly guardsSet: readonly string[];
 }
@@ -32,6 +37,7 @@ export function migrateDatabase(
   const { sqlite, query } = connection;
   const row = sqlite.prepare<[], { version: string }>('SELECT sqlite_version() AS version').get();
   assertSqliteVersion(row?.version ?? '0');
+  const wasNew = triggersOf(sqlite).size === 0;
   // Inside the migrator's transaction this pragma does nothing, and a rebuilt table would empty its children.
   sqlite.pragma('foreign_keys = OFF');
   try {
@@ -40,7 +46,10 @@ export function migrateDatabase(
   } finally {
     sqlite.pragma('foreign_keys = ON');
   }
-  return setGuards(connection, readFileSync(inRepository('api/src/database/guards.sql'), 'utf8'));
+  return {
+    wasNew,
+    ...setGuards(connection, readFileSync(inRepository('api/src/database/guards.sql'), 'utf8')),
+  };
 }
 
 function assertForeignKeys({ sqlite }: Connection): void {
@@ -59,7 +68,7 @@ function assertForeignKeys({ sqlite }: Connection): void {
 const TRIGGER = /CREATE TRIGGER (\w+)[\s\S]*?\nEND;/g;
 
 /** Sets every trigger of the text anew and makes sure that each one stands as written. */
-export function setGuards({ sqlite }: Connection, text: string): MigrationReport {
+export function setGuards({ sqlite }: Connection, text: string): GuardReport {
   const wanted = new Map(
     [...text.matchAll(TRIGGER)].map((match) => [match[1] ?? '', match[0].replace(/;$/, '')]),
   );

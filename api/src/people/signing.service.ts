@@ -1,6 +1,8 @@
 import { Injectable } from '@nestjs/common';
 import type { Actor } from '../common/actor.js';
+import { AttemptLimiter } from '../common/attempt-limiter.js';
 import { ApiProblem } from '../common/problem.js';
+import { Config } from '../config/config.js';
 import { PasswordService } from './password.service.js';
 import { PeopleRepository } from './people.repository.js';
 
@@ -10,10 +12,14 @@ export class SigningService {
   constructor(
     private readonly people: PeopleRepository,
     private readonly passwords: PasswordService,
+    private readonly limiter: AttemptLimiter,
+    private readonly config: Config,
   ) {}
 
-  /** Throws `password-refused` at the field `password` unless it is the actor's own. */
+  /** Throws `password-refused` at the field `password` unless it is the actor's own; after too many, `too-many-requests`. */
   async confirm(actor: Actor, password: string): Promise<void> {
+    const { windowSeconds, perPerson } = this.config.signInLimits;
+    const attempt = this.limiter.begin([{ key: `signing:${actor.id}`, limit: perPerson, windowSeconds }]);
     const person = this.people.byId(actor.id);
     const fits = await this.passwords.fits(password, person?.passwordHash);
     if (!fits || person?.active !== true) {
@@ -23,5 +29,6 @@ export class SigningService {
         'This is not your password; nothing was signed.',
       );
     }
+    attempt.succeed();
   }
 }

@@ -6,8 +6,9 @@ export const session = sqliteTable(
   'session',
   {
     idHash: text('id_hash').primaryKey(),
-    personId: text('person_id').references(() => person.id),
-    data: text('data').notNull(),
+    personId: text('person_id')
+      .notNull()
+      .references(() => person.id),
     startedAt: text('started_at').notNull(),
     seenAt: text('seen_at').notNull(),
     /** Ends when not used until then; moves with use. */

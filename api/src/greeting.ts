@@ -1,0 +1,27 @@
+import type { AddressInfo } from 'node:net';
+import type { NestExpressApplication } from '@nestjs/platform-express';
+import { Config } from './config/config.js';
+import { DEMO_EMAIL_ENDING, DEMO_PASSWORD } from './people/demo-people.js';
+import { OfficeService } from './people/office.service.js';
+import { PeopleService } from './people/people.service.js';
+
+/** What the terminal says once the server can be used: where it is and, of a demo office, how to sign in. */
+export function greeting(app: NestExpressApplication): string {
+  const config = app.get(Config);
+  const { port } = app.getHttpServer().address() as AddressInfo;
+  const lines = ['', `Merestone is at ${config.origin ?? `http://localhost:${port}`}`];
+  if (app.get(OfficeService).isDemo()) {
+    const people = app
+      .get(PeopleService)
+      .list()
+      .filter(({ email }) => email.endsWith(DEMO_EMAIL_ENDING));
+    lines.push(
+      '',
+      `This is a demo office; the people are invented. All sign in with the password ${DEMO_PASSWORD}`,
+    );
+    lines.push(
+      ...people.map(({ email, name, roles }) => `  ${email.padEnd(36)}${roles.join(', ').padEnd(24)}${name}`),
+    );
+  }
+  return `${lines.join('\n')}\n\n`;
+}
