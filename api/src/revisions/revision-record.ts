@@ -12,13 +12,19 @@ export interface RevisionKey {
 /** A revision as it stands now: identity, last standing and latest content. */
 export interface RevisionRecord extends RevisionKey {
   readonly id: number;
+  /** Null for a property equation. */
+  readonly geometry: string | null;
   readonly originatorId: string;
   readonly createdAt: string;
   readonly standing: Standing;
   /** When it got that standing. */
   readonly standingAt: string;
+  readonly standingNote: string | null;
   readonly iteration: number;
   readonly hash: string;
+  readonly title: string;
+  /** Null for a property equation. */
+  readonly phase: string | null;
 }
 
 const PATHS: Record<SubjectKind, string> = {

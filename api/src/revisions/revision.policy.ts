@@ -2,7 +2,7 @@ import { SYSTEM_ACTOR, type Actor } from '../common/actor.js';
 import { ALLOWED, denied, type Decision } from '../common/authorized.js';
 import { hasPermission, type Permission } from '../common/permissions.js';
 import type { Verdict } from '../common/verdict.js';
-import type { Standing } from '../common/standing.js';
+import { UNAPPROVED, type Standing } from '../common/standing.js';
 
 /** How many favourable reviews an approval rests on. */
 export const REVIEWS_NEEDED = 2;
@@ -21,11 +21,12 @@ export interface VerdictFact {
   readonly hash: string;
 }
 
-const OPEN: readonly Standing[] = ['draft', 'in review', 'declined'];
-
-/** Standings that only those concerned see: not yet, or never, the office's word. */
-export function isUnapproved(standing: Standing): boolean {
-  return OPEN.includes(standing);
+/** What somebody sees of the register. */
+export interface Sight {
+  /** Drafts, reviews in progress and declined revisions of everybody. */
+  readonly everything: boolean;
+  /** Else those of these people. */
+  readonly originators: readonly string[];
 }
 
 /** Whose drafts somebody sees and may take up: their own and, for whoever may draft, those the library came with. */
@@ -39,8 +40,17 @@ export function seesUnapproved(actor: Actor): boolean {
 }
 
 export function maySee(actor: Actor, revision: RevisionFacts): boolean {
-  if (!isUnapproved(revision.standing) || seesUnapproved(actor)) return true;
-  return isOriginator(actor, revision);
+  const sight = sightOf(actor);
+  return (
+    !UNAPPROVED.includes(revision.standing) ||
+    sight.everything ||
+    sight.originators.includes(revision.originatorId)
+  );
+}
+
+/** The same for the database, which leaves out what somebody may not see. */
+export function sightOf(actor: Actor): Sight {
+  return { everything: seesUnapproved(actor), originators: originatorsOf(actor) };
 }
 
 export function mayEdit(actor: Actor, revision: RevisionFacts): Decision {
@@ -68,7 +78,11 @@ export function mayReview(actor: Actor, revision: RevisionFacts): Decision {
 }
 
 /** Whether somebody may sign, whoever else did: the approval's rules on the person and on what must be there. */
-export function mayApprove(actor: Actor, revision: RevisionFacts, verdicts: readonly VerdictFact[]): Decision {
+export function mayApprove(
+  actor: Actor,
+  revision: RevisionFacts,
+  verdicts: readonly VerdictFact[],
+): Decision {
   return first(
     holds(actor, 'correlation.approve'),
     unless(isOriginator(actor, revision), 'Nobody approves a revision that they originated.'),
@@ -84,7 +98,11 @@ export function mayApprove(actor: Actor, revision: RevisionFacts, verdicts: read
 export function maySuspend(actor: Actor, revision: RevisionFacts): Decision {
   return first(
     holds(actor, 'correlation.suspend'),
-    inStanding(revision, ['approved', 'superseded'], 'Only an approved or superseded revision can be suspended.'),
+    inStanding(
+      revision,
+      ['approved', 'superseded'],
+      'Only an approved or superseded revision can be suspended.',
+    ),
   );
 }
 
@@ -129,7 +147,10 @@ export function mayEvaluate(actor: Actor, revision: RevisionFacts): Decision {
     case 'suspended':
     case 'withdrawn':
     case 'declined':
-      return denied(`This revision is ${revision.standing} and not in use: it serves comparison only.`, 'not-in-use');
+      return denied(
+        `This revision is ${revision.standing} and not in use: it serves comparison only.`,
+        'not-in-use',
+      );
   }
 }
 
@@ -160,7 +181,11 @@ function isOriginator(actor: Actor, revision: RevisionFacts): boolean {
 
 function reviewed(revision: RevisionFacts, verdicts: readonly VerdictFact[]): Decision {
   const { favourable, open } = tally(revision.hash, verdicts);
-  if (open > 0) return denied('A reviewer has not recommended this content; the matter must be settled first.', 'conflict');
+  if (open > 0)
+    return denied(
+      'A reviewer has not recommended this content; the matter must be settled first.',
+      'conflict',
+    );
   if (favourable >= REVIEWS_NEEDED) return ALLOWED;
   return denied(
     `An approval rests on ${REVIEWS_NEEDED} favourable reviews of the present content; there ${favourable === 1 ? 'is 1' : `are ${favourable}`}.`,
@@ -169,7 +194,9 @@ function reviewed(revision: RevisionFacts, verdicts: readonly VerdictFact[]): De
 }
 
 function holds(actor: Actor, permission: Permission): Decision {
-  return hasPermission(actor.roles, permission) ? ALLOWED : denied(`This needs the permission ${permission}.`);
+  return hasPermission(actor.roles, permission)
+    ? ALLOWED
+    : denied(`This needs the permission ${permission}.`);
 }
 
 function asOriginator(actor: Actor, revision: RevisionFacts, does: string): Decision {
@@ -181,7 +208,9 @@ function unless(condition: boolean, reason: string): Decision {
 }
 
 function inStanding(revision: RevisionFacts, standings: readonly Standing[], reason: string): Decision {
-  return standings.includes(revision.standing) ? ALLOWED : denied(`${reason} This one is ${revision.standing}.`, 'conflict');
+  return standings.includes(revision.standing)
+    ? ALLOWED
+    : denied(`${reason} This one is ${revision.standing}.`, 'conflict');
 }
 
 function first(...decisions: Decision[]): Decision {

@@ -1,0 +1,116 @@
+import { Injectable } from '@nestjs/common';
+import { sql, type SQL } from 'drizzle-orm';
+import type { Standing } from '../common/standing.js';
+import { Connection } from '../database/connection.js';
+import { visibleTo, type VisibleTo } from '../database/visible-to.js';
+import type { RevisionRecord } from '../revisions/revision-record.js';
+import type { PageCursor } from './page-cursor.js';
+
+export interface ListFilter {
+  /** A full-text query; undefined looks for nothing in particular. */
+  readonly match?: string | undefined;
+  readonly geometry?: string | undefined;
+  readonly phase?: string | undefined;
+  readonly standing?: Standing | undefined;
+}
+
+export type ListRow = RevisionRecord & { readonly rank: number };
+
+export interface Count {
+  readonly value: string;
+  readonly count: number;
+}
+
+/** Weights of title, authors, geometry, summary, symbols, cautions and sources in the ranking. */
+const RANK = sql`bm25(register_search, 10.0, 8.0, 6.0, 4.0, 2.0, 1.0, 1.0)`;
+const COLUMNS = sql.raw(`
+  id, kind, slug, geometry, number, originator_id AS originatorId, created_at AS createdAt, standing,
+  standing_at AS standingAt, standing_note AS standingNote, iteration, hash, title, phase, rank`);
+
+/**
+ * The register as a list: of each correlation one revision, the approved one or else the latest that the caller sees;
+ * with a filter on standing, the latest of that standing.
+ */
+@Injectable()
+export class CorrelationListReadModel {
+  constructor(private readonly connection: Connection) {}
+
+  page(sight: VisibleTo, filter: ListFilter, after: PageCursor | undefined, limit: number): ListRow[] {
+    const later =
+      after === undefined
+        ? sql`1`
+        : sql`(rank, title COLLATE NOCASE, slug) > (${after.rank}, ${after.title}, ${after.slug})`;
+    return this.connection.reader.all<ListRow>(sql`
+      ${found(sight, filter)}
+      SELECT ${COLUMNS} FROM found WHERE ${inGeometry(filter)} AND ${inPhase(filter)} AND ${later}
+      ORDER BY rank, title COLLATE NOCASE, slug LIMIT ${limit}
+    `);
+  }
+
+  total(sight: VisibleTo, filter: ListFilter): number {
+    const [row] = this.connection.reader.all<{ count: number }>(sql`
+      ${found(sight, filter)}
+      SELECT count(*) AS count FROM found WHERE ${inGeometry(filter)} AND ${inPhase(filter)}
+    `);
+    return row?.count ?? 0;
+  }
+
+  geometries(sight: VisibleTo, filter: ListFilter): Count[] {
+    return this.connection.reader.all<Count>(sql`
+      ${found(sight, filter)}
+      SELECT geometry AS value, count(*) AS count FROM found WHERE ${inPhase(filter)} GROUP BY geometry
+    `);
+  }
+
+  /** A sheet for gas or liquid, or for both, counts for each. */
+  phases(sight: VisibleTo, filter: ListFilter): Count[] {
+    return this.connection.reader.all<Count>(sql`
+      ${found(sight, filter)}
+      SELECT 'gas' AS value, count(*) AS count FROM found WHERE phase <> 'liquid' AND ${inGeometry(filter)}
+      UNION ALL
+      SELECT 'liquid', count(*) FROM found WHERE phase <> 'gas' AND ${inGeometry(filter)}
+    `);
+  }
+
+  standings(sight: VisibleTo, filter: ListFilter): Count[] {
+    return this.connection.reader.all<Count>(sql`
+      ${found(sight, filter)}
+      SELECT standing AS value, count(DISTINCT slug) AS count FROM seen
+      WHERE ${inGeometry(filter)} AND ${inPhase(filter)} GROUP BY standing
+    `);
+  }
+}
+
+/** `seen`: every revision the caller sees that matches; `found`: of each correlation the one to be listed. */
+function found(sight: VisibleTo, { match, standing }: ListFilter): SQL {
+  const seen =
+    match === undefined
+      ? sql`seen AS (SELECT *, 0 AS rank FROM revision_now WHERE kind = 'correlation' AND ${visibleTo(sight)})`
+      : sql`
+          hits AS MATERIALIZED (
+            SELECT rowid AS hit, ${RANK} AS rank FROM register_search WHERE register_search MATCH ${match}
+          ),
+          seen AS (
+            SELECT revision_now.*, rank FROM revision_now JOIN hits ON hit = revision_now.id
+            WHERE kind = 'correlation' AND ${visibleTo(sight)}
+          )`;
+  const ofStanding = standing === undefined ? sql`1` : sql`standing = ${standing}`;
+  return sql`
+    WITH ${seen},
+    chosen AS (
+      SELECT id, row_number() OVER (PARTITION BY slug ORDER BY standing = 'approved' DESC, number DESC) AS place
+      FROM revision_now WHERE kind = 'correlation' AND ${visibleTo(sight)} AND ${ofStanding}
+    ),
+    found AS (SELECT seen.* FROM seen JOIN chosen ON chosen.id = seen.id WHERE place = 1)`;
+}
+
+function inGeometry({ geometry }: ListFilter): SQL {
+  return geometry === undefined ? sql`1` : sql`geometry = ${geometry}`;
+}
+
+function inPhase({ phase }: ListFilter): SQL {
+  if (phase === undefined) return sql`1`;
+  if (phase === 'gas') return sql`phase <> 'liquid'`;
+  if (phase === 'liquid') return sql`phase <> 'gas'`;
+  return sql`phase = ${phase}`;
+}

@@ -1,0 +1,113 @@
+import type { CheckReport, CompiledCorrelation } from '@merestone/engine';
+import type { Actor } from '../common/actor.js';
+import { CAUTION } from '../revisions/caution.js';
+import type { RevisionRecord } from '../revisions/revision-record.js';
+import {
+  mayApprove,
+  mayComment,
+  mayEdit,
+  mayEvaluate,
+  mayReinstate,
+  mayReview,
+  maySubmit,
+  maySuspend,
+  mayWithdraw,
+} from '../revisions/revision.policy.js';
+import type { Sheet, SheetAbilities } from './dto/sheet.dto.js';
+import type { RevisionFile } from './sheet.read-model.js';
+
+/** All that a sheet is put together from. */
+export interface SheetParts {
+  readonly actor: Actor;
+  readonly record: RevisionRecord;
+  readonly compiled: CompiledCorrelation;
+  /** The revisions of the correlation that the caller may see. */
+  readonly revisions: readonly RevisionRecord[];
+  readonly file: RevisionFile;
+  readonly checks: readonly CheckReport[];
+  readonly equations: Sheet['equations'];
+  readonly originatorName: string;
+  readonly geometryName: string;
+}
+
+export function sheet(parts: SheetParts): Sheet {
+  const { actor, record, compiled, file } = parts;
+  const { definition } = compiled;
+  return {
+    slug: record.slug,
+    title: definition.title,
+    geometry: definition.geometry,
+    geometryName: parts.geometryName,
+    standing: record.standing,
+    revision: record.number,
+    iteration: record.iteration,
+    hash: record.hash,
+    definition,
+    originator: { id: record.originatorId, name: parts.originatorName },
+    revisions: parts.revisions.map(({ number, standing, hash, standingAt }) => ({
+      number,
+      standing,
+      hash,
+      at: standingAt,
+    })),
+    ...onRecord(record, file),
+    checks: [...parts.checks],
+    standingNote: record.standing === 'approved' ? null : record.standingNote,
+    usage: { evaluations: file.evaluations, calculations: 0 },
+    equations: parts.equations,
+    abilities: abilities(actor, record, file),
+    caution: CAUTION,
+  };
+}
+
+function onRecord(
+  record: RevisionRecord,
+  { history, reviews, comments, approval }: RevisionFile,
+): Pick<Sheet, 'history' | 'reviews' | 'comments' | 'approval'> {
+  return {
+    history: history.map(({ standing, at, byId, byName, note, withdrawalClass }) => ({
+      standing,
+      at,
+      by: { id: byId, name: byName },
+      note,
+      class: withdrawalClass,
+    })),
+    reviews: reviews.map(({ reviewerId, reviewerName, verdict, at, note, hash }) => ({
+      reviewer: { id: reviewerId, name: reviewerName },
+      verdict,
+      at,
+      note,
+      hash,
+      current: hash === record.hash,
+    })),
+    comments: comments.map(({ field, text, byId, byName, at, hash }) => ({
+      field,
+      text,
+      by: { id: byId, name: byName },
+      at,
+      hash,
+    })),
+    approval: approval
+      ? {
+          by: { id: approval.byId, name: approval.byName },
+          at: approval.at,
+          meaning: approval.meaning,
+          hash: approval.hash,
+        }
+      : null,
+  };
+}
+
+function abilities(actor: Actor, record: RevisionRecord, { reviews }: RevisionFile): SheetAbilities {
+  return {
+    evaluate: mayEvaluate(actor, record).allowed,
+    edit: mayEdit(actor, record).allowed,
+    submit: maySubmit(actor, record).allowed,
+    comment: mayComment(actor).allowed,
+    review: mayReview(actor, record).allowed,
+    approve: mayApprove(actor, record, reviews).allowed,
+    suspend: maySuspend(actor, record).allowed,
+    reinstate: mayReinstate(actor, record).allowed,
+    withdraw: mayWithdraw(actor, record).allowed,
+  };
+}

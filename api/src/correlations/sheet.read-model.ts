@@ -1,0 +1,59 @@
+import { Injectable } from '@nestjs/common';
+import { asc, count, eq } from 'drizzle-orm';
+import { Connection, type Reader } from '../database/connection.js';
+import { evaluation } from '../database/schema/evaluation.js';
+import { approval, comment, review } from '../database/schema/review.js';
+import { standingEvent } from '../database/schema/revision.js';
+
+export type HistoryRow = typeof standingEvent.$inferSelect;
+export type ReviewRow = typeof review.$inferSelect;
+export type CommentRow = typeof comment.$inferSelect;
+export type ApprovalRow = typeof approval.$inferSelect;
+
+/** What stands on record about one revision. */
+export interface RevisionFile {
+  readonly history: readonly HistoryRow[];
+  readonly reviews: readonly ReviewRow[];
+  readonly comments: readonly CommentRow[];
+  readonly approval: ApprovalRow | undefined;
+  readonly evaluations: number;
+}
+
+@Injectable()
+export class SheetReadModel {
+  constructor(private readonly connection: Connection) {}
+
+  file(revisionId: number, reader: Reader = this.connection.reader): RevisionFile {
+    return {
+      history: reader
+        .select()
+        .from(standingEvent)
+        .where(eq(standingEvent.revisionId, revisionId))
+        .orderBy(asc(standingEvent.id))
+        .all(),
+      reviews: reader
+        .select()
+        .from(review)
+        .where(eq(review.revisionId, revisionId))
+        .orderBy(asc(review.id))
+        .all(),
+      comments: reader
+        .select()
+        .from(comment)
+        .where(eq(comment.revisionId, revisionId))
+        .orderBy(asc(comment.id))
+        .all(),
+      approval: reader.select().from(approval).where(eq(approval.revisionId, revisionId)).get(),
+      evaluations: this.evaluations(revisionId, reader),
+    };
+  }
+
+  private evaluations(revisionId: number, reader: Reader): number {
+    const row = reader
+      .select({ kept: count() })
+      .from(evaluation)
+      .where(eq(evaluation.revisionId, revisionId))
+      .get();
+    return row?.kept ?? 0;
+  }
+}

@@ -1,0 +1,11 @@
+import { Module } from '@nestjs/common';
+import { DefinitionsService } from './definitions.service.js';
+import { RevisionRepository } from './revision.repository.js';
+import { RevisionsService } from './revisions.service.js';
+
+/** Revisions of correlations and property equations: what the features of the register stand on. */
+@Module({
+  providers: [RevisionRepository, RevisionsService, DefinitionsService],
+  exports: [RevisionsService, DefinitionsService],
+})
+export class RevisionsModule {}
