@@ -4,6 +4,9 @@ import { dispersions } from './dictionary/dispersions.js';
 import { apparatusLengths } from './dictionary/apparatus-lengths.js';
 import { flow } from './dictionary/flow.js';
 import { interfaceStates } from './dictionary/interface-states.js';
+import { jetsAndCoils } from './dictionary/jets-and-coils.js';
+import { movingDrops } from './dictionary/moving-drops.js';
+import { openSurfaces } from './dictionary/open-surfaces.js';
 import { lengths } from './dictionary/lengths.js';
 import { localVelocities } from './dictionary/local-velocities.js';
 import { properties } from './dictionary/properties.js';
@@ -20,6 +23,9 @@ const PARTS: readonly DictionaryPart[] = [
   localVelocities,
   properties,
   propertyInputs,
+  jetsAndCoils,
+  movingDrops,
+  openSurfaces,
   states,
 ];
 
