@@ -8,7 +8,7 @@ import { bracketedText, randomChain, randomPoint, randomTree, SYMBOLS } from '..
 
 // An evaluator by other people (mathjs): real numbers only, its natural logarithm under our name. Its power takes real
 // odd roots of negative numbers, and its min and max round; both are set aside, since neither is what double arithmetic does.
-const math = create(all, { predictable: true, relTol: 1e-15, absTol: 1e-300 });
+const math = create(all ?? {}, { predictable: true, relTol: 1e-15, absTol: 1e-300 });
 math.import({ ln: (value: number) => Math.log(value) }, {});
 math.import({ pow: (base: number, exponent: number) => Math.pow(base, exponent) }, { override: true });
 

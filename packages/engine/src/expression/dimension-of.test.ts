@@ -8,7 +8,7 @@ import { parse } from './parse.js';
 import { bracketedText } from '../testing/random-tree.js';
 import type { Tree } from './tree.js';
 
-const math = create(all, {});
+const math = create(all ?? {}, {});
 
 /** Symbols with a unit each, written so that both readers understand it. */
 const UNITS = {
@@ -43,7 +43,8 @@ function byMathjs(text: string): Unit | number | null {
     NAMES.map((name) => [name, name === 'one' ? 1 : math.unit(1, UNITS[name].replace(' ', '*'))]),
   );
   try {
-    return math.evaluate(text, scope) as Unit | number;
+    const value: unknown = math.evaluate(text, scope);
+    return value as Unit | number;
   } catch {
     return null;
   }
@@ -80,7 +81,7 @@ const sum: fc.Arbitrary<Tree> = fc
   )
   .map(([operator, a, b, c]): Tree => ({
     kind: 'binary',
-    operator: operator as '+' | '-',
+    operator,
     left: {
       kind: 'binary',
       operator: '*',
