@@ -75,3 +75,14 @@ export type { DictionaryEntry, Sign } from './quantity/dictionary-entry.js';
 export { readUnit, type Unit, type UnitReading } from './quantity/unit.js';
 export { unitsFor, convert } from './quantity/unit-choices.js';
 export { CONSTANTS } from './quantity/constants.js';
+
+export { formatCitation, type Citation, type CitationParts } from './citation/format-citation.js';
+export { readDoi, doiKey, type DoiName } from './citation/doi.js';
+export {
+  citationKey,
+  findDuplicates,
+  sameWork,
+  type CitationKey,
+  type DuplicatePair,
+  type Likeness,
+} from './citation/same-work.js';

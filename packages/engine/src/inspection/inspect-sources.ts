@@ -1,8 +1,6 @@
+import { readDoi } from '../citation/doi.js';
 import type { CorrelationDefinition, PropertyEquationDefinition } from '../sheet/definition.js';
 import type { Remark } from './remark.js';
-
-/** Syntax of a DOI: prefix of the registrant, slash, suffix (ISO 26324). */
-const DOI = /^10\.\d{4,9}\/\S+$/;
 
 /** Whether each source can be found again, and how sure the sheet is of it. */
 export function inspectSources({
@@ -18,7 +16,7 @@ export function inspectSources({
     ];
     return [
       ...(absent.length > 0 ? [warning(field, `Source ${i + 1} lacks ${absent.join(' and ')}.`)] : []),
-      ...(csl.DOI !== undefined && !DOI.test(csl.DOI)
+      ...(csl.DOI !== undefined && readDoi(csl.DOI) === undefined
         ? [
             {
               verdict: 'error' as const,
