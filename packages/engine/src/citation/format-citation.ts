@@ -50,6 +50,7 @@ export function formatCitation(item: CslItem): Citation {
 
 function partsOf(item: CslItem): CitationParts {
   const { volume, issue } = item;
+  const { genre, number }: Record<string, unknown> = item;
   return {
     authors: names(item.author ?? []),
     year: String(item.issued?.['date-parts'][0]?.[0] ?? ''),
@@ -58,7 +59,7 @@ function partsOf(item: CslItem): CitationParts {
     volume: [volume, issue === undefined || issue === '' ? '' : `(${issue})`].filter(Boolean).join(' '),
     pages: (item.page ?? '').replace(/\s*[-‐‑–—]+\s*/g, '–'),
     edition: editionText(item.edition),
-    kind: [plainText(item.genre), plainText(item.number)].filter(Boolean).join(' '),
+    kind: [plainText(genre), plainText(number)].filter(Boolean).join(' '),
     publisher: item.publisher ?? '',
   };
 }
