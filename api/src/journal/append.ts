@@ -6,6 +6,15 @@ import type { Act } from './acts.js';
 import { canonicalText, journalEntry, type JournalEntry, type JsonObject } from './entry.js';
 import { leafHash, nodesOnAppend, type NodeLookup } from './merkle-tree.js';
 
+/** A stored hash of the journal's tree is gone. */
+export class MissingNodeError extends Error {
+  override readonly name = 'MissingNodeError';
+
+  constructor(level: number, position: number) {
+    super(`The journal's subtree ${level}/${position} is missing.`);
+  }
+}
+
 /** Reads a stored subtree hash; a missing one means the journal was tampered with, so nothing may be built on it. */
 export function storedNodes(reader: Reader): NodeLookup {
   return (level, position) => {
@@ -14,7 +23,7 @@ export function storedNodes(reader: Reader): NodeLookup {
       .from(journalNode)
       .where(and(eq(journalNode.level, level), eq(journalNode.position, position)))
       .get();
-    if (row === undefined) throw new Error(`The journal's subtree ${level}/${position} is missing.`);
+    if (row === undefined) throw new MissingNodeError(level, position);
     return row.hash;
   };
 }

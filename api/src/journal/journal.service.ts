@@ -1,6 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import { Connection } from '../database/connection.js';
-import { journalSize, storedNodes } from './append.js';
+import { journalSize, MissingNodeError, storedNodes } from './append.js';
 import { CheckpointService } from './checkpoint.service.js';
 import {
   checkpointsResponse,
@@ -35,7 +35,7 @@ export class JournalService {
       items,
       nextCursor: rows.length > wanted && last !== undefined ? String(last.index) : null,
       size,
-      root: rootHash(size, storedNodes(this.connection.reader)).toString('hex'),
+      root: this.root(size),
     };
   }
 
@@ -48,5 +48,14 @@ export class JournalService {
 
   listCheckpoints(): CheckpointsResponse {
     return checkpointsResponse(this.journal.checkpoints(), this.journal.keys());
+  }
+
+  private root(size: number): string | null {
+    try {
+      return rootHash(size, storedNodes(this.connection.reader)).toString('hex');
+    } catch (error) {
+      if (error instanceof MissingNodeError) return null;
+      throw error;
+    }
   }
 }

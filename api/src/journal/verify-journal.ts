@@ -48,9 +48,11 @@ export function verifyJournal(source: JournalSource): Verification {
 }
 
 const PAGE = 1000;
+const LOWEST_ROWID = -(2 ** 63);
 
 function* rowsOf(source: JournalSource): Generator<JournalRow> {
-  let next = 0;
+  // An entry that was put in may stand before the first, too.
+  let next = LOWEST_ROWID;
   for (;;) {
     const page = source.from(next, PAGE);
     yield* page;

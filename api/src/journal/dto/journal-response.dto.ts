@@ -24,7 +24,7 @@ export class JournalItem {
   readonly actor!: JournalActor;
 
   @ApiProperty({ enum: Object.keys(ACTS) })
-  readonly act!: Act;
+  readonly act!: Act | '';
 
   @ApiProperty({ type: String, description: 'Path of what was acted on' })
   readonly subject!: string;
@@ -46,8 +46,12 @@ export class JournalResponse {
   @ApiProperty({ type: Number, description: 'Number of entries' })
   readonly size!: number;
 
-  @ApiProperty({ type: String, description: 'Root hash of the tree over all of them, hex' })
-  readonly root!: string;
+  @ApiProperty({
+    type: String,
+    nullable: true,
+    description: 'Root hash of the tree over all of them, hex; null when stored hashes are gone',
+  })
+  readonly root!: string | null;
 }
 
 export class FaultResponse {
@@ -109,15 +113,15 @@ export class CheckpointsResponse {
 }
 
 export function journalItem(row: JournalRow): JournalItem {
-  const { at, actor, act, subject, detail } = JSON.parse(row.entry) as JournalEntry;
-  const { id, name } = actor;
+  // Of an entry that somebody put in by hand whatever is there is shown.
+  const entry = JSON.parse(row.entry) as Partial<JournalEntry>;
   return {
     index: row.index,
-    at,
-    actor: { id, name },
-    act,
-    subject,
-    detail,
+    at: entry.at ?? '',
+    actor: { id: entry.actor?.id ?? '', name: entry.actor?.name ?? '' },
+    act: entry.act ?? '',
+    subject: entry.subject ?? '',
+    detail: entry.detail ?? {},
     leaf: leafHash(row.entry).toString('hex'),
   };
 }
