@@ -55,11 +55,4 @@ export const movingDrops: DictionaryPart = {
     symbol: 'Y_inf',
     sign: 'non-negative',
   },
-  'viscosity-ratio-to-surface': {
-    title: 'Viscosity in the free stream over viscosity at the surface',
-    unit: '1',
-    symbol: 'r_mu',
-    sign: 'positive',
-    hint: '1 for isothermal, dilute transfer.',
-  },
 };
