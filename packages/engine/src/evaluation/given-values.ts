@@ -1,7 +1,7 @@
 import { QUANTITIES } from '../quantity/dictionary.js';
 import type { DictionaryEntry, Sign } from '../quantity/dictionary-entry.js';
 import { dimensionText, isDimensionless, sameDimension } from '../quantity/dimension.js';
-import { readUnit, toSI, type Unit } from '../quantity/unit.js';
+import { measuresSame, readUnit, toSI, type Unit } from '../quantity/unit.js';
 import type { CompiledSheet, PropertyLibrary } from '../sheet/compiled.js';
 import type { EvaluationRequest, InputValue, Problem } from './outcome.js';
 
@@ -93,6 +93,13 @@ export function readValue(input: InputValue, target: Target, field: string): Rea
     return fault(
       'unit',
       `${target.title} is measured in ${dimensionWord(target.unit)}; "${unit.text}" is ${dimensionWord(unit)}.`,
+    );
+  if (!measuresSame(unit, target.unit))
+    return fault(
+      'unit',
+      target.unit.angular
+        ? `${target.title} is an angular speed and "${unit.text}" is none: give it in rad/s or rpm.`
+        : `"${unit.text}" is an angular speed and ${target.title.toLowerCase()} is none: give turns per minute as 1/min.`,
     );
   const difference = target.entry?.difference === true;
   if (unit.remark && target.entry?.absolutePressure !== true)

@@ -1,8 +1,8 @@
 import { sameDimension } from './dimension.js';
-import { fromSI, readUnit, toSI } from './unit.js';
+import { fromSI, measuresSame, readUnit, toSI } from './unit.js';
 
 /** Units that people of this trade write, offered where the dimension fits. */
-const OFFERED = [
+export const OFFERED = [
   '1',
   '%',
   'm',
@@ -115,23 +115,18 @@ export function unitsFor(
   const fits = OFFERED.filter((offered) => {
     const reading = readUnit(offered);
     if (!reading.ok || !sameDimension(reading.unit.dimension, own.unit.dimension)) return false;
-    if (reading.unit.offset === 0) return isFrequencyAlike(unit, offered);
+    // Angular speed and frequency share a dimension and differ by 2π: neither is offered for the other.
+    if (reading.unit.offset === 0) return reading.unit.angular === own.unit.angular;
     return offered.includes('(g)') ? kind.absolutePressure === true : kind.difference !== true;
   });
   return [unit, ...fits.filter((offered) => offered !== unit)];
-}
-
-/** Angular speed and frequency share a dimension and differ by 2π: neither is offered for the other. */
-function isFrequencyAlike(unit: string, offered: string): boolean {
-  const angular = (text: string): boolean => /rad|rpm|deg$/.test(text);
-  return angular(unit) === angular(offered) || offered === 'degC' || offered === 'degF';
 }
 
 /** Converts a number between two units of one dimension; null where they do not fit. */
 export function convert(value: number, from: string, to: string): number | null {
   const a = readUnit(from);
   const b = readUnit(to);
-  if (!a.ok || !b.ok || !sameDimension(a.unit.dimension, b.unit.dimension)) return null;
+  if (!a.ok || !b.ok || !measuresSame(a.unit, b.unit)) return null;
   if (a.unit.factor === b.unit.factor && a.unit.offset === b.unit.offset) return value;
   return fromSI(toSI(value, a.unit), b.unit);
 }

@@ -1,5 +1,13 @@
 import Qty from 'js-quantities';
-import { DIMENSIONLESS, power, product, type BaseUnit, type Dimension } from './dimension.js';
+import {
+  DIMENSIONLESS,
+  isDimensionless,
+  power,
+  product,
+  sameDimension,
+  type BaseUnit,
+  type Dimension,
+} from './dimension.js';
 
 /** A unit as an affine map to coherent SI: SI value = value × factor + offset. */
 export interface Unit {
@@ -9,6 +17,8 @@ export interface Unit {
   dimension: Dimension;
   /** A remark that belongs to a value in this unit, such as the atmosphere under a gauge reading. */
   remark?: string;
+  /** Counts radians (rad, deg, rpm): as an angular speed no frequency, though of the same dimension. */
+  angular: boolean;
 }
 
 export type UnitReading = { ok: true; unit: Unit } | { ok: false; reason: string };
@@ -33,12 +43,23 @@ const EXACT: Readonly<Record<string, { factor: number; like: string }>> = {
   hp: { factor: 745.6998715822702, like: 'W' },
   BTU: { factor: 1055.05585262, like: 'J' },
   kn: { factor: 1852 / 3600, like: 'm/s' },
+  cmH2O: { factor: 98.0665, like: 'Pa' },
+  mmH2O: { factor: 9.80665, like: 'Pa' },
+  oz: { factor: 0.028349523125, like: 'kg' },
+  slug: { factor: 14.593902937206365, like: 'kg' },
   a: { factor: 31557600, like: 's' },
   d: { factor: 86400, like: 's' },
   rpm: { factor: Math.PI / 30, like: 'rad/s' },
   deg: { factor: Math.PI / 180, like: 'rad' },
   K: { factor: 1, like: 'degK' },
 };
+
+/**
+ * What is taken from the unit library: the names whose factors there are exact. Its list is wider, and in places
+ * rounded (rods, gallons) or surprising (weight per cent as a density), so that nothing else of it is let in.
+ */
+const FROM_LIBRARY =
+  /^(?:(?:[fpnumcdhkMGT]|da)?(?:m|g|s|A|mol|Pa|bar|N|J|W|V|C|Hz|P|St|cal|l|L)|[mu]?M|cd|t|tonne|sec|min|h|hr|hour|in|inch|ft|foot|feet|yd|mi|mile|mil|atm|dyn|erg|lbs|degC|degF|degK|degR|mph|rad|ppm|ppb|%)$/;
 
 /** Offset units, which stand alone only. Gauge readings are pressures over the atmosphere. */
 const OFFSET: Readonly<Record<string, { factor: number; offset: number; like: string; remark?: string }>> = {
@@ -59,19 +80,15 @@ const SPELLINGS: Readonly<Record<string, string>> = {
   psia: 'psi',
   '-': '1',
   '': '1',
-  lb: 'lbm',
-  L: 'l',
 };
 const ATOM_SPELLINGS: Readonly<Record<string, string>> = {
-  L: 'l',
-  mL: 'ml',
   lb: 'lbs',
   lbm: 'lbs',
   torr: 'Torr',
   Btu: 'BTU',
   yr: 'a',
   day: 'd',
-  µm: 'um',
+  knot: 'kn',
 };
 
 const known = new Map<string, UnitReading>();
@@ -85,7 +102,7 @@ export function readUnit(text: string): UnitReading {
   const cached = known.get(text);
   if (cached) return cached;
   const reading = readAnew(text);
-  if (known.size < CACHE_LIMIT) known.set(text, reading);
+  if (reading.ok && known.size < CACHE_LIMIT) known.set(text, reading);
   return reading;
 }
 
@@ -95,7 +112,7 @@ function readAnew(text: string): UnitReading {
   const offset = Object.hasOwn(OFFSET, plain) ? OFFSET[plain] : undefined;
   if (offset) {
     const { dimension } = atom(offset.like) ?? { dimension: DIMENSIONLESS };
-    return { ok: true, unit: { text, ...offset, dimension } };
+    return { ok: true, unit: { text, ...offset, dimension, angular: false } };
   }
   return readProduct(plain, text);
 }
@@ -120,12 +137,14 @@ function normalise(text: string): string {
   return trimmed
     .replace(/[⁰¹²³⁴⁵⁶⁷⁸⁹⁻]+/g, (run) => `^${[...run].map((c) => SUPERSCRIPTS[c] ?? '').join('')}`)
     .replace(/[µμ]/g, 'u')
-    .replace(/[·*×]/g, ' ')
+    .replace(/[·⋅*×]/g, ' ')
     .replace(/°/g, 'deg')
     .replace(/\s+/g, ' ');
 }
 
-const FACTOR = /^([A-Za-z%][A-Za-z0-9%]*?)(?:\^?(-?\d+(?:\.\d+)?))?$/;
+/** Names that count an angle; the radian itself is a plain number to the engine. */
+const ANGULAR = new Set(['rad', 'deg', 'rpm']);
+const FACTOR = /^([A-Za-z][A-Za-z0-9]*?|%)(?:\^?(-?\d+(?:\.\d+)?))?$/;
 
 function readProduct(plain: string, text: string): UnitReading {
   let factor = 1;
@@ -138,7 +157,10 @@ function readProduct(plain: string, text: string): UnitReading {
     factor *= read.factor ** exponent;
     dimension = product(dimension, power(read.dimension, exponent));
   }
-  return { ok: true, unit: { text, factor, offset: 0, dimension } };
+  // Powers of a large prefix can leave the range of a double; such a unit measures nothing.
+  if (factor === 0 || !Number.isFinite(factor)) return unknownUnit(text);
+  const angular = factors.some(({ name }) => ANGULAR.has(name));
+  return { ok: true, unit: { text, factor, offset: 0, dimension, angular } };
 }
 
 function unknownUnit(text: string): UnitReading {
@@ -155,7 +177,7 @@ function factorsOf(plain: string): { name: string; exponent: number }[] | null {
       const match = word === '1' ? ['', '1', undefined] : FACTOR.exec(word);
       if (!match?.[1]) return null;
       const exponent = Number(match[2] ?? 1);
-      if (Math.abs(exponent) > 9) return null;
+      if (exponent === 0 || Math.abs(exponent) > 9) return null;
       found.push({ name: match[1], exponent: i === 0 ? exponent : -exponent });
     }
   }
@@ -187,10 +209,11 @@ const BASE_NAMES: Readonly<Record<string, BaseUnit | null>> = {
 };
 
 /** One unit without a power, from the exact table or the unit library. */
-function atom(name: string): { factor: number; dimension: Dimension } | null {
+function atom(spelling: string): { factor: number; dimension: Dimension } | null {
+  const name = Object.hasOwn(ATOM_SPELLINGS, spelling) ? (ATOM_SPELLINGS[spelling] ?? spelling) : spelling;
   const exact = Object.hasOwn(EXACT, name) ? EXACT[name] : undefined;
   if (exact) return { factor: exact.factor, dimension: libraryUnit(exact.like)?.dimension ?? DIMENSIONLESS };
-  return libraryUnit(Object.hasOwn(ATOM_SPELLINGS, name) ? (ATOM_SPELLINGS[name] ?? name) : name);
+  return FROM_LIBRARY.test(name) ? libraryUnit(name) : null;
 }
 
 function libraryUnit(name: string): { factor: number; dimension: Dimension } | null {
@@ -202,7 +225,7 @@ function libraryUnit(name: string): { factor: number; dimension: Dimension } | n
       [base.denominator, -1],
     ] as const)
       for (const part of list) {
-        if (!(part in BASE_NAMES)) return null;
+        if (!Object.hasOwn(BASE_NAMES, part)) return null;
         const unit = BASE_NAMES[part];
         if (unit) dimension = product(dimension, { [unit]: sign });
       }
@@ -210,6 +233,11 @@ function libraryUnit(name: string): { factor: number; dimension: Dimension } | n
   } catch {
     return null;
   }
+}
+
+/** Whether two units measure the same; a frequency and an angular speed do not, though their dimension agrees. */
+export function measuresSame(a: Unit, b: Unit): boolean {
+  return sameDimension(a.dimension, b.dimension) && (a.angular === b.angular || isDimensionless(a.dimension));
 }
 
 /** SI value of a number in a unit. */

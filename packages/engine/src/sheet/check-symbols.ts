@@ -3,7 +3,7 @@ import { isFunctionName } from '../expression/tree.js';
 import { isConstant } from '../quantity/constants.js';
 import { QUANTITIES } from '../quantity/dictionary.js';
 import { dimensionText, sameDimension } from '../quantity/dimension.js';
-import { readUnit } from '../quantity/unit.js';
+import { measuresSame, readUnit } from '../quantity/unit.js';
 import type { Calculable } from './lines.js';
 
 /** Every symbol is defined once, is not reserved, has a unit that can be read, and fits its dictionary entry. */
@@ -34,11 +34,13 @@ function checkUnits({ quantities, lines }: Calculable): Problem[] {
     if (!reading.ok)
       problems.push({ code: 'unit', field: `quantities[${i}].unit`, message: `${reading.reason}.` });
     const own = entry ? readUnit(entry.unit) : undefined;
-    if (reading.ok && own?.ok && !sameDimension(reading.unit.dimension, own.unit.dimension))
+    if (reading.ok && own?.ok && !measuresSame(reading.unit, own.unit))
       problems.push({
         code: 'dimension',
         field: `quantities[${i}].unit`,
-        message: `${symbol} in ${unit} is ${dimensionText(reading.unit.dimension)}; ${is} is ${dimensionText(own.unit.dimension)}.`,
+        message: sameDimension(reading.unit.dimension, own.unit.dimension)
+          ? `${symbol} in ${unit} and ${is} in ${entry?.unit} differ: one is an angular speed, the other is none.`
+          : `${symbol} in ${unit} is ${dimensionText(reading.unit.dimension)}; ${is} is ${dimensionText(own.unit.dimension)}.`,
       });
   }
   for (const { unit, path } of lines) {
