@@ -1,5 +1,6 @@
 import { Navigate, createBrowserRouter, type RouteObject } from 'react-router-dom';
 import { paths } from '../shared/paths';
+import { Loading } from '../shared/ui/loading';
 import { PageFrame } from './layout/page-frame';
 import { NotFound } from './routes/not-found';
 import { RouteError } from './routes/route-error';
@@ -18,6 +19,7 @@ const signedInRoutes: RouteObject[] = [
 export const routes: RouteObject[] = [
   {
     element: <PageFrame />,
+    hydrateFallbackElement: <Loading what="the page" />,
     errorElement: <RouteError />,
     children: [
       {

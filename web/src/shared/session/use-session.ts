@@ -32,7 +32,7 @@ export function useSession() {
   );
 
   const signOut = useCallback(async () => {
-    await sendJson<void>('DELETE', SESSION);
+    await sendJson<undefined>('DELETE', SESSION);
     // What one person could read must not be shown to the next.
     await cache.mutate((key) => key !== SESSION, undefined, { revalidate: false });
     await mutate(null, { revalidate: false });

@@ -23,7 +23,7 @@ export const Equation = memo(function Equation({ tex, number, children, id }: Eq
         role="group"
         aria-label={number ? `Equation ${number}` : 'Equation'}
       >
-        <BlockMath math={tex} renderError={() => <code>{tex}</code>} />
+        <BlockMath math={withBreaks(tex)} renderError={() => <code>{tex}</code>} />
       </div>
       {number === undefined ? null : <span className="equation-number">({number})</span>}
       {children ? <div className="equation-words">{children}</div> : null}
@@ -35,3 +35,8 @@ export const Equation = memo(function Equation({ tex, number, children, id }: Eq
 export const InlineEquation = memo(function InlineEquation({ tex }: { tex: string }) {
   return <InlineMath math={tex} renderError={() => <code>{tex}</code>} />;
 });
+
+/** Lets a long product go on in a second line where the column is narrow. */
+function withBreaks(tex: string): string {
+  return tex.replaceAll('\\,', '\\,\\allowbreak ');
+}

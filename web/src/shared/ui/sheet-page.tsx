@@ -10,24 +10,34 @@ interface SheetPageProps {
   runningHead?: ReactNode;
   /** Notes that belong to the page as a whole; others stand in `MarginRow`s beside their lines. */
   margin?: ReactNode;
+  /** For pages that are mostly a table. */
+  wide?: boolean;
   children: ReactNode;
 }
 
 /** A page as a printed handbook has it: the text in a main column, and a margin for what belongs beside it. */
-export function SheetPage({ title, heading, subtitle, runningHead, margin, children }: SheetPageProps) {
+export function SheetPage({
+  title,
+  heading,
+  subtitle,
+  runningHead,
+  margin,
+  wide = false,
+  children,
+}: SheetPageProps) {
   useEffect(() => {
     document.title = `${title} · Merestone`;
   }, [title]);
   return (
-    <article className="sheet">
+    <article className={wide ? 'sheet sheet-wide' : 'sheet'}>
       {runningHead}
       <div className="sheet-columns">
         <header className="sheet-head">
           <h1>{heading ?? title}</h1>
           {subtitle ? <p className="sheet-subtitle">{subtitle}</p> : null}
         </header>
-        {margin ? <aside className="sheet-margin">{margin}</aside> : null}
         <div className="sheet-main">{children}</div>
+        {margin ? <aside className="sheet-margin">{margin}</aside> : null}
       </div>
     </article>
   );

@@ -36,7 +36,7 @@ export function QuantityField(props: QuantityFieldProps) {
     <div className={`quantity${error ? ' quantity-wrong' : ''}`}>
       <label className="quantity-label" htmlFor={id}>
         {label}
-        {symbol ? <>, {symbol}</> : null}
+        {symbol ? <>,&nbsp;{symbol}</> : null}
         {optional ? <span className="quantity-optional"> (optional)</span> : null}
       </label>
       <div className="quantity-box">

@@ -1,0 +1,109 @@
+import { Button, Input } from 'antd';
+import { useState, type SyntheticEvent } from 'react';
+import { ErrorSummary, type SummaryError } from '../../../shared/ui/error-summary';
+import { Field, describedBy } from '../../../shared/ui/fields/field';
+
+const EMAIL = 'sign-in-email';
+const PASSWORD = 'sign-in-password';
+
+interface SignInFormProps {
+  /** Signs in; a rejection carries the words that are shown. */
+  onSignIn: (email: string, password: string) => Promise<void>;
+  /** Puts a refusal into words. */
+  wordsFor: (thrown: unknown) => string;
+}
+
+/** E-mail address and password; both can be pasted and filled by a password manager. */
+export function SignInForm({ onSignIn, wordsFor }: SignInFormProps) {
+  const [email, setEmail] = useState('');
+  const [password, setPassword] = useState('');
+  const [missing, setMissing] = useState<Record<string, string>>({});
+  const [refusal, setRefusal] = useState<string | null>(null);
+  const [sending, setSending] = useState(false);
+
+  const send = async (event: SyntheticEvent) => {
+    event.preventDefault();
+    const found = whatIsMissing(email, password);
+    setMissing(found);
+    setRefusal(null);
+    if (Object.keys(found).length > 0) return;
+    setSending(true);
+    try {
+      await onSignIn(email.trim(), password);
+    } catch (thrown) {
+      setRefusal(wordsFor(thrown));
+      setSending(false);
+    }
+  };
+
+  const errors: SummaryError[] = Object.entries(missing).map(([fieldId, message]) => ({ fieldId, message }));
+  if (refusal) errors.push({ fieldId: EMAIL, message: refusal });
+  return (
+    <form className="sign-in-form" noValidate onSubmit={(event) => void send(event)}>
+      <ErrorSummary title="You are not signed in yet" errors={errors} />
+      <Field id={EMAIL} label="E-mail address" error={missing[EMAIL]}>
+        <Input
+          id={EMAIL}
+          type="email"
+          name="email"
+          autoComplete="username"
+          autoCapitalize="none"
+          spellCheck={false}
+          value={email}
+          status={missing[EMAIL] ? 'error' : ''}
+          onChange={(event) => setEmail(event.target.value)}
+          {...describedBy(EMAIL, { error: missing[EMAIL] })}
+        />
+      </Field>
+      <PasswordField password={password} onChange={setPassword} error={missing[PASSWORD]} />
+      <Button type="primary" htmlType="submit" loading={sending}>
+        Sign in
+      </Button>
+    </form>
+  );
+}
+
+interface PasswordFieldProps {
+  password: string;
+  onChange: (password: string) => void;
+  error: string | undefined;
+}
+
+function PasswordField({ password, onChange, error }: PasswordFieldProps) {
+  const [shown, setShown] = useState(false);
+  return (
+    <div className="sign-in-password">
+      <Field id={PASSWORD} label="Password" error={error}>
+        <Input
+          id={PASSWORD}
+          type={shown ? 'text' : 'password'}
+          name="password"
+          autoComplete="current-password"
+          autoCapitalize="none"
+          spellCheck={false}
+          value={password}
+          status={error ? 'error' : ''}
+          onChange={(event) => onChange(event.target.value)}
+          {...describedBy(PASSWORD, { error })}
+        />
+      </Field>
+      <label className="sign-in-show">
+        <input type="checkbox" checked={shown} onChange={(event) => setShown(event.target.checked)} />
+        Show the password
+      </label>
+    </div>
+  );
+}
+
+function whatIsMissing(email: string, password: string): Record<string, string> {
+  return {
+    ...(/^\S+@\S+$/.test(email.trim())
+      ? {}
+      : {
+          [EMAIL]: email.trim()
+            ? 'Write the whole e-mail address, with its @.'
+            : 'Write your e-mail address.',
+        }),
+    ...(password ? {} : { [PASSWORD]: 'Write your password.' }),
+  };
+}
