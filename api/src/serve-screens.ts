@@ -11,7 +11,7 @@ export function serveScreens(app: NestExpressApplication, webFolder: string): vo
   if (!existsSync(page)) return;
   app.useStaticAssets(webFolder, {
     index: false,
-    setHeaders: (response, path) => {
+    setHeaders: (response: Response, path: string) => {
       // Files under assets/ carry a hash of their content in the name.
       const lasting = path.startsWith(join(webFolder, 'assets'));
       response.setHeader('Cache-Control', lasting ? `public, max-age=${ONE_YEAR_S}, immutable` : 'no-cache');

@@ -32,7 +32,7 @@ describe('refused sign-ins', () => {
     for (const answer of answers) {
       expect(codeOf(answer)).toBe('sign-in-refused');
       expect(answer.status).toBe(401);
-      expect(answer.text).toBe(answers[0]?.text);
+      expect(answer.text).toBe(answers[0].text);
       expect(answer.headers['set-cookie']).toBeUndefined();
     }
   });

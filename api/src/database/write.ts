@@ -2,7 +2,7 @@ import { Injectable } from '@nestjs/common';
 import type { Actor } from '../common/actor.js';
 import { Clock } from '../common/clock.js';
 import type { Act } from '../journal/acts.js';
-import { appendToJournal } from '../journal/append.js';
+import { appendToJournal } from './append-to-journal.js';
 import type { JsonObject } from '../journal/entry.js';
 import { Connection, type Tx } from './connection.js';
 

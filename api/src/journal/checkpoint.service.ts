@@ -8,7 +8,7 @@ import {
 } from '@nestjs/common';
 import { Config } from '../config/config.js';
 import { Writer } from '../database/write.js';
-import { journalSize, storedNodes } from './append.js';
+import { journalSize, storedNodes } from '../database/append-to-journal.js';
 import { checkpointText } from './checkpoint-text.js';
 import { JournalRepository } from './journal.repository.js';
 import { rootHash } from './merkle-tree.js';

@@ -1,9 +1,9 @@
-import canonicalizeModule from 'canonicalize';
+import { createRequire } from 'node:module';
 import type { Actor } from '../common/actor.js';
 import type { Act } from './acts.js';
 
-// The package exports the function itself; its declaration describes a module with a default export.
-const canonicalize = canonicalizeModule as unknown as (value: unknown) => string | undefined;
+// Required, since the package's declaration promises a default export and its code is the function itself.
+const canonicalize = createRequire(import.meta.url)('canonicalize') as (value: unknown) => string | undefined;
 
 export type JsonValue = string | number | boolean | null | readonly JsonValue[] | JsonObject;
 export interface JsonObject {

@@ -1,6 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import { Connection } from '../database/connection.js';
-import { journalSize, MissingNodeError, storedNodes } from './append.js';
+import { journalSize, MissingNodeError, storedNodes } from '../database/append-to-journal.js';
 import { CheckpointService } from './checkpoint.service.js';
 import {
   checkpointsResponse,

@@ -63,10 +63,10 @@ describe('the tree of RFC 9162', () => {
     );
   });
 
-  it.each(REFERENCE_ROOTS.map((root, index) => [index + 1, root]))(
+  it.each(REFERENCE_ROOTS.map((root, index) => [index + 1, root] as const))(
     'has the reference root over %i leaves',
     (size, root) => {
-      const leaves = REFERENCE_LEAVES.slice(0, Number(size));
+      const leaves = REFERENCE_LEAVES.slice(0, size);
       expect(rootHash(leaves.length, grow(leaves).lookup).toString('hex')).toBe(root);
       expect(treeHash(leaves).toString('hex')).toBe(root);
     },

@@ -14,15 +14,16 @@ export class AccessGuard implements CanActivate {
   constructor(private readonly reflector: Reflector) {}
 
   canActivate(context: ExecutionContext): boolean {
-    const read = <T>(key: symbol): T | undefined =>
-      this.reflector.getAllAndOverride<T | undefined>(key, [context.getHandler(), context.getClass()]);
-    if (read<boolean>(PUBLIC) === true) return true;
+    const targets = [context.getHandler(), context.getClass()];
+    const says = (key: symbol): boolean =>
+      this.reflector.getAllAndOverride<boolean | undefined>(key, targets) ?? false;
+    if (says(PUBLIC)) return true;
 
     const actor = actorOf(context.switchToHttp().getRequest<Request>());
     if (actor === undefined) throw new ApiProblem('not-signed-in', 'Sign in first.');
-    if (read<boolean>(SIGNED_IN) === true) return true;
+    if (says(SIGNED_IN)) return true;
 
-    const permission = read<Permission>(PERMISSION);
+    const permission = this.reflector.getAllAndOverride<Permission | undefined>(PERMISSION, targets);
     if (permission !== undefined && hasPermission(actor.roles, permission)) return true;
     throw new ApiProblem('forbidden', 'Your roles do not allow this.', {
       log: `needs ${permission ?? 'a permission that no route declares'}`,

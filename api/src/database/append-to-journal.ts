@@ -1,10 +1,10 @@
 import { and, eq, max } from 'drizzle-orm';
 import type { Actor } from '../common/actor.js';
-import type { Reader, Tx } from '../database/connection.js';
-import { journal, journalNode } from '../database/schema/journal.js';
-import type { Act } from './acts.js';
-import { canonicalText, journalEntry, type JournalEntry, type JsonObject } from './entry.js';
-import { leafHash, nodesOnAppend, type NodeLookup } from './merkle-tree.js';
+import type { Reader, Tx } from './connection.js';
+import { journal, journalNode } from './schema/journal.js';
+import type { Act } from '../journal/acts.js';
+import { canonicalText, journalEntry, type JournalEntry, type JsonObject } from '../journal/entry.js';
+import { leafHash, nodesOnAppend, type NodeLookup } from '../journal/merkle-tree.js';
 
 /** A stored hash of the journal's tree is gone. */
 export class MissingNodeError extends Error {
