@@ -75,14 +75,17 @@ describe('inspectCorrelation', () => {
     expect(inspectCorrelation(bare({ checks }), library).passed).toBe(true);
   });
 
-  it('finds a pole inside the bounds', () => {
-    // ln(Re/35000) is zero at the upper bound, which the sample visits
-    const parts = bare().parts.map((part) => ({
-      ...part,
-      result: { ...part.result, expression: '0.023*Re^0.83/ln(Re/35000)*Sc' },
-    }));
-    const single = bare({ parts });
-    expect(remarks(single, 'range').join()).toMatch(/error: Sh has no finite value at Re = 35\u2009000/);
+  it('finds where there is no value inside the bounds: all over, or at a corner', () => {
+    const withExpression = (expression: string) =>
+      bare({ parts: bare().parts.map((part) => ({ ...part, result: { ...part.result, expression } })) });
+    // ln of a negative number below Re = 20 000, more than half of the logarithmic range
+    expect(remarks(withExpression('ln(Re - 20000)*Sc'), 'range').join()).toMatch(
+      /^error: Sh has no finite value at Re = 2000/,
+    );
+    // a pole at the upper bound, which the sample visits once
+    expect(remarks(withExpression('-Re/ln(Re/35000)*Sc'), 'range').join()).toMatch(
+      /^warning: Sh has no finite value at Re = 35\u2009000/,
+    );
   });
 
   it('tells of values that are not positive', () => {

@@ -1,4 +1,5 @@
 import type { Reckoner } from '../evaluation/reckoner.js';
+import type { BoundEnd } from '../sheet/common-schema.js';
 import { toSI } from '../quantity/unit.js';
 import { unitOf, type CompiledSheet } from '../sheet/compiled.js';
 
@@ -27,9 +28,9 @@ export function boxAround(sheet: CompiledSheet, point: Reckoner): SampleBox {
     const hi = stretches.at(-1)?.hi ? toSI(stretches.at(-1)?.hi?.value ?? 0, unit) : null;
     const from = lo ?? Math.min(here, hi ?? here) / OPEN_SIDE;
     const to = hi ?? Math.max(here, from) * OPEN_SIDE;
-    // An open limit is not part of the range: start a hair inside it.
-    const inset = first.lo?.closed === false ? (to - from) * OPEN_INSET : 0;
-    return [{ symbol: on, lo: from + inset, hi: to }];
+    // An open limit is not part of the range: stay a hair inside it.
+    const inset = (end: BoundEnd | undefined) => (end?.closed === false ? (to - from) * OPEN_INSET : 0);
+    return [{ symbol: on, lo: from + inset(first.lo), hi: to - inset(stretches.at(-1)?.hi) }];
   });
   const varied = new Set(sides.map(({ symbol }) => symbol));
   const held = new Map<string, number>();
