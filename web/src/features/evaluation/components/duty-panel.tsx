@@ -6,6 +6,7 @@ import { hasContent } from '../hooks/use-duty';
 import { fieldId } from '../model/field-id';
 import type { DutyControls } from './duty-controls';
 import { DutySection } from './duty-section';
+import { ForceSection } from './force-section';
 import { ModeSwitch } from './mode-switch';
 import './duty-panel.css';
 
@@ -48,6 +49,7 @@ export function DutyPanel({ evaluation, notInUse }: DutyPanelProps) {
       {sections.map((section) => (
         <DutySection key={section.key} section={section} controls={controls} />
       ))}
+      <ForceSection controls={controls} />
       <div className="duty-acts">
         <Button
           type="primary"

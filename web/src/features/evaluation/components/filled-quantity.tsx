@@ -2,6 +2,7 @@ import type { ReactNode } from 'react';
 import { formatUnit } from '../../../shared/format/format-unit';
 import { lowerFirst } from '../../../shared/format/lower-first';
 import { Figure } from '../../../shared/ui/figure';
+import { LabelWords } from '../../../shared/ui/quantity-field/label-words';
 import type { EquationInUse, FormField } from '../model/duty-form';
 import { fieldId } from '../model/field-id';
 import type { FilledValue } from '../model/filled-values';
@@ -20,7 +21,7 @@ export function FilledQuantity({ field, equation, filled, symbol }: FilledQuanti
   return (
     <div className="quantity">
       <span className="quantity-label" id={`${id}-label`}>
-        {field.label}, {symbol}
+        <LabelWords label={field.label} symbol={symbol} />
       </span>
       <output
         className="quantity-box filled-box"

@@ -2,8 +2,21 @@ import type { Finding } from '@merestone/engine';
 import { Link } from 'react-router-dom';
 import { paths } from '../../../shared/paths';
 
+interface FindingTextProps {
+  finding: Finding;
+  /** The reason on record for using the sheet there all the same. */
+  deviation?: string | undefined;
+}
+
 /** A finding in its own words, with the sheets that are named as holding on the other side. */
-export function FindingText({ finding }: { finding: Finding }) {
+export function FindingText({ finding, deviation }: FindingTextProps) {
+  if (deviation !== undefined)
+    return (
+      <p>
+        {firstSentence(finding.message)} Used all the same under a deviation, for the reason on record: “
+        {deviation}”
+      </p>
+    );
   return (
     <p>
       {finding.message}
@@ -22,4 +35,9 @@ export function FindingText({ finding }: { finding: Finding }) {
       ) : null}
     </p>
   );
+}
+
+/** What is so, without the advice that follows it. */
+function firstSentence(message: string): string {
+  return message.split(/(?<=\.)\s+(?=\p{Lu})/u)[0] ?? message;
 }

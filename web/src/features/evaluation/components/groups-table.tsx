@@ -2,9 +2,11 @@ import type { CorrelationDefinition, Numbers } from '@merestone/engine';
 import { Figure } from '../../../shared/ui/figure';
 import { SetTable } from '../../../shared/ui/set-table';
 import { SymbolMark } from '../../../shared/ui/symbol-mark';
+import { Mark } from './mark';
 
 interface GroupsTableProps {
   numbers: Numbers;
+  mark: string | null;
   definition: CorrelationDefinition;
 }
 
@@ -13,10 +15,12 @@ interface Row {
   name: string;
   value: number;
   unit: string;
+  /** Whether it rests on the formula, and so on a deviation where there is one. */
+  derived: boolean;
 }
 
 /** Groups, named steps and results with their values. */
-export function GroupsTable({ numbers, definition }: GroupsTableProps) {
+export function GroupsTable({ numbers, mark, definition }: GroupsTableProps) {
   const rows = rowsOf(numbers, definition);
   return (
     <SetTable label="Groups and results">
@@ -30,14 +34,14 @@ export function GroupsTable({ numbers, definition }: GroupsTableProps) {
         </tr>
       </thead>
       <tbody>
-        {rows.map(({ symbol, name, value, unit }) => (
+        {rows.map(({ symbol, name, value, unit, derived }) => (
           <tr key={symbol}>
             <th scope="row">
               <SymbolMark symbol={symbol} />
             </th>
             <td>{name}</td>
             <td className="number">
-              <Figure value={value} unit={unit} />
+              <Figure value={value} unit={unit} /> {derived ? <Mark words={mark} /> : null}
             </td>
           </tr>
         ))}
@@ -52,18 +56,21 @@ function rowsOf(numbers: Numbers, definition: CorrelationDefinition): Row[] {
     name: definition.groups.find((group) => group.symbol === symbol)?.name ?? 'group',
     value,
     unit: '1',
+    derived: false,
   }));
   const steps = Object.entries(numbers.intermediates).map(([symbol, { value, unit }]) => ({
     symbol,
     name: definition.intermediates?.find((line) => line.symbol === symbol)?.name ?? 'step',
     value,
     unit,
+    derived: true,
   }));
   const results = numbers.parts.map(({ title, result }) => ({
     symbol: result.symbol,
     name: numbers.parts.length > 1 ? title : (KINDS[kindOf(definition, result.symbol)] ?? title),
     value: result.value,
     unit: result.unit,
+    derived: true,
   }));
   return [...groups, ...steps, ...results];
 }

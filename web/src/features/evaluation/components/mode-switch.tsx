@@ -4,6 +4,9 @@ import { useMemo } from 'react';
 import type { Duty, DutyChange, DutyMode } from '../model/duty';
 import { givenGroups } from '../model/given-groups';
 
+/** More names than this say less than one word for them all. */
+const MANY = 3;
+
 interface ModeSwitchProps {
   definition: CorrelationDefinition;
   duty: Duty;
@@ -30,7 +33,7 @@ export function ModeSwitch({ definition, duty, change }: ModeSwitchProps) {
     <fieldset className="duty-mode">
       <legend className="heard-only">What do you have?</legend>
       {choice('quantities', 'I have the quantities')}
-      {choice('groups', `I have ${inWords(names)}`)}
+      {choice('groups', names.length > MANY ? 'I have the groups' : `I have ${inWords(names)}`)}
     </fieldset>
   );
 }

@@ -5,7 +5,7 @@ import type { Shown } from '../model/shown-outcome';
 import { BasesTable } from './bases-table';
 import { CopyButton } from './copy-button';
 import { FindingText } from './finding-text';
-import { FluxForm } from './flux-form';
+import { FluxLine } from './flux-line';
 import { GroupsTable } from './groups-table';
 import { Headline } from './headline';
 import { Provenance } from './provenance';
@@ -20,36 +20,30 @@ interface ResultViewProps {
 
 /** A number with everything that belongs to it: mark, groups, bases, flux, findings, steps and where it comes from. */
 export function ResultView({ shown, evaluation, firstNumber }: ResultViewProps) {
-  const { sheet, duty, change, errors } = evaluation;
+  const { sheet } = evaluation;
   const { outcome } = shown;
   const mark = outcome.outcome === 'deviating' ? outcome.mark : null;
   const notable = notableFindings(outcome.findings);
+  const reasons = new Map(
+    outcome.outcome === 'deviating' ? outcome.deviations.map(({ symbol, reason }) => [symbol, reason]) : [],
+  );
   return (
     <div className={mark ? 'result result-marked' : 'result'}>
       <h2>Result</h2>
       <RecordLine shown={shown} />
       <Headline numbers={outcome} request={shown.request} mark={mark} definition={sheet.definition} />
       {notable.map((finding) => (
-        <FindingText key={finding.symbol} finding={finding} />
+        <FindingText key={finding.symbol} finding={finding} deviation={reasons.get(finding.symbol)} />
       ))}
-      {outcome.outcome === 'deviating' ? (
-        <ul className="result-reasons">
-          {outcome.deviations.map(({ symbol, reason }) => (
-            <li key={symbol}>
-              Deviation on {symbol}, reason on record: “{reason}”
-            </li>
-          ))}
-        </ul>
-      ) : null}
       {outcome.remarks.map((remark) => (
         <p key={remark}>{sentence(remark)}</p>
       ))}
+      {outcome.flux ? <FluxLine flux={outcome.flux} mark={mark} /> : null}
       <div className="result-acts">
         <CopyButton text={() => copyText({ sheet, shown })}>Copy as text</CopyButton>
       </div>
-      <GroupsTable numbers={outcome} definition={sheet.definition} />
+      <GroupsTable numbers={outcome} mark={mark} definition={sheet.definition} />
       <BasesTable numbers={outcome} mark={mark} />
-      <FluxForm force={duty.force} flux={outcome.flux} mark={mark} errors={errors} change={change} />
       <StepsList steps={outcome.steps} firstNumber={firstNumber} mark={mark} />
       <Provenance shown={shown} sheet={sheet} />
     </div>

@@ -6,7 +6,7 @@ import { findingsOf, numbersOf, type Shown } from './shown-outcome';
 export interface Readings {
   findings: Finding[];
   /** By symbol, in the symbol's unit on the sheet. */
-  values: Record<string, { value: number; unit: string }>;
+  values: Record<string, { value: number; unit: string; given?: boolean }>;
 }
 
 /** What the sheet's strips and its table of symbols show of the duty: never a number that was refused. */
@@ -20,10 +20,11 @@ export function readingsOf(
   for (const { symbol, unit } of definition.quantities) {
     const given = inputs[symbol] ?? filled.get(symbol);
     const value = given ? convert(given.value, given.unit ?? unit, unit) : null;
-    if (value !== null) values[symbol] = { value, unit };
+    if (value !== null) values[symbol] = { value: tidy(value), unit, given: Object.hasOwn(inputs, symbol) };
   }
   const findings = findingsOf(shown);
-  for (const { symbol, value, unit } of findings) if (value !== null) values[symbol] = { value, unit };
+  for (const { symbol, value, unit } of findings)
+    if (value !== null && !values[symbol]) values[symbol] = { value, unit };
   const numbers = numbersOf(shown);
   if (numbers) {
     for (const [symbol, value] of Object.entries(numbers.groups)) values[symbol] = { value, unit: '1' };
@@ -34,4 +35,9 @@ export function readingsOf(
     }
   }
   return { findings, values };
+}
+
+/** Without the noise that a change of unit leaves in the last bits. */
+function tidy(value: number): number {
+  return Number(value.toPrecision(12));
 }

@@ -5,12 +5,14 @@ import {
   type CorrelationDefinition,
   type Finding,
 } from '@merestone/engine';
+import { Fragment } from 'react';
 import type { Sheet } from '../../../shared/api/types';
 import { BoundStrip } from '../../../shared/ui/bound-strip/bound-strip';
 import { InlineEquation } from '../../../shared/ui/equation';
 import { MarginNote } from '../../../shared/ui/margin-note';
 import { MarginRow } from '../../../shared/ui/sheet-page';
 import type { LiveReadings } from '../model/live-readings';
+import { MarkedText } from './marked-text';
 import { boundWords } from '../model/plain-words';
 import { sentence } from '../model/sentence';
 
@@ -39,16 +41,21 @@ export function BoundsSection({ sheet, live }: BoundsSectionProps) {
 }
 
 function BoundNotes({ definition }: { definition: CorrelationDefinition }) {
-  const { restrictions, bounds } = definition;
-  const told = bounds.filter((bound) => bound.place !== undefined || bound.note !== undefined);
+  const { restrictions, cautions } = definition;
+  const told = placesOf(definition.bounds);
   return (
     <>
       {told.length > 0 ? (
         <MarginNote title="Bounds">
-          {told.map(({ on, place, note }) => (
-            <p key={on}>
-              <InlineEquation tex={symbolOf(definition, on).tex} />:{' '}
-              {[place, note].filter(Boolean).map(sentence).join(' ')}
+          {told.map(([text, symbols]) => (
+            <p key={text}>
+              {symbols.map((on, i) => (
+                <Fragment key={on}>
+                  {i > 0 ? ', ' : ''}
+                  <InlineEquation tex={symbolOf(definition, on).tex} />
+                </Fragment>
+              ))}
+              : <MarkedText text={text} />
             </p>
           ))}
         </MarginNote>
@@ -56,12 +63,29 @@ function BoundNotes({ definition }: { definition: CorrelationDefinition }) {
       {restrictions.length > 0 ? (
         <MarginNote title="Only for">
           {restrictions.map((restriction) => (
-            <p key={restriction}>{sentence(restriction)}</p>
+            <p key={restriction}>
+              <MarkedText text={sentence(restriction)} />
+            </p>
           ))}
         </MarginNote>
       ) : null}
+      {cautions.map((caution) => (
+        <MarginNote key={caution} title="Mind">
+          <MarkedText text={sentence(caution)} />
+        </MarginNote>
+      ))}
     </>
   );
+}
+
+/** Where the bounds stand in their sources; the same words once for all symbols they are about. */
+function placesOf(bounds: readonly Bound[]): [string, string[]][] {
+  const told = new Map<string, string[]>();
+  for (const { on, basis, place, note } of bounds) {
+    const text = [place, note].filter(Boolean).map(sentence).join(' ');
+    if (text && basis !== 'none') told.set(text, [...(told.get(text) ?? []), on]);
+  }
+  return [...told];
 }
 
 interface BoundLineProps {

@@ -6,6 +6,7 @@ import { Equation, InlineEquation } from '../../../shared/ui/equation';
 import { MarginNote } from '../../../shared/ui/margin-note';
 import { MarginRow } from '../../../shared/ui/sheet-page';
 import { VERIFICATION_WORDS } from '../model/plain-words';
+import { MarkedText } from './marked-text';
 import { SourceNotes } from './source-notes';
 
 interface EquationsSectionProps {
@@ -35,7 +36,9 @@ function EquationNotes({ sheet }: { sheet: Sheet }) {
       <SourceNotes sources={sources} />
       <MarginNote title="Verification">
         <p>{VERIFICATION_WORDS[verification.status]}</p>
-        <p>{verification.note}</p>
+        <p>
+          <MarkedText text={verification.note} />
+        </p>
       </MarginNote>
       {sheet.approval ? (
         <MarginNote title="Approved">

@@ -9,7 +9,6 @@ import type { LiveReadings } from '../model/live-readings';
 import { inWords } from '../model/in-words';
 import { BoundsSection } from './bounds-section';
 import { ChecksSection } from './checks-section';
-import { DutySection } from './duty-section';
 import { EquationsSection } from './equations-section';
 import { HistorySection } from './history-section';
 import { PropertyEquationsSection } from './property-equations-section';
@@ -53,7 +52,10 @@ export function SheetArticle({ sheet, live, duty, outcome }: SheetArticleProps) 
       <StandingNotice sheet={sheet} />
       <EquationsSection sheet={sheet} tex={tex} />
       <BoundsSection sheet={sheet} live={live} />
-      <DutySection definition={definition}>{duty}</DutySection>
+      <section aria-labelledby="your-duty">
+        <h2 id="your-duty">Your duty</h2>
+        {duty}
+      </section>
       {outcome(equations + 1)}
       <SymbolsSection definition={definition} tex={tex} live={live} />
       <PropertyEquationsSection equations={sheet.equations} />

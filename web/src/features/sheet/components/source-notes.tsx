@@ -4,18 +4,31 @@ import { formatCitation } from '../model/format-citation';
 import { READ_WORDS } from '../model/plain-words';
 import { sentence } from '../model/sentence';
 
-/** Each source with the place in it, what it gave, and whether anybody has read it for this sheet. */
+/** The first source with the place in it, what it gave, and whether anybody has read it; further ones folded under it. */
 export function SourceNotes({ sources }: { sources: readonly Source[] }) {
-  return sources.map((source, i) => (
-    <MarginNote
-      key={`${source.csl.title ?? ''}${source.place}`}
-      title={sources.length > 1 ? `Source ${i + 1}` : 'Source'}
-    >
-      <p>
-        <Citation source={source} /> {sentence(source.gives)} {READ_WORDS[source.read]}
-      </p>
+  const [first, ...others] = sources;
+  if (!first) return null;
+  return (
+    <MarginNote title="Source">
+      <SourceText source={first} />
+      {others.length > 0 ? (
+        <details className="more-sources">
+          <summary>{others.length === 1 ? 'One more source' : `${others.length} more sources`}</summary>
+          {others.map((source) => (
+            <SourceText key={`${source.csl.title ?? ''}${source.place}`} source={source} />
+          ))}
+        </details>
+      ) : null}
     </MarginNote>
-  ));
+  );
+}
+
+function SourceText({ source }: { source: Source }) {
+  return (
+    <p>
+      <Citation source={source} /> {sentence(source.gives)} {READ_WORDS[source.read]}
+    </p>
+  );
 }
 
 /** A citation as a reference list has it, the place in the source behind it. */
@@ -24,7 +37,7 @@ export function Citation({ source }: { source: Source }) {
   return (
     <>
       {before} <i>{work}</i>
-      {after.startsWith(',') || after === '.' ? after : ` ${after}`} {source.place.replace(/\.$/, '')}.
+      {after}; {source.place.replace(/\.$/, '')}.
       {doi ? (
         <>
           {' '}

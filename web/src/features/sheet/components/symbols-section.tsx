@@ -13,7 +13,8 @@ import { MarginNote } from '../../../shared/ui/margin-note';
 import { SetTable } from '../../../shared/ui/set-table';
 import { MarginRow } from '../../../shared/ui/sheet-page';
 import type { LiveReadings } from '../model/live-readings';
-import { AVERAGING_WORDS, FORCE_WORDS, WALL_WORDS, accuracyText } from '../model/plain-words';
+import { MarkedText } from './marked-text';
+import { AVERAGING_WORDS, FORCE_WORDS, STATE_WORDS, WALL_WORDS, accuracyText } from '../model/plain-words';
 
 interface SymbolsSectionProps {
   definition: CorrelationDefinition;
@@ -53,7 +54,9 @@ export const SymbolsSection = memo(function SymbolsSection({ definition, tex, li
                 </th>
                 <td>{row.meaning}</td>
                 <td className="unit">{formatUnit(row.unit) || '1'}</td>
-                <td className="number">{reading ? <Figure value={reading.value} /> : null}</td>
+                <td className="number">
+                  {reading ? <Figure value={reading.value} exactly={reading.given ?? false} /> : null}
+                </td>
               </tr>
             );
           })}
@@ -68,8 +71,11 @@ function SymbolNotes({ definition }: { definition: CorrelationDefinition }) {
   const sentence = [AVERAGING_WORDS[averaging], WALL_WORDS[wall], FORCE_WORDS[drivingForce]].join('; ');
   return (
     <>
+      <MarginNote title="Property state">{STATE_WORDS[definition.propertyState]}</MarginNote>
       <MarginNote title="Meant as">{`${sentence.charAt(0).toUpperCase()}${sentence.slice(1)}.`}</MarginNote>
-      <MarginNote title="Accuracy">{accuracyText(accuracy)}</MarginNote>
+      <MarginNote title="Accuracy">
+        <MarkedText text={accuracyText(accuracy)} />
+      </MarginNote>
     </>
   );
 }

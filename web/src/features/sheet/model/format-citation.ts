@@ -5,6 +5,7 @@ export interface Citation {
   before: string;
   /** Journal or book. */
   work: string;
+  /** Volume, pages, edition, publisher; without a full stop. */
   after: string;
   doi: string | null;
 }
@@ -23,14 +24,6 @@ export function formatCitation(item: CslItem): Citation {
   };
 }
 
-/** The same as one line of text. */
-export function citationText(item: CslItem): string {
-  const { before, work, after } = formatCitation(item);
-  return [before, work + (after.startsWith(',') ? '' : ' ') + after]
-    .filter((part) => part.trim() !== '')
-    .join(' ');
-}
-
 function authors(people: NonNullable<CslItem['author']>): string {
   const names = people.map(
     ({ family, given, literal }) => literal ?? [family, given].filter(Boolean).join(', '),
@@ -39,16 +32,15 @@ function authors(people: NonNullable<CslItem['author']>): string {
   return names.length < 2 ? last : `${names.slice(0, -1).join('; ')} and ${last}`;
 }
 
+/** What follows the work's title, without a full stop: ` 26 (5), 516–523` or `, ed. 3, Wiley`. */
 function tail({ volume, issue, page, edition, publisher }: CslItem): string {
-  const place = [
-    volume === undefined ? '' : `${volume}${issue === undefined ? '' : ` (${issue})`}`,
+  const number = volume === undefined ? '' : ` ${volume}${issue === undefined ? '' : ` (${issue})`}`;
+  const rest = [
     page === undefined ? '' : page.replace(/-+/g, '–'),
     edition === undefined ? '' : editionText(edition),
     publisher ?? '',
   ].filter(Boolean);
-  return place.length === 0
-    ? '.'
-    : `${volume === undefined ? ',' : ''} ${place.join(', ')}.`.replace(/^ /, '');
+  return rest.length === 0 ? number : `${number}, ${rest.join(', ')}`;
 }
 
 function editionText(edition: string | number): string {

@@ -1,6 +1,7 @@
 import { Input } from 'antd';
 import { useState, type ReactNode } from 'react';
 import { formatUnit } from '../../format/format-unit';
+import { LabelWords } from './label-words';
 import { parseTypedNumber } from './parse-typed-number';
 import { QuantityQuestion } from './quantity-question';
 import { withUnit, type TypedQuantity } from './typed-quantity';
@@ -35,8 +36,7 @@ export function QuantityField(props: QuantityFieldProps) {
   return (
     <div className={`quantity${error ? ' quantity-wrong' : ''}`}>
       <label className="quantity-label" htmlFor={id}>
-        {label}
-        {symbol ? <>,&nbsp;{symbol}</> : null}
+        <LabelWords label={label} symbol={symbol} />
         {optional ? <span className="quantity-optional"> (optional)</span> : null}
       </label>
       <div className="quantity-box">
