@@ -1,5 +1,12 @@
 import { Module, type DynamicModule } from '@nestjs/common';
 import { APP_GUARD } from '@nestjs/core';
+import { CandidatesModule } from './candidates/candidates.module.js';
+import { CorrelationsModule } from './correlations/correlations.module.js';
+import { SeedModule } from './database/seed/seed.module.js';
+import { EvaluationsModule } from './evaluations/evaluations.module.js';
+import { GeometriesModule } from './geometries/geometries.module.js';
+import { PropertyEquationsModule } from './property-equations/property-equations.module.js';
+import { ReviewsModule } from './reviews/reviews.module.js';
 import { AccessGuard } from './common/access/access.guard.js';
 import type { Config } from './config/config.js';
 import { ConfigModule } from './config/config.module.js';
@@ -12,7 +19,21 @@ import { SessionModule } from './session/session.module.js';
 
 /** The whole server. Each feature is a module of its own. */
 @Module({
-  imports: [DatabaseModule, HealthModule, JournalModule, MailModule, PeopleModule, SessionModule],
+  imports: [
+    DatabaseModule,
+    HealthModule,
+    JournalModule,
+    MailModule,
+    PeopleModule,
+    SessionModule,
+    SeedModule,
+    CandidatesModule,
+    CorrelationsModule,
+    EvaluationsModule,
+    GeometriesModule,
+    PropertyEquationsModule,
+    ReviewsModule,
+  ],
   providers: [{ provide: APP_GUARD, useClass: AccessGuard }],
 })
 export class AppModule {

@@ -7,8 +7,12 @@ import { ConfigError, readConfig } from './config/read-config.js';
 import type { Config } from './config/config.js';
 import { configureApp } from './configure-app.js';
 import { DATABASE_FILE } from './database/database.provider.js';
+import { SeedService } from './database/seed/seed.service.js';
 import { setAsideUnfinished } from './database/set-aside-unfinished.js';
 import { greeting } from './greeting.js';
+
+// Whatever is written is for the server's own account: the database, its keys and its backups.
+process.umask(0o077);
 
 try {
   await start(readConfig(process.env));
@@ -29,6 +33,7 @@ async function start(config: Config): Promise<void> {
   });
   configureApp(app);
   await app.init();
+  await app.get(SeedService).fill(config.demo);
   await app.listen(config.port);
   process.stdout.write(greeting(app));
 }

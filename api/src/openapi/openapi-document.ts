@@ -2,6 +2,7 @@ import type { INestApplication } from '@nestjs/common';
 import { DocumentBuilder, SwaggerModule, type OpenAPIObject } from '@nestjs/swagger';
 import type { Config } from '../config/config.js';
 import { readBuildInfo } from '../health/build-info.js';
+import { DEFINITION_SCHEMAS } from '../revisions/dto/definition-schema.js';
 import { sessionCookieName } from '../session/session-cookie.js';
 import { ProblemResponse } from './problem-response.dto.js';
 
@@ -25,7 +26,13 @@ export function openApiDocument(app: INestApplication, config: Config): OpenAPIO
       content: { 'application/problem+json': { schema: { $ref: '#/components/schemas/ProblemResponse' } } },
     })
     .build();
-  return SwaggerModule.createDocument(app, options, { extraModels: [ProblemResponse] });
+  const document = SwaggerModule.createDocument(app, options, { extraModels: [ProblemResponse] });
+  // The sheet formats are the engine's own schemas; no class repeats them.
+  document.components = {
+    ...document.components,
+    schemas: { ...document.components?.schemas, ...DEFINITION_SCHEMAS },
+  };
+  return document;
 }
 
 /** Serves the contract at /api/openapi.json and a page to read and try it at /api/docs, both from here alone. */

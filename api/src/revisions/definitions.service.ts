@@ -1,5 +1,10 @@
 import { Injectable } from '@nestjs/common';
-import type { CompiledCorrelation, CompiledEquation } from '@merestone/engine';
+import type {
+  CompiledCorrelation,
+  CompiledEquation,
+  CorrelationDefinition,
+  PropertyEquationDefinition,
+} from '@merestone/engine';
 import { readCorrelation, readPropertyEquation } from './definition-check.js';
 import { RevisionRepository } from './revision.repository.js';
 import type { RevisionRecord } from './revision-record.js';
@@ -24,6 +29,13 @@ export class DefinitionsService {
     return recall(this.equations, `${record.slug} ${record.hash}`, () =>
       readPropertyEquation(record.slug, this.stored(record)),
     );
+  }
+
+  /** The definition alone, of whichever kind. */
+  definition(record: RevisionRecord): CorrelationDefinition | PropertyEquationDefinition {
+    return record.kind === 'correlation'
+      ? this.correlation(record).definition
+      : this.equation(record).definition;
   }
 
   private stored(record: RevisionRecord): unknown {

@@ -95,6 +95,14 @@ export function mayApprove(
   );
 }
 
+/** What an approval does to the revision approved before. */
+export function maySupersede(actor: Actor, revision: RevisionFacts): Decision {
+  return first(
+    holds(actor, 'correlation.approve'),
+    inStanding(revision, ['approved'], 'Only an approved revision can be superseded.'),
+  );
+}
+
 export function maySuspend(actor: Actor, revision: RevisionFacts): Decision {
   return first(
     holds(actor, 'correlation.suspend'),

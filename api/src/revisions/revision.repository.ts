@@ -2,21 +2,15 @@ import { Injectable } from '@nestjs/common';
 import { and, asc, desc, eq, sql, type SQL } from 'drizzle-orm';
 import type { Actor } from '../common/actor.js';
 import type { Authorized } from '../common/authorized.js';
-import type { Standing, WithdrawalClass } from '../common/standing.js';
 import { Connection, type Reader, type Tx } from '../database/connection.js';
 import { correlation, propertyEquation } from '../database/schema/register-entry.js';
 import { revision, revisionContent, revisionNow, standingEvent } from '../database/schema/revision.js';
 import { visibleTo } from '../database/visible-to.js';
 import type { Content } from './content.js';
+import type { NewStanding } from './new-standing.js';
 import type { RevisionKey, RevisionRecord, SubjectKind } from './revision-record.js';
 import { sightOf } from './revision.policy.js';
 import type { SearchText } from './search-text.js';
-
-export interface NewStanding {
-  readonly standing: Standing;
-  readonly note?: string | undefined;
-  readonly withdrawalClass?: WithdrawalClass | undefined;
-}
 
 @Injectable()
 export class RevisionRepository {

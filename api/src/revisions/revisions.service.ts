@@ -5,8 +5,9 @@ import type { Authorized } from '../common/authorized.js';
 import { ApiProblem } from '../common/problem.js';
 import type { Reader, Tx } from '../database/connection.js';
 import type { Content } from './content.js';
+import type { NewStanding } from './new-standing.js';
 import type { RevisionKey, RevisionRecord, SubjectKind } from './revision-record.js';
-import { RevisionRepository, type NewStanding } from './revision.repository.js';
+import { RevisionRepository } from './revision.repository.js';
 import type { SearchText } from './search-text.js';
 
 const NOUN: Record<SubjectKind, string> = {
