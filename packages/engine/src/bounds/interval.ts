@@ -14,6 +14,7 @@ export interface Interval {
   hiClosed: boolean;
 }
 
+/** Whether a value lies in an interval; on a limit only where that is closed. */
 export function holds(value: number, { lo, hi, loClosed, hiClosed }: Interval): boolean {
   if (lo !== undefined && compareWithLimit(value, lo) < (loClosed ? 0 : 1)) return false;
   return !(hi !== undefined && compareWithLimit(value, hi) > (hiClosed ? 0 : -1));
@@ -24,7 +25,8 @@ export function apart(a: Interval, b: Interval): boolean {
   return endsBefore(a, b) || endsBefore(b, a);
 }
 
-function endsBefore(a: Interval, b: Interval): boolean {
+/** Whether every value of the first lies below every value of the second. */
+export function endsBefore(a: Interval, b: Interval): boolean {
   if (a.hi === undefined || b.lo === undefined) return false;
   return a.hi < b.lo || (a.hi === b.lo && !(a.hiClosed && b.loClosed));
 }

@@ -1,10 +1,11 @@
 import { serves } from '../quantity/dictionary.js';
-import { fromSI, toSI } from '../quantity/unit.js';
-import type {
-  CompiledEquation,
-  CompiledQuantity,
-  CompiledSheet,
-  PropertyLibrary,
+import { fromSI, measuresSame, toSI } from '../quantity/unit.js';
+import {
+  unitOf,
+  type CompiledEquation,
+  type CompiledQuantity,
+  type CompiledSheet,
+  type PropertyLibrary,
 } from '../sheet/compiled.js';
 import { PROPERTY_ANSWER } from '../sheet/lines.js';
 import { ownValue } from './given-values.js';
@@ -110,7 +111,7 @@ function rowValue(
   const { table: name, symbol } = quantity.definition;
   if (!name) return null;
   const key = ownValue(rows, `${prefix}${name}`) ?? ownValue(rows, name);
-  const value = sheet.tables.get(name)?.rows.find((row) => row.key === key)?.values[symbol];
+  const value = ownValue(sheet.tables.get(name)?.rows.find((row) => row.key === key)?.values, symbol);
   return value === undefined || key === undefined
     ? null
     : { value: toSI(value, quantity.unit), name: `${prefix}${name}`, key };
@@ -135,12 +136,22 @@ function checkEquations(
     const quantity = sheet.quantities.get(symbol);
     if (!quantity)
       return [{ code: 'unknown-symbol', field, message: `There is no quantity ${symbol} to be filled.` }];
-    if (!quantity.definition.equations?.includes(slug) || !library(slug))
+    const equation = library(slug);
+    if (!quantity.definition.equations?.includes(slug) || !equation)
       return [
         {
           code: 'unknown-equation',
           field,
           message: `"${slug}" is not a property equation this sheet lists for ${symbol}.`,
+        },
+      ];
+    const answer = unitOf(equation.sheet, PROPERTY_ANSWER);
+    if (!answer || !measuresSame(answer, quantity.unit))
+      return [
+        {
+          code: 'unknown-equation',
+          field,
+          message: `"${slug}" gives ${equation.definition.gives} in ${equation.definition.unit}, which is no value for ${symbol}.`,
         },
       ];
     if (Object.hasOwn(request.inputs, symbol))

@@ -1,8 +1,8 @@
 import type { Problem } from '../evaluation/outcome.js';
-import { apart, type Interval } from '../bounds/interval.js';
+import { endsBefore, type Interval } from '../bounds/interval.js';
 import { definition } from './check-symbols.js';
 import type { Bound, Piece, Stretch } from './common-schema.js';
-import type { Calculable } from './lines.js';
+import { memberPath, type Calculable } from './lines.js';
 import { piecesApart } from './piece-intervals.js';
 
 /** Bounds stand on known symbols, are ordered and not empty; pieces do not overlap. */
@@ -18,7 +18,8 @@ export function checkBounds(calculable: Calculable): Problem[] {
     seen.add(bound.on);
     problems.push(...checkStretches(bound, field));
   }
-  for (const line of calculable.lines) problems.push(...checkPieces(line.pieces ?? [], line.path, known));
+  for (const line of calculable.lines)
+    problems.push(...checkPieces(line.pieces ?? [], memberPath(line, 'pieces'), known));
   return problems;
 }
 
@@ -44,8 +45,8 @@ function checkStretch(stretch: Stretch, next: Stretch | undefined, field: string
   ] as const)
     if (end?.reach !== undefined && end.nature !== 'data')
       problems.push(definition(`${field}.${side}.reach`, 'Only a bound of data has a reach.'));
-  if (next && !(hi && next.lo && (hi.value < next.lo.value || apart(span(stretch), span(next)))))
-    problems.push(definition(field, 'Stretches ascend and do not touch.'));
+  if (next && !endsBefore(span(stretch), span(next)))
+    problems.push(definition(field, 'Stretches ascend and share no value.'));
   return problems;
 }
 
@@ -57,7 +58,7 @@ function checkPieces(pieces: Piece[], path: string, known: ReadonlySet<string>):
   const problems: Problem[] = [];
   for (const [i, piece] of pieces.entries()) {
     for (const [j, { on, lo, hi }] of piece.when.entries()) {
-      const field = `${path}.pieces[${i}].when[${j}]`;
+      const field = `${path}[${i}].when[${j}]`;
       if (!known.has(on)) problems.push(definition(`${field}.on`, `There is no symbol ${on}.`));
       if (lo === undefined && hi === undefined)
         problems.push(definition(field, 'A condition has one limit at least.'));
@@ -66,7 +67,7 @@ function checkPieces(pieces: Piece[], path: string, known: ReadonlySet<string>):
     }
     for (const [j, other] of pieces.entries())
       if (j > i && !piecesApart(piece, other))
-        problems.push(definition(`${path}.pieces[${j}].when`, `Pieces ${i + 1} and ${j + 1} overlap.`));
+        problems.push(definition(`${path}[${j}].when`, `Pieces ${i + 1} and ${j + 1} overlap.`));
   }
   return problems;
 }

@@ -4,13 +4,13 @@ import { isConstant } from '../quantity/constants.js';
 import { QUANTITIES } from '../quantity/dictionary.js';
 import { dimensionText, sameDimension } from '../quantity/dimension.js';
 import { measuresSame, readUnit } from '../quantity/unit.js';
-import type { Calculable } from './lines.js';
+import { memberPath, type Calculable } from './lines.js';
 
 /** Every symbol is defined once, is not reserved, has a unit that can be read, and fits its dictionary entry. */
 export function checkSymbols(calculable: Calculable): Problem[] {
   const places = [
     ...calculable.quantities.map(({ symbol }, i) => ({ symbol, field: `quantities[${i}].symbol` })),
-    ...calculable.lines.map(({ symbol, path }) => ({ symbol, field: `${path}.symbol` })),
+    ...calculable.lines.map((line) => ({ symbol: line.symbol, field: memberPath(line, 'symbol') })),
   ];
   const seen = new Map<string, string>();
   const problems: Problem[] = [];
@@ -43,9 +43,10 @@ function checkUnits({ quantities, lines }: Calculable): Problem[] {
           : `${symbol} in ${unit} is ${dimensionText(reading.unit.dimension)}; ${is} is ${dimensionText(own.unit.dimension)}.`,
       });
   }
-  for (const { unit, path } of lines) {
-    const reading = readUnit(unit);
-    if (!reading.ok) problems.push({ code: 'unit', field: `${path}.unit`, message: `${reading.reason}.` });
+  for (const line of lines) {
+    const reading = readUnit(line.unit);
+    if (!reading.ok)
+      problems.push({ code: 'unit', field: memberPath(line, 'unit'), message: `${reading.reason}.` });
   }
   return problems;
 }

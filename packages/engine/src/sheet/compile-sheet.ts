@@ -2,7 +2,7 @@ import { compileTree, type Run, type SymbolReading } from '../expression/compile
 import type { Problem } from '../evaluation/outcome.js';
 import { CONSTANTS, isConstant } from '../quantity/constants.js';
 import { QUANTITIES } from '../quantity/dictionary.js';
-import { readUnit, type Unit } from '../quantity/unit.js';
+import { measuresSame, readUnit, type Unit } from '../quantity/unit.js';
 import { checkBounds } from './check-bounds.js';
 import { checkDimensions } from './check-dimensions.js';
 import { checkSymbols, definition } from './check-symbols.js';
@@ -33,7 +33,7 @@ export function compilePropertyEquation(
   key: string,
   equation: PropertyEquationDefinition,
 ): Compilation<CompiledEquation> {
-  const result = compileSheet(linesOfPropertyEquation(equation), []);
+  const result = compileSheet(linesOfPropertyEquation(equation), giftProblems(equation));
   return result.ok ? { ok: true, compiled: { key, definition: equation, sheet: result.compiled } } : result;
 }
 
@@ -134,6 +134,22 @@ function missingBounds({ lines, bounds }: Calculable, read: readonly ReadLine[])
     .map((symbol) =>
       definition('bounds', `${symbol} has no bound; where none is on record say so with the basis "none".`),
     );
+}
+
+/** What an equation gives is in the dictionary, and measured as it is there. */
+function giftProblems({ gives, unit }: PropertyEquationDefinition): Problem[] {
+  const entry = QUANTITIES[gives];
+  if (!entry) return [definition('gives', `"${gives}" is not in the quantity dictionary.`)];
+  const [own, needed] = [readUnit(unit), readUnit(entry.unit)];
+  return !own.ok || !needed.ok || measuresSame(own.unit, needed.unit)
+    ? []
+    : [
+        {
+          code: 'dimension',
+          field: 'unit',
+          message: `${gives} is in ${entry.unit}; "${unit}" does not fit.`,
+        },
+      ];
 }
 
 function repeatedParts({ parts }: CorrelationDefinition): Problem[] {

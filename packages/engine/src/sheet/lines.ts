@@ -20,6 +20,11 @@ export interface Line {
   path: string;
 }
 
+/** Path of a member of a line; a property equation's answer stands at the top of its definition, without a path. */
+export function memberPath({ path }: Pick<Line, 'path'>, member: string): string {
+  return path ? `${path}.${member}` : member;
+}
+
 /** What correlations and property equations have in common: all that is checked, compiled and evaluated. */
 export interface Calculable {
   quantities: Quantity[];

@@ -4,7 +4,7 @@ import { symbolsOf, type Tree } from '../expression/tree.js';
 import { isConstant } from '../quantity/constants.js';
 import type { Condition } from './common-schema.js';
 import { definition } from './check-symbols.js';
-import type { Calculable, Line } from './lines.js';
+import { memberPath, type Calculable, type Line } from './lines.js';
 
 export interface Formula {
   title: string | undefined;
@@ -40,18 +40,18 @@ interface FormulaText {
   path: string;
 }
 
-function expressionsOf({ expression, pieces, path }: Line): FormulaText[] {
-  const at = path ? `${path}.` : '';
+function expressionsOf(line: Line): FormulaText[] {
+  const { expression, pieces } = line;
   if (pieces)
     return pieces.map((piece, i) => ({
       text: piece.expression,
       title: piece.title,
       when: piece.when,
-      path: `${at}pieces[${i}].expression`,
+      path: `${memberPath(line, 'pieces')}[${i}].expression`,
     }));
   return expression === undefined
     ? []
-    : [{ text: expression, title: undefined, when: [], path: `${at}expression` }];
+    : [{ text: expression, title: undefined, when: [], path: memberPath(line, 'expression') }];
 }
 
 function readFormula(from: FormulaText, known: ReadonlySet<string>, problems: Problem[]): Formula[] {
@@ -82,11 +82,13 @@ function inOrder(lines: ReadLine[], problems: Problem[]): ReadLine[] {
   const done = new Set<string>();
   const order: ReadLine[] = [];
   const visit = (read: ReadLine, trail: string[]): void => {
-    const { symbol, path } = read.line;
+    const { symbol } = read.line;
     if (done.has(symbol)) return;
     if (trail.includes(symbol)) {
       const circle = [...trail.slice(trail.indexOf(symbol)), symbol].join(' → ');
-      problems.push(definition(`${path}.expression`, `The definitions go in a circle: ${circle}.`));
+      problems.push(
+        definition(memberPath(read.line, 'expression'), `The definitions go in a circle: ${circle}.`),
+      );
       return;
     }
     for (const need of needsOf(read)) {
