@@ -78,9 +78,9 @@ describe('inspectCorrelation', () => {
   it('finds where there is no value inside the bounds: all over, or at a corner', () => {
     const withExpression = (expression: string) =>
       bare({ parts: bare().parts.map((part) => ({ ...part, result: { ...part.result, expression } })) });
-    // ln of a negative number below Re = 20 000, more than half of the logarithmic range
-    expect(remarks(withExpression('ln(Re - 20000)*Sc'), 'range').join()).toMatch(
-      /^error: Sh has no finite value at Re = 2000/,
+    // ln of a negative number above Re = 15 000, a third of the logarithmic range
+    expect(remarks(withExpression('ln(15000 - Re)*Sc'), 'range').join()).toMatch(
+      /^error: Sh has no finite value at Re = 35\u2009000/,
     );
     // a pole at the upper bound, which the sample visits once
     expect(remarks(withExpression('-Re/ln(Re/35000)*Sc'), 'range').join()).toMatch(

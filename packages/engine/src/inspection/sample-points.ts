@@ -22,7 +22,9 @@ export function boxAround(sheet: CompiledSheet, point: Reckoner): SampleBox {
   const sides = sheet.bounds.flatMap(({ on, stretches }) => {
     const unit = unitOf(sheet, on);
     const first = stretches[0];
-    if (!unit || !first || !point.has(on)) return [];
+    const ends = stretches.flatMap(({ lo, hi }) => [lo, hi]).filter((end) => end !== undefined);
+    // What is bounded by physics alone has no range of validity to be sampled.
+    if (!unit || !first || !point.has(on) || ends.every(({ nature }) => nature === 'physical')) return [];
     const here = point.valueOf(on);
     const lo = first.lo ? toSI(first.lo.value, unit) : null;
     const hi = stretches.at(-1)?.hi ? toSI(stretches.at(-1)?.hi?.value ?? 0, unit) : null;
