@@ -1,0 +1,3041 @@
+export interface paths {
+    "/api/health": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Whether the server works, and which one it is */
+        get: operations["health"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/people": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Everybody active, with name and roles */
+        get: operations["listPeople"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/journal": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Entries of the journal, the latest first */
+        get: operations["listJournal"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/journal/verification": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Recompute the whole journal and name the first fault */
+        post: operations["verifyJournal"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/journal/checkpoints": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Signed heads of the journal, to be kept elsewhere */
+        get: operations["listCheckpoints"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/mail/outbox": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** The latest letters and what became of them */
+        get: operations["listOutbox"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/session": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Who is signed in */
+        get: operations["currentSession"];
+        put?: never;
+        /** Sign in; the session is kept in a cookie */
+        post: operations["signIn"];
+        /** Sign out */
+        delete: operations["signOut"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/session/demo-people": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** The invented people of a demo office */
+        get: operations["listDemoPeople"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/geometries": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** What correlations were measured on */
+        get: operations["listGeometries"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/property-equations": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Published equations for fluid properties */
+        get: operations["listPropertyEquations"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/property-equations/{slug}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** One of them, with its worked checks */
+        get: operations["getPropertyEquation"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/correlations": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** The register, searched and filtered */
+        get: operations["listCorrelations"];
+        put?: never;
+        /** A new correlation as a draft */
+        post: operations["createCorrelation"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/correlations/{slug}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** The sheet: the approved revision, else the latest that the caller may see */
+        get: operations["getCorrelation"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/correlations/{slug}/revisions": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** A draft of the next revision */
+        post: operations["createRevision"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/correlations/{slug}/revisions/{number}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** The sheet of one revision */
+        get: operations["getRevision"];
+        /** Puts other content into a draft, or into one in review */
+        put: operations["editRevision"];
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/correlations/{slug}/revisions/{number}/submission": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Puts a draft into review, once the machine check passes */
+        post: operations["submitRevision"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/correlations/{slug}/revisions/{number}/reviews": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** A reviewer's verdict on the present content */
+        post: operations["reviewRevision"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/correlations/{slug}/revisions/{number}/comments": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** A remark on one field, or on the whole */
+        post: operations["commentOnRevision"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/correlations/{slug}/revisions/{number}/approval": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** An authority's signature on the present content, with the password once more */
+        post: operations["approveRevision"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/correlations/{slug}/revisions/{number}/suspension": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Takes a revision out of use while a problem is looked into */
+        post: operations["suspendRevision"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/correlations/{slug}/revisions/{number}/reinstatement": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Puts a suspended revision back into use */
+        post: operations["reinstateRevision"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/correlations/{slug}/revisions/{number}/withdrawal": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Takes a revision out of use for good */
+        post: operations["withdrawRevision"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/candidates": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Every sheet of a geometry held against one duty */
+        post: operations["findCandidates"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/correlations/{slug}/evaluations": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** A coefficient for a duty, with every step */
+        post: operations["evaluateCorrelation"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/evaluations/{id}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** A kept evaluation, with what was asked */
+        get: operations["getEvaluation"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+}
+export type webhooks = Record<string, never>;
+export interface components {
+    schemas: {
+        HealthResponse: {
+            /** @enum {string} */
+            status: "ok";
+            version: string;
+            revision: string;
+            /** @description Whether office and people are invented */
+            demo: boolean;
+        };
+        PersonEntry: {
+            id: string;
+            name: string;
+            roles: ("engineer" | "reviewer" | "authority" | "auditor" | "administrator")[];
+        };
+        PeopleResponse: {
+            items: components["schemas"]["PersonEntry"][];
+        };
+        JournalActor: {
+            id: string;
+            name: string;
+        };
+        JournalItem: {
+            index: number;
+            /** Format: date-time */
+            at: string;
+            actor: components["schemas"]["JournalActor"];
+            /** @enum {string} */
+            act: "office.founded" | "person.added" | "session.started" | "session.refused" | "session.ended" | "correlation.drafted" | "revision.drafted" | "revision.submitted" | "revision.taken-back" | "revision.taken-over" | "revision.commented" | "revision.reviewed" | "revision.approved" | "revision.superseded" | "revision.declined" | "revision.suspended" | "revision.reinstated" | "revision.withdrawn" | "evaluation.deviated" | "property-equation.drafted" | "geometries.added";
+            /** @description Path of what was acted on */
+            subject: string;
+            detail: {
+                [key: string]: unknown;
+            };
+            /** @description RFC 9162 leaf hash of the entry as it is stored, hex */
+            leaf: string;
+        };
+        JournalResponse: {
+            /** @description The latest first */
+            items: components["schemas"]["JournalItem"][];
+            nextCursor: string | null;
+            /** @description Number of entries */
+            size: number;
+            /** @description Root hash of the tree over all of them, hex; null when stored hashes are gone */
+            root: string | null;
+        };
+        FaultResponse: {
+            index: number;
+            /** @enum {string} */
+            kind: "altered" | "missing" | "inserted" | "tree" | "checkpoint";
+            message: string;
+        };
+        VerificationResponse: {
+            ok: boolean;
+            /** @description Entries found right, up to the first fault */
+            entries: number;
+            firstFault?: components["schemas"]["FaultResponse"];
+        };
+        CheckpointItem: {
+            size: number;
+            root: string;
+            /** Format: date-time */
+            at: string;
+            keyId: string;
+            /** @description Ed25519 over the text, base64 */
+            signature: string;
+            /** @description What was signed */
+            text: string;
+        };
+        PublicKeyItem: {
+            keyId: string;
+            pem: string;
+        };
+        CheckpointsResponse: {
+            /** @description The latest first */
+            items: components["schemas"]["CheckpointItem"][];
+            publicKeys: components["schemas"]["PublicKeyItem"][];
+        };
+        OutboxItem: {
+            id: string;
+            to: string;
+            subject: string;
+            body: string;
+            /** Format: date-time */
+            at: string;
+            /**
+             * @description local: there is no mail server, it is read here
+             * @enum {string}
+             */
+            state: "local" | "waiting" | "sent" | "failed";
+            tries: number;
+            lastError: string | null;
+        };
+        OutboxResponse: {
+            /** @description The latest first */
+            items: components["schemas"]["OutboxItem"][];
+        };
+        SignInDto: {
+            /** @example engineer@merestone.example */
+            email: string;
+            /** Format: password */
+            password: string;
+        };
+        SignedInPerson: {
+            id: string;
+            name: string;
+            email: string;
+            roles: ("engineer" | "reviewer" | "authority" | "auditor" | "administrator")[];
+        };
+        SessionResponse: {
+            person: components["schemas"]["SignedInPerson"];
+            /** @description What the roles allow, without regard to an object */
+            permissions: ("register.read" | "register.read-unapproved" | "correlation.evaluate" | "evaluation.read-all" | "correlation.draft" | "correlation.submit" | "correlation.comment" | "correlation.review" | "correlation.approve" | "correlation.suspend" | "correlation.withdraw" | "people.list" | "journal.read" | "journal.verify" | "mail.read")[];
+        };
+        DemoPerson: {
+            name: string;
+            email: string;
+            roles: ("engineer" | "reviewer" | "authority" | "auditor" | "administrator")[];
+        };
+        DemoPeopleResponse: {
+            items: components["schemas"]["DemoPerson"][];
+            /** @description The password of all of them */
+            password: string;
+        };
+        GeometryEntry: {
+            slug: string;
+            name: string;
+            summary: string;
+            /** @description The length that correlations of this geometry are usually put on */
+            characteristicLength: string;
+            velocity: string;
+            cautions: string[];
+            /** @description Correlations that the caller may see */
+            total: number;
+            /** @description Those of them with an approved revision */
+            approved: number;
+        };
+        GeometriesResponse: {
+            items: components["schemas"]["GeometryEntry"][];
+        };
+        ListedPropertyEquation: {
+            slug: string;
+            title: string;
+            fluid: string;
+            /** @description Dictionary name of what it gives */
+            gives: string;
+            unit: string;
+            revision: number;
+            hash: string;
+            /** @enum {string} */
+            standing: "draft" | "in review" | "approved" | "suspended" | "superseded" | "withdrawn" | "declined";
+        };
+        PropertyEquationsResponse: {
+            items: components["schemas"]["ListedPropertyEquation"][];
+        };
+        CheckedValueDto: {
+            symbol: string;
+            expected: number;
+            found: number | null;
+            deviationPercent: number | null;
+            unit: string;
+            passed: boolean;
+        };
+        FindingDto: {
+            /** @description Symbol on the sheet; `rho.T` for T of the equation that fills rho */
+            symbol: string;
+            /** @enum {string} */
+            kind: "within" | "near" | "outside" | "past-reach" | "between" | "unchecked";
+            value: number | null;
+            unit: string;
+            lo: number | null;
+            hi: number | null;
+            loClosed: boolean;
+            hiClosed: boolean;
+            /** @enum {string|null} */
+            nature: "data" | "regime" | "definition" | "physical" | null;
+            /** @enum {string} */
+            basis: "stated" | "handbook" | "common-practice" | "none";
+            /** @description Value over the upper limit, or lower limit over value */
+            ratio: number | null;
+            /** @description Whether a reasoned deviation may be recorded */
+            deviable: boolean;
+            /** @description Sheets named as holding on the other side */
+            beyond: string[];
+            message: string;
+        };
+        CheckProblemDto: {
+            code: string;
+            field: string;
+            message: string;
+        };
+        CheckReportDto: {
+            title: string;
+            /** @enum {string} */
+            kind: "published" | "computed";
+            source: string | null;
+            note: string | null;
+            tolerancePercent: number;
+            passed: boolean;
+            values: components["schemas"]["CheckedValueDto"][];
+            findings: components["schemas"]["FindingDto"][];
+            problems: components["schemas"]["CheckProblemDto"][];
+        };
+        PropertyEquationSheet: {
+            slug: string;
+            title: string;
+            fluid: string;
+            /** @description Dictionary name of what it gives */
+            gives: string;
+            unit: string;
+            revision: number;
+            hash: string;
+            /** @enum {string} */
+            standing: "draft" | "in review" | "approved" | "suspended" | "superseded" | "withdrawn" | "declined";
+            definition: components["schemas"]["PropertyEquationDefinition"];
+            checks: components["schemas"]["CheckReportDto"][];
+            /** @description Why it is not approved */
+            standingNote: string | null;
+            caution: string;
+        };
+        BoundEndDto: {
+            value: number;
+            /** @enum {string} */
+            nature: "data" | "regime" | "definition" | "physical";
+            /** @default true */
+            closed: boolean;
+            reach?: number;
+            beyond?: string[];
+        };
+        StretchDto: {
+            lo?: components["schemas"]["BoundEndDto"];
+            hi?: components["schemas"]["BoundEndDto"];
+        };
+        ListedBound: {
+            symbol: string;
+            name: string;
+            unit: string;
+            /** @enum {string} */
+            basis: "stated" | "handbook" | "common-practice" | "none";
+            stretches: components["schemas"]["StretchDto"][];
+        };
+        ListedCorrelation: {
+            slug: string;
+            title: string;
+            authors: string[];
+            year: number | null;
+            geometry: string;
+            geometryName: string;
+            /** @enum {string} */
+            phase: "gas" | "liquid" | "gas-or-liquid" | "gas-and-liquid";
+            /** @enum {string} */
+            standing: "draft" | "in review" | "approved" | "suspended" | "superseded" | "withdrawn" | "declined";
+            revision: number;
+            summary: string;
+            /** @enum {string} */
+            verification: "published-example" | "expression-seen" | "from-memory";
+            bounds: components["schemas"]["ListedBound"][];
+        };
+        FacetCount: {
+            value: string;
+            label: string;
+            count: number;
+        };
+        CorrelationFacets: {
+            geometry: components["schemas"]["FacetCount"][];
+            phase: components["schemas"]["FacetCount"][];
+            standing: components["schemas"]["FacetCount"][];
+        };
+        CorrelationPage: {
+            items: components["schemas"]["ListedCorrelation"][];
+            nextCursor: string | null;
+            total: number;
+            /** @description Each counted without the filter on itself */
+            facets: components["schemas"]["CorrelationFacets"];
+        };
+        NewCorrelationBody: {
+            definition: components["schemas"]["CorrelationDefinition"];
+            slug: string;
+        };
+        NamedPerson: {
+            id: string;
+            name: string;
+        };
+        SheetRevision: {
+            number: number;
+            /** @enum {string} */
+            standing: "draft" | "in review" | "approved" | "suspended" | "superseded" | "withdrawn" | "declined";
+            hash: string;
+            /**
+             * Format: date-time
+             * @description When it got this standing
+             */
+            at: string;
+        };
+        SheetHistoryEntry: {
+            /** @enum {string} */
+            standing: "draft" | "in review" | "approved" | "suspended" | "superseded" | "withdrawn" | "declined";
+            /** Format: date-time */
+            at: string;
+            by: components["schemas"]["NamedPerson"];
+            note: string | null;
+            /**
+             * @description Of a withdrawal
+             * @enum {string|null}
+             */
+            class: "error-in-sheet" | "error-in-source" | "unsafe" | null;
+        };
+        SheetReview: {
+            reviewer: components["schemas"]["NamedPerson"];
+            /** @enum {string} */
+            verdict: "recommend" | "ask-for-changes" | "decline";
+            /** Format: date-time */
+            at: string;
+            note: string | null;
+            /** @description The content it speaks of */
+            hash: string;
+            /** @description Whether it speaks of the present content */
+            current: boolean;
+        };
+        SheetComment: {
+            /** @description Path in the definition; empty for the whole */
+            field: string;
+            text: string;
+            by: components["schemas"]["NamedPerson"];
+            /** Format: date-time */
+            at: string;
+            hash: string;
+        };
+        SheetApproval: {
+            by: components["schemas"]["NamedPerson"];
+            /** Format: date-time */
+            at: string;
+            /** @description What the signature means, in words */
+            meaning: string;
+            /** @description The content that was signed */
+            hash: string;
+        };
+        SheetUsage: {
+            evaluations: number;
+            calculations: number;
+        };
+        SheetEquation: {
+            slug: string;
+            revision: number;
+            hash: string;
+            definition: components["schemas"]["PropertyEquationDefinition"];
+        };
+        SheetAbilities: {
+            evaluate: boolean;
+            edit: boolean;
+            submit: boolean;
+            comment: boolean;
+            review: boolean;
+            approve: boolean;
+            suspend: boolean;
+            reinstate: boolean;
+            withdraw: boolean;
+        };
+        Sheet: {
+            slug: string;
+            title: string;
+            geometry: string;
+            geometryName: string;
+            /** @enum {string} */
+            standing: "draft" | "in review" | "approved" | "suspended" | "superseded" | "withdrawn" | "declined";
+            revision: number;
+            iteration: number;
+            /** @description SHA-256 of the RFC 8785 text of the definition; also the ETag */
+            hash: string;
+            definition: components["schemas"]["CorrelationDefinition"];
+            originator: components["schemas"]["NamedPerson"];
+            /** @description Those that the caller may see */
+            revisions: components["schemas"]["SheetRevision"][];
+            history: components["schemas"]["SheetHistoryEntry"][];
+            reviews: components["schemas"]["SheetReview"][];
+            comments: components["schemas"]["SheetComment"][];
+            approval: components["schemas"]["SheetApproval"] | null;
+            checks: components["schemas"]["CheckReportDto"][];
+            /** @description Why it is not approved */
+            standingNote: string | null;
+            usage: components["schemas"]["SheetUsage"];
+            /** @description Every property equation the sheet lists, and those they need */
+            equations: components["schemas"]["SheetEquation"][];
+            /** @description What the caller may do with this revision now */
+            abilities: components["schemas"]["SheetAbilities"];
+            caution: string;
+        };
+        DefinitionBody: {
+            definition: components["schemas"]["CorrelationDefinition"];
+        };
+        SubmissionBody: {
+            /** @description People asked to review it, by id */
+            reviewers?: string[];
+            /** @description What the reviewers should know */
+            note?: string;
+        };
+        ChecklistDto: {
+            /** @description The expression is that of the source */
+            expression: boolean;
+            /** @description Every symbol is defined as in the source */
+            definitions: boolean;
+            /** @description The ranges are those of the source */
+            ranges: boolean;
+            /** @description The basis of each bound and of the coefficient is right */
+            basis: boolean;
+            /** @description A worked check was recalculated by other means */
+            recalculated: boolean;
+            /** @description The register has no second sheet of the same equation */
+            duplicates: boolean;
+        };
+        ReviewBody: {
+            /** @enum {string} */
+            verdict: "recommend" | "ask-for-changes" | "decline";
+            checklist: components["schemas"]["ChecklistDto"];
+            /** @description Needed where the verdict is not to recommend */
+            note?: string;
+        };
+        CommentBody: {
+            /** @description Path in the definition, such as `bounds[0]`; empty: the whole */
+            field: string;
+            text: string;
+        };
+        ApprovalBody: {
+            /**
+             * Format: password
+             * @description The caller's own password, once more
+             */
+            password: string;
+            /** @description What the signature means */
+            meaning: string;
+            /** @description Hash of the content that is signed */
+            hash: string;
+            note?: string;
+        };
+        ReasonBody: {
+            reason: string;
+        };
+        WithdrawalBody: {
+            reason: string;
+            /** @enum {string} */
+            class: "error-in-sheet" | "error-in-source" | "unsafe";
+        };
+        CandidatesBody: {
+            geometry: string;
+            /** @enum {string} */
+            phase?: "gas" | "liquid";
+            /** @description By dictionary name, such as `gas-density`; without a unit in the dictionary's own */
+            inputs: {
+                [key: string]: components["schemas"]["InputValueDto"];
+            };
+        };
+        ResultValueDto: {
+            symbol: string;
+            value: number;
+            unit: string;
+        };
+        CoefficientValueDto: {
+            symbol: string;
+            value: number;
+            unit: string;
+            /** @enum {string} */
+            basis: "concentration" | "partial-pressure" | "mole-fraction";
+            /** @enum {string} */
+            per: "area" | "volume";
+            /** @enum {string} */
+            rateForm: "dilute-or-equimolar" | "stagnant-inert" | "drift-free";
+        };
+        Candidate: {
+            slug: string;
+            title: string;
+            revision: number;
+            /** @enum {string} */
+            standing: "draft" | "in review" | "approved" | "suspended" | "superseded" | "withdrawn" | "declined";
+            /** @description False: for comparison only, the revision is not in use */
+            inUse: boolean;
+            /** @enum {string} */
+            outcome: "within" | "unchecked" | "refused" | "incomplete";
+            result: components["schemas"]["ResultValueDto"] | null;
+            coefficient: components["schemas"]["CoefficientValueDto"] | null;
+            findings: components["schemas"]["FindingDto"][];
+            /** @description Of a refusal: how many times past the worst bound */
+            farthest: number | null;
+            /** @description Dictionary names of what it still needs */
+            missing: string[];
+            /** @description Why the values given cannot be used, in sentences */
+            problems: string[];
+        };
+        CandidatesResponse: {
+            /** @description Ranked: within, near a bound, unchecked, refused, incomplete */
+            items: components["schemas"]["Candidate"][];
+            caution: string;
+        };
+        DeviationDto: {
+            /** @description Symbol of the finding it answers */
+            symbol: string;
+            reason: string;
+        };
+        InputValueDto: {
+            value: number;
+            /** @description The sheet's own unit when left out */
+            unit?: string;
+        };
+        DrivingForceDto: {
+            /** @enum {string} */
+            kind: "concentration" | "partial-pressure" | "mole-fraction";
+            interface: components["schemas"]["InputValueDto"];
+            bulk: components["schemas"]["InputValueDto"];
+        };
+        EvaluationBody: {
+            /** @description The approved one, else the latest the caller may see, when left out */
+            revision?: number;
+            /** @description Quantities or groups by symbol; `rho.T` for T of the equation that fills rho */
+            inputs: {
+                [key: string]: components["schemas"]["InputValueDto"];
+            };
+            /** @description Row by table name */
+            rows?: {
+                [key: string]: string;
+            };
+            /** @description Property equation by the symbol it fills */
+            equations?: {
+                [key: string]: string;
+            };
+            bases?: ("k_c" | "k_G" | "k_y" | "F" | "k_L" | "k_x")[];
+            deviations?: components["schemas"]["DeviationDto"][];
+            drivingForce?: components["schemas"]["DrivingForceDto"];
+        };
+        ConversionDto: {
+            /** @enum {string} */
+            basis: "k_c" | "k_G" | "k_y" | "F" | "k_L" | "k_x";
+            symbol: string;
+            value: number | null;
+            unit: string;
+            /** @description What must be known first; empty when there is a value */
+            missing: string[];
+            assumes?: string;
+        };
+        PartOutcomeDto: {
+            key: string;
+            title: string;
+            result: components["schemas"]["ResultValueDto"];
+            coefficient: components["schemas"]["CoefficientValueDto"] | null;
+            conversions: components["schemas"]["ConversionDto"][];
+        };
+        FluxDto: {
+            value: number;
+            unit: string;
+            /** @enum {string} */
+            basis: "concentration" | "partial-pressure" | "mole-fraction";
+            warnings: string[];
+        };
+        StepDto: {
+            /** @enum {string} */
+            kind: "quantity" | "property" | "group" | "intermediate" | "result" | "coefficient" | "conversion" | "flux";
+            symbol: string;
+            symbolTex: string;
+            tex: string;
+            texWithNumbers: string;
+            value: number;
+            unit: string;
+            note?: string;
+        };
+        UsedEquationDto: {
+            /** @description The symbol that was filled */
+            symbol: string;
+            key: string;
+            value: number;
+            unit: string;
+            title: string;
+            assumes?: string;
+        };
+        EquationProvenance: {
+            key: string;
+            revision: number;
+            hash: string;
+        };
+        ProvenanceDto: {
+            slug: string;
+            revision: number;
+            hash: string;
+            /** @description Version of the calculation */
+            engine: string;
+            equations: components["schemas"]["EquationProvenance"][];
+            rows: {
+                [key: string]: string;
+            };
+        };
+        WithinEvaluation: {
+            /** Format: uuid */
+            id: string;
+            /** Format: date-time */
+            at: string;
+            slug: string;
+            revision: number;
+            /**
+             * @description Standing of the revision at the time
+             * @enum {string}
+             */
+            standing: "draft" | "in review" | "approved" | "suspended" | "superseded" | "withdrawn" | "declined";
+            groups: {
+                [key: string]: number;
+            };
+            intermediates: {
+                [key: string]: {
+                    value: number;
+                    unit: string;
+                };
+            };
+            result: components["schemas"]["ResultValueDto"];
+            coefficient: components["schemas"]["CoefficientValueDto"] | null;
+            conversions: components["schemas"]["ConversionDto"][];
+            parts: components["schemas"]["PartOutcomeDto"][];
+            flux: components["schemas"]["FluxDto"] | null;
+            findings: components["schemas"]["FindingDto"][];
+            steps: components["schemas"]["StepDto"][];
+            equations: components["schemas"]["UsedEquationDto"][];
+            rows: {
+                [key: string]: string;
+            };
+            remarks: string[];
+            provenance: components["schemas"]["ProvenanceDto"];
+            caution: string;
+            /**
+             * @description discriminator enum property added by openapi-typescript
+             * @enum {string}
+             */
+            outcome: "within";
+        };
+        UncheckedEvaluation: {
+            /** Format: uuid */
+            id: string;
+            /** Format: date-time */
+            at: string;
+            slug: string;
+            revision: number;
+            /**
+             * @description Standing of the revision at the time
+             * @enum {string}
+             */
+            standing: "draft" | "in review" | "approved" | "suspended" | "superseded" | "withdrawn" | "declined";
+            groups: {
+                [key: string]: number;
+            };
+            intermediates: {
+                [key: string]: {
+                    value: number;
+                    unit: string;
+                };
+            };
+            result: components["schemas"]["ResultValueDto"];
+            coefficient: components["schemas"]["CoefficientValueDto"] | null;
+            conversions: components["schemas"]["ConversionDto"][];
+            parts: components["schemas"]["PartOutcomeDto"][];
+            flux: components["schemas"]["FluxDto"] | null;
+            findings: components["schemas"]["FindingDto"][];
+            steps: components["schemas"]["StepDto"][];
+            equations: components["schemas"]["UsedEquationDto"][];
+            rows: {
+                [key: string]: string;
+            };
+            remarks: string[];
+            provenance: components["schemas"]["ProvenanceDto"];
+            caution: string;
+            /**
+             * @description discriminator enum property added by openapi-typescript
+             * @enum {string}
+             */
+            outcome: "unchecked";
+        };
+        DeviatingEvaluation: {
+            /** Format: uuid */
+            id: string;
+            /** Format: date-time */
+            at: string;
+            slug: string;
+            revision: number;
+            /**
+             * @description Standing of the revision at the time
+             * @enum {string}
+             */
+            standing: "draft" | "in review" | "approved" | "suspended" | "superseded" | "withdrawn" | "declined";
+            groups: {
+                [key: string]: number;
+            };
+            intermediates: {
+                [key: string]: {
+                    value: number;
+                    unit: string;
+                };
+            };
+            result: components["schemas"]["ResultValueDto"];
+            coefficient: components["schemas"]["CoefficientValueDto"] | null;
+            conversions: components["schemas"]["ConversionDto"][];
+            parts: components["schemas"]["PartOutcomeDto"][];
+            flux: components["schemas"]["FluxDto"] | null;
+            findings: components["schemas"]["FindingDto"][];
+            steps: components["schemas"]["StepDto"][];
+            equations: components["schemas"]["UsedEquationDto"][];
+            rows: {
+                [key: string]: string;
+            };
+            remarks: string[];
+            provenance: components["schemas"]["ProvenanceDto"];
+            caution: string;
+            /**
+             * @description discriminator enum property added by openapi-typescript
+             * @enum {string}
+             */
+            outcome: "deviating";
+            /** @enum {string} */
+            mark: "provisional, not for design";
+            deviations: components["schemas"]["DeviationDto"][];
+        };
+        KeptEvaluation: {
+            /** Format: uuid */
+            id: string;
+            /** Format: date-time */
+            at: string;
+            person: components["schemas"]["NamedPerson"];
+            /** @description What was asked */
+            request: components["schemas"]["EvaluationBody"];
+            evaluation: components["schemas"]["WithinEvaluation"] | components["schemas"]["UncheckedEvaluation"] | components["schemas"]["DeviatingEvaluation"];
+        };
+        FieldProblemResponse: {
+            /** @description Path in the request, such as inputs.u.value */
+            field: string;
+            code: string;
+            message: string;
+        };
+        AlternativeResponse: {
+            slug: string;
+            title: string;
+            geometry: string;
+        };
+        ProblemResponse: {
+            /** @example urn:merestone:problem:out-of-bounds */
+            type: string;
+            title: string;
+            status: number;
+            /** @description What is so and what to do */
+            detail: string;
+            /** @description Names one unexpected failure in the log */
+            instance?: string;
+            fields?: components["schemas"]["FieldProblemResponse"][];
+            findings?: {
+                [key: string]: unknown;
+            }[];
+            alternatives?: components["schemas"]["AlternativeResponse"][];
+        };
+        CorrelationDefinition: {
+            /** @enum {string} */
+            format: "merestone-sheet/1";
+            title: string;
+            authors: string[];
+            year: number | null;
+            geometry: string;
+            /** @enum {string} */
+            phase: "gas" | "liquid" | "gas-or-liquid" | "gas-and-liquid";
+            summary: string;
+            /** @enum {string} */
+            averaging: "average" | "local" | "not-stated";
+            /** @enum {string} */
+            wall: "constant-concentration" | "constant-flux" | "not-applicable" | "not-stated";
+            /** @enum {string} */
+            drivingForce: "local" | "log-mean" | "inlet" | "not-stated";
+            /** @enum {string} */
+            propertyState: "film" | "bulk" | "interface" | "inlet" | "not-stated";
+            quantities: {
+                symbol: string;
+                is: string;
+                unit: string;
+                tex?: string;
+                /** @enum {string} */
+                role?: "characteristic-length" | "velocity" | "state";
+                /** @enum {string} */
+                at?: "film" | "bulk" | "interface" | "wall" | "inlet";
+                meaning?: string;
+                equations?: string[];
+                table?: string;
+            }[];
+            tables?: {
+                name: string;
+                title: string;
+                source?: string;
+                rows: {
+                    key: string;
+                    label: string;
+                    values: {
+                        [key: string]: number;
+                    };
+                    note?: string;
+                }[];
+            }[];
+            groups: {
+                symbol: string;
+                name: string;
+                expression: string;
+                tex?: string;
+                note?: string;
+            }[];
+            intermediates?: {
+                symbol: string;
+                name: string;
+                unit: string;
+                tex?: string;
+                expression?: string;
+                pieces?: {
+                    title?: string;
+                    when: {
+                        on: string;
+                        lo?: number;
+                        hi?: number;
+                        loClosed?: boolean;
+                        hiClosed?: boolean;
+                    }[];
+                    expression: string;
+                }[];
+                dimensional?: boolean;
+                note?: string;
+            }[];
+            bounds: {
+                on: string;
+                stretches: {
+                    lo?: {
+                        value: number;
+                        /** @enum {string} */
+                        nature: "data" | "regime" | "definition" | "physical";
+                        closed?: boolean;
+                        reach?: number;
+                        beyond?: string[];
+                    };
+                    hi?: {
+                        value: number;
+                        /** @enum {string} */
+                        nature: "data" | "regime" | "definition" | "physical";
+                        closed?: boolean;
+                        reach?: number;
+                        beyond?: string[];
+                    };
+                }[];
+                /** @enum {string} */
+                basis: "stated" | "handbook" | "common-practice" | "none";
+                place?: string;
+                note?: string;
+            }[];
+            parts: {
+                key: string;
+                title: string;
+                /** @enum {string} */
+                phase?: "gas" | "liquid";
+                result: {
+                    symbol: string;
+                    tex?: string;
+                    /** @enum {string} */
+                    kind: "Sherwood" | "Stanton" | "j-factor" | "coefficient" | "volumetric-coefficient" | "interfacial-area";
+                    unit: string;
+                    expression?: string;
+                    pieces?: {
+                        title?: string;
+                        when: {
+                            on: string;
+                            lo?: number;
+                            hi?: number;
+                            loClosed?: boolean;
+                            hiClosed?: boolean;
+                        }[];
+                        expression: string;
+                    }[];
+                    dimensional?: boolean;
+                };
+                coefficient: {
+                    symbol: string;
+                    tex?: string;
+                    unit: string;
+                    /** @enum {string} */
+                    basis: "concentration" | "partial-pressure" | "mole-fraction";
+                    /** @enum {string} */
+                    per: "area" | "volume";
+                    /** @enum {string} */
+                    rateForm: "dilute-or-equimolar" | "stagnant-inert" | "drift-free";
+                    expression: string;
+                } | null;
+            }[];
+            accuracy: {
+                valuePercent: number | null;
+                /** @enum {string} */
+                statistic: "max" | "mean" | "rms" | "95 %" | "not-stated";
+                of?: string;
+                text: string;
+            } | null;
+            restrictions: string[];
+            cautions: string[];
+            sources: {
+                csl: {
+                    type: string;
+                    title?: string;
+                    author?: {
+                        family?: string;
+                        given?: string;
+                        literal?: string;
+                    }[];
+                    issued?: {
+                        "date-parts": (number | string)[][];
+                    };
+                    "container-title"?: string;
+                    publisher?: string;
+                    edition?: string | number;
+                    volume?: string | number;
+                    issue?: string | number;
+                    page?: string;
+                    DOI?: string;
+                } & {
+                    [key: string]: unknown;
+                };
+                place: string;
+                gives?: string;
+                /** @enum {string} */
+                read: "seen" | "memory";
+            }[];
+            checks: {
+                title: string;
+                /** @enum {string} */
+                kind: "published" | "computed";
+                source?: string;
+                inputs: {
+                    [key: string]: {
+                        value: number;
+                        unit?: string;
+                    };
+                };
+                rows?: {
+                    [key: string]: string;
+                };
+                equations?: {
+                    [key: string]: string;
+                };
+                expected: {
+                    [key: string]: {
+                        value: number;
+                        unit?: string;
+                    };
+                };
+                tolerancePercent: number;
+                note?: string;
+            }[];
+            verification: {
+                /** @enum {string} */
+                status: "published-example" | "expression-seen" | "from-memory";
+                note: string;
+            };
+        };
+        PropertyEquationDefinition: {
+            /** @enum {string} */
+            format: "merestone-property/1";
+            title: string;
+            fluid: string;
+            gives: string;
+            unit: string;
+            assumes?: string;
+            quantities: {
+                symbol: string;
+                is: string;
+                unit: string;
+                tex?: string;
+                /** @enum {string} */
+                role?: "characteristic-length" | "velocity" | "state";
+                /** @enum {string} */
+                at?: "film" | "bulk" | "interface" | "wall" | "inlet";
+                meaning?: string;
+                equations?: string[];
+                table?: string;
+            }[];
+            tables?: {
+                name: string;
+                title: string;
+                source?: string;
+                rows: {
+                    key: string;
+                    label: string;
+                    values: {
+                        [key: string]: number;
+                    };
+                    note?: string;
+                }[];
+            }[];
+            intermediates?: {
+                symbol: string;
+                name: string;
+                unit: string;
+                tex?: string;
+                expression?: string;
+                pieces?: {
+                    title?: string;
+                    when: {
+                        on: string;
+                        lo?: number;
+                        hi?: number;
+                        loClosed?: boolean;
+                        hiClosed?: boolean;
+                    }[];
+                    expression: string;
+                }[];
+                dimensional?: boolean;
+                note?: string;
+            }[];
+            bounds: {
+                on: string;
+                stretches: {
+                    lo?: {
+                        value: number;
+                        /** @enum {string} */
+                        nature: "data" | "regime" | "definition" | "physical";
+                        closed?: boolean;
+                        reach?: number;
+                        beyond?: string[];
+                    };
+                    hi?: {
+                        value: number;
+                        /** @enum {string} */
+                        nature: "data" | "regime" | "definition" | "physical";
+                        closed?: boolean;
+                        reach?: number;
+                        beyond?: string[];
+                    };
+                }[];
+                /** @enum {string} */
+                basis: "stated" | "handbook" | "common-practice" | "none";
+                place?: string;
+                note?: string;
+            }[];
+            expression?: string;
+            pieces?: {
+                title?: string;
+                when: {
+                    on: string;
+                    lo?: number;
+                    hi?: number;
+                    loClosed?: boolean;
+                    hiClosed?: boolean;
+                }[];
+                expression: string;
+            }[];
+            dimensional?: boolean;
+            accuracy: {
+                valuePercent: number | null;
+                /** @enum {string} */
+                statistic: "max" | "mean" | "rms" | "95 %" | "not-stated";
+                of?: string;
+                text: string;
+            } | null;
+            cautions: string[];
+            sources: {
+                csl: {
+                    type: string;
+                    title?: string;
+                    author?: {
+                        family?: string;
+                        given?: string;
+                        literal?: string;
+                    }[];
+                    issued?: {
+                        "date-parts": (number | string)[][];
+                    };
+                    "container-title"?: string;
+                    publisher?: string;
+                    edition?: string | number;
+                    volume?: string | number;
+                    issue?: string | number;
+                    page?: string;
+                    DOI?: string;
+                } & {
+                    [key: string]: unknown;
+                };
+                place: string;
+                gives?: string;
+                /** @enum {string} */
+                read: "seen" | "memory";
+            }[];
+            checks: {
+                title: string;
+                /** @enum {string} */
+                kind: "published" | "computed";
+                source?: string;
+                inputs: {
+                    [key: string]: {
+                        value: number;
+                        unit?: string;
+                    };
+                };
+                rows?: {
+                    [key: string]: string;
+                };
+                equations?: {
+                    [key: string]: string;
+                };
+                expected: {
+                    [key: string]: {
+                        value: number;
+                        unit?: string;
+                    };
+                };
+                tolerancePercent: number;
+                note?: string;
+            }[];
+            verification: {
+                /** @enum {string} */
+                status: "published-example" | "expression-seen" | "from-memory";
+                note: string;
+            };
+        };
+    };
+    responses: never;
+    parameters: never;
+    requestBodies: never;
+    headers: never;
+    pathItems: never;
+}
+export type $defs = Record<string, never>;
+export interface operations {
+    health: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["HealthResponse"];
+                };
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    listPeople: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PeopleResponse"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission people.list */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    listJournal: {
+        parameters: {
+            query?: {
+                /** @description nextCursor of the page before */
+                cursor?: string;
+                /** @description 1 to 200; 50 when left out */
+                limit?: string;
+                /** @description Only what was done to this, such as correlations/some-slug */
+                subject?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["JournalResponse"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission journal.read */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    verifyJournal: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["VerificationResponse"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission journal.verify */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    listCheckpoints: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CheckpointsResponse"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission journal.read */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    listOutbox: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OutboxResponse"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission mail.read */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    currentSession: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SessionResponse"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    signIn: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["SignInDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SessionResponse"];
+                };
+            };
+            /** @description The address or the password is not right */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Too many attempts failed */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    signOut: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    listDemoPeople: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["DemoPeopleResponse"];
+                };
+            };
+            /** @description Not a demo office */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    listGeometries: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["GeometriesResponse"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission register.read */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    listPropertyEquations: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PropertyEquationsResponse"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission register.read */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    getPropertyEquation: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                slug: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PropertyEquationSheet"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission register.read */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description There is none of this name */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    listCorrelations: {
+        parameters: {
+            query?: {
+                /** @description Words; each must occur, the last may be begun */
+                q?: string;
+                geometry?: string;
+                /** @description `gas` and `liquid` also find sheets that serve both */
+                phase?: "gas" | "liquid" | "gas-or-liquid" | "gas-and-liquid";
+                standing?: "draft" | "in review" | "approved" | "suspended" | "superseded" | "withdrawn" | "declined";
+                /** @description `nextCursor` of the page before */
+                cursor?: string;
+                limit?: number;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CorrelationPage"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission register.read */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    createCorrelation: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["NewCorrelationBody"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["Sheet"];
+                };
+            };
+            /** @description The definition does not hold; each fault with its path */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission correlation.draft */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description The slug is taken */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    getCorrelation: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                slug: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["Sheet"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission register.read */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description There is none of this name that the caller may see */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    createRevision: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                slug: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["DefinitionBody"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["Sheet"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission correlation.draft */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Another revision is still being worked on */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    getRevision: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                slug: string;
+                number: number;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["Sheet"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission register.read */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description There is none that the caller may see */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    editRevision: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description Hash of the content that was edited, in quotes */
+                "If-Match": string;
+            };
+            path: {
+                slug: string;
+                number: number;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["DefinitionBody"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["Sheet"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission correlation.draft */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description The content was changed in the meantime, or can no longer be */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    submitRevision: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                slug: string;
+                number: number;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["SubmissionBody"];
+            };
+        };
+        responses: {
+            /** @description The sheet as it stands now */
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["Sheet"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission correlation.submit */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description There is no such revision that the caller may see */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description The revision's standing or content does not allow it */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description The sheet does not reproduce its own worked checks */
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    reviewRevision: {
+        parameters: {
+            query?: never;
+            header?: {
+                /** @description Hash of the content that was read, in quotes */
+                "If-Match"?: string;
+            };
+            path: {
+                slug: string;
+                number: number;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ReviewBody"];
+            };
+        };
+        responses: {
+            /** @description The sheet as it stands now */
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["Sheet"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission correlation.review */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description There is no such revision that the caller may see */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description The revision's standing or content does not allow it */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    commentOnRevision: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                slug: string;
+                number: number;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["CommentBody"];
+            };
+        };
+        responses: {
+            /** @description The sheet as it stands now */
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["Sheet"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission correlation.comment */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description There is no such revision that the caller may see */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description The revision's standing or content does not allow it */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    approveRevision: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                slug: string;
+                number: number;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ApprovalBody"];
+            };
+        };
+        responses: {
+            /** @description The sheet as it stands now */
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["Sheet"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission correlation.approve */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description There is no such revision that the caller may see */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description The revision's standing or content does not allow it */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    suspendRevision: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                slug: string;
+                number: number;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ReasonBody"];
+            };
+        };
+        responses: {
+            /** @description The sheet as it stands now */
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["Sheet"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission correlation.suspend */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description There is no such revision that the caller may see */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description The revision's standing or content does not allow it */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    reinstateRevision: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                slug: string;
+                number: number;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ReasonBody"];
+            };
+        };
+        responses: {
+            /** @description The sheet as it stands now */
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["Sheet"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission correlation.suspend */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description There is no such revision that the caller may see */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description The revision's standing or content does not allow it */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    withdrawRevision: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                slug: string;
+                number: number;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["WithdrawalBody"];
+            };
+        };
+        responses: {
+            /** @description The sheet as it stands now */
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["Sheet"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission correlation.withdraw */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description There is no such revision that the caller may see */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description The revision's standing or content does not allow it */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    findCandidates: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["CandidatesBody"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CandidatesResponse"];
+                };
+            };
+            /** @description A name, a unit or a value cannot be used */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission correlation.evaluate */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    evaluateCorrelation: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                slug: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["EvaluationBody"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["WithinEvaluation"] | components["schemas"]["UncheckedEvaluation"] | components["schemas"]["DeviatingEvaluation"];
+                };
+            };
+            /** @description Inputs are missing, unknown, over-determined or in a wrong unit */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission correlation.evaluate */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description The revision is not in use */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Outside a bound: findings, and sheets to turn to. No number */
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    getEvaluation: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["KeptEvaluation"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission register.read */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description There is none of this id among those the caller may see */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+}
