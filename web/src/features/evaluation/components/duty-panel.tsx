@@ -3,6 +3,7 @@ import { useMemo } from 'react';
 import { ErrorSummary } from '../../../shared/ui/error-summary';
 import type { EvaluationState } from '../hooks/use-evaluation';
 import { hasContent } from '../hooks/use-duty';
+import { summaryLine } from '../model/field-error';
 import { fieldId } from '../model/field-id';
 import type { DutyControls } from './duty-controls';
 import { DutySection } from './duty-section';
@@ -40,9 +41,9 @@ export function DutyPanel({ evaluation, notInUse }: DutyPanelProps) {
     >
       <ErrorSummary
         title="The duty is not complete yet"
-        errors={evaluation.summary.map(({ field, message }) => ({
-          message,
-          ...(field ? { fieldId: fieldId(field) } : {}),
+        errors={evaluation.summary.map((error) => ({
+          message: summaryLine(error, sections),
+          ...(error.field ? { fieldId: fieldId(error.field) } : {}),
         }))}
       />
       <ModeSwitch definition={evaluation.sheet.definition} duty={duty} change={change} />

@@ -141,7 +141,7 @@ function equationInUse(
   const pickers = (definition.tables ?? []).map((table) =>
     rowPicker(table, `${key}.${table.name}`, definition.quantities, duty),
   );
-  const fromRow = new Set(pickers.flatMap((picker) => picker.rows.flatMap((row) => Object.keys(row.values))));
+  const fromRow = new Set(pickers.flatMap((picker) => Object.keys(picker.chosen?.values ?? {})));
   const own: FormItem[] = [...pickers];
   const served: EquationInUse['served'] = [];
   for (const quantity of definition.quantities) {

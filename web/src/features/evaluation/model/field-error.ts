@@ -40,3 +40,19 @@ function keyOf(path: string, fields: readonly FormField[], known: ReadonlySet<st
   )[0];
   return served !== undefined && known.has(served) ? served : '';
 }
+
+/** The message as a line of a summary, where the label beside the field is out of sight. */
+export function summaryLine({ field, message }: FieldError, sections: readonly FormSection[]): string {
+  const label =
+    fieldsOf(sections).find(({ key }) => key === field)?.label ??
+    pickersOf(sections).find(({ key }) => `rows.${key}` === field)?.title ??
+    FORCE_LABELS[field];
+  return label === undefined || message.startsWith(label.split(',')[0] ?? label)
+    ? message
+    : `${label}: ${message}`;
+}
+
+const FORCE_LABELS: Readonly<Record<string, string>> = {
+  'drivingForce.interface': 'Flux, at the interface',
+  'drivingForce.bulk': 'Flux, in the bulk',
+};

@@ -31,10 +31,18 @@ export interface QuantityFieldProps {
 export function QuantityField(props: QuantityFieldProps) {
   const { id, label, symbol, typed, units, hint, optional = false, onChange } = props;
   const [busy, setBusy] = useState(false);
-  const error = props.error ?? (busy ? undefined : refusalOf(typed));
-  const described = [hint ? `${id}-hint` : null, error ? `${id}-error` : null].filter(Boolean).join(' ');
+  const asked = isAsked(typed);
+  const error = asked ? undefined : (props.error ?? (busy ? undefined : refusalOf(typed)));
+  const wrong = props.error !== undefined || error !== undefined;
+  const described = [
+    asked ? `${id}-question` : null,
+    error ? `${id}-error` : null,
+    hint ? `${id}-hint` : null,
+  ]
+    .filter(Boolean)
+    .join(' ');
   return (
-    <div className={`quantity${error ? ' quantity-wrong' : ''}`}>
+    <div className={wrong ? 'quantity quantity-wrong' : 'quantity'}>
       <label className="quantity-label" htmlFor={id}>
         <LabelWords label={label} symbol={symbol} />
         {optional ? <span className="quantity-optional"> (optional)</span> : null}
@@ -47,7 +55,7 @@ export function QuantityField(props: QuantityFieldProps) {
           autoComplete="off"
           spellCheck={false}
           value={typed.text}
-          aria-invalid={error !== undefined}
+          aria-invalid={wrong}
           aria-describedby={described || undefined}
           onChange={(event) => onChange({ text: event.target.value, unit: typed.unit })}
           onFocus={() => setBusy(true)}
@@ -98,6 +106,11 @@ function UnitPicker({ label, typed, units, onChange }: UnitPickerProps) {
       ))}
     </select>
   );
+}
+
+/** Whether the field itself is asking something, which says more than an error would. */
+function isAsked({ text, unitBefore }: TypedQuantity): boolean {
+  return unitBefore !== undefined || parseTypedNumber(text).kind === 'ask';
 }
 
 function refusalOf(typed: TypedQuantity): string | undefined {

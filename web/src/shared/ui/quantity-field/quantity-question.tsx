@@ -18,7 +18,12 @@ export function QuantityQuestion({ label, typed, inputId, onChange }: QuantityQu
     document.getElementById(inputId)?.focus();
   };
   return (
-    <div role="status" className="quantity-question" aria-label={`Question about ${label}`}>
+    <div
+      role="status"
+      id={`${inputId}-question`}
+      className="quantity-question"
+      aria-label={`Question about ${label}`}
+    >
       {questionOf(typed, answer)}
     </div>
   );
