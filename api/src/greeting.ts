@@ -1,7 +1,7 @@
 import type { AddressInfo } from 'node:net';
 import type { NestExpressApplication } from '@nestjs/platform-express';
 import { Config } from './config/config.js';
-import { DEMO_EMAIL_ENDING, DEMO_PASSWORD } from './people/demo-people.js';
+import { DEMO_PASSWORD, demoPeople } from './people/demo-people.js';
 import { OfficeService } from './people/office.service.js';
 import { PeopleService } from './people/people.service.js';
 
@@ -11,10 +11,7 @@ export function greeting(app: NestExpressApplication): string {
   const { port } = app.getHttpServer().address() as AddressInfo;
   const lines = ['', `Merestone is at ${config.origin ?? `http://localhost:${port}`}`];
   if (app.get(OfficeService).isDemo()) {
-    const people = app
-      .get(PeopleService)
-      .list()
-      .filter(({ email }) => email.endsWith(DEMO_EMAIL_ENDING));
+    const people = demoPeople(app.get(PeopleService).list());
     lines.push(
       '',
       `This is a demo office; the people are invented. All sign in with the password ${DEMO_PASSWORD}`,

@@ -10,6 +10,7 @@ import { DATABASE_FILE } from './database/database.provider.js';
 import { SeedService } from './database/seed/seed.service.js';
 import { setAsideUnfinished } from './database/set-aside-unfinished.js';
 import { greeting } from './greeting.js';
+import { CheckpointService } from './journal/checkpoint.service.js';
 
 // Whatever is written is for the server's own account: the database, its keys and its backups.
 process.umask(0o077);
@@ -34,6 +35,7 @@ async function start(config: Config): Promise<void> {
   configureApp(app);
   await app.init();
   await app.get(SeedService).fill(config.demo);
+  app.get(CheckpointService).trySigningHead();
   await app.listen(config.port);
   process.stdout.write(greeting(app));
 }

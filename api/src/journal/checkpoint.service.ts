@@ -42,14 +42,14 @@ export class CheckpointService implements OnModuleInit, OnApplicationBootstrap, 
   }
 
   onApplicationBootstrap(): void {
-    this.signInBackground();
-    this.timer = setInterval(() => this.signInBackground(), EVERY_MS);
+    this.trySigningHead();
+    this.timer = setInterval(() => this.trySigningHead(), EVERY_MS);
     this.timer.unref();
   }
 
   onApplicationShutdown(): void {
     clearInterval(this.timer);
-    this.signInBackground();
+    this.trySigningHead();
   }
 
   /** Signs the present head unless that was done already. */
@@ -64,8 +64,8 @@ export class CheckpointService implements OnModuleInit, OnApplicationBootstrap, 
     });
   }
 
-  /** A damaged journal must not keep the office from working; the verification tells what is wrong. */
-  private signInBackground(): void {
+  /** Signs the head if it can: a damaged journal must not keep the office from working. Its verification tells. */
+  trySigningHead(): void {
     try {
       this.signHead();
     } catch (error) {

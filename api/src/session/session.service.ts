@@ -3,13 +3,12 @@ import type { Request, Response } from 'express';
 import { ANONYMOUS_ACTOR, type Actor } from '../common/actor.js';
 import { AttemptLimiter } from '../common/attempt-limiter.js';
 import { ApiProblem } from '../common/problem.js';
-import { ROLES } from '../common/roles.js';
 import { Config } from '../config/config.js';
 import { Writer } from '../database/write.js';
-import { DEMO_EMAIL_ENDING, DEMO_PASSWORD } from '../people/demo-people.js';
+import { DEMO_PASSWORD, demoPeople } from '../people/demo-people.js';
 import { OfficeService } from '../people/office.service.js';
 import { PeopleService } from '../people/people.service.js';
-import { normalEmail, type Person } from '../people/person.js';
+import { normalEmail } from '../people/person.js';
 import {
   demoPeopleResponse,
   sessionResponse,
@@ -83,12 +82,6 @@ export class SessionService {
   /** The invented people, by role, for the sign-in page of a demo office. */
   demoPeople(): DemoPeopleResponse {
     if (!this.office.isDemo()) throw new ApiProblem('not-found', 'This is not a demo office.');
-    const rank = ({ roles }: Person): number =>
-      roles[0] === undefined ? ROLES.length : ROLES.indexOf(roles[0]);
-    const people = this.people.list().filter(({ email }) => email.endsWith(DEMO_EMAIL_ENDING));
-    return demoPeopleResponse(
-      people.sort((a, b) => rank(a) - rank(b)),
-      DEMO_PASSWORD,
-    );
+    return demoPeopleResponse(demoPeople(this.people.list()), DEMO_PASSWORD);
   }
 }
