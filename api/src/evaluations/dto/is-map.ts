@@ -1,4 +1,5 @@
 import { registerDecorator } from 'class-validator';
+import { AsGiven } from '../../common/as-given.js';
 import { ApiProblem, type FieldProblem } from '../../common/problem.js';
 import { inputMapProblems, nameMapProblems } from './read-map.js';
 
@@ -15,6 +16,7 @@ export function IsNameMap() {
 /** Throws its own problem: each key has a fault of its own, and a validator's message has room for one sentence. */
 function mapDecorator(name: string, problemsOf: (field: string, value: unknown) => FieldProblem[]) {
   return (target: object, propertyName: string): void => {
+    AsGiven()(target, propertyName);
     registerDecorator({
       name,
       target: target.constructor,
@@ -31,9 +33,7 @@ function mapDecorator(name: string, problemsOf: (field: string, value: unknown) 
             fields,
           });
         },
-        defaultMessage: (
-          { value } = { value: undefined, targetName: '', object: {}, property: '', constraints: [] },
-        ) => problemsOf(propertyName, value)[0]?.message ?? 'must be an object.',
+        defaultMessage: (args) => problemsOf(propertyName, args?.value)[0]?.message ?? 'must be an object.',
       },
     });
   };

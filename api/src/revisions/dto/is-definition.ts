@@ -1,4 +1,5 @@
 import { registerDecorator } from 'class-validator';
+import { AsGiven } from '../../common/as-given.js';
 import { readCorrelation } from '../definition-check.js';
 
 /**
@@ -7,6 +8,7 @@ import { readCorrelation } from '../definition-check.js';
  */
 export function IsCorrelationDefinition() {
   return (target: object, propertyName: string): void => {
+    AsGiven()(target, propertyName);
     registerDecorator({
       name: 'isCorrelationDefinition',
       target: target.constructor,
