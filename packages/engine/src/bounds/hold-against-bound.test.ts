@@ -203,3 +203,13 @@ test('units and labels stand in the message', () => {
   expect(finding.unit).toBe('K');
   expect(finding.message).toMatch(/^rho\.T = 500\u2009K is 1\.25 × the upper bound 400 \(from a handbook\)/);
 });
+
+describe('where near says nothing', () => {
+  test('a stretch that stands for a single value is never near', () => {
+    expect(hold(bound({ lo: end(0.99), hi: end(1.01) }), 1).kind).toBe('within');
+  });
+
+  test('a physical limit is never near: a fraction of 0.99 is just a fraction', () => {
+    expect(hold(bound({ lo: end(0, 'physical'), hi: end(1, 'physical') }), 0.99).kind).toBe('within');
+  });
+});

@@ -76,7 +76,7 @@ function insideFinding(blank: Finding, { lo, hi }: Stretch, value: number): Find
   const upper = (toHi ?? 0) >= (toLo ?? 0);
   const ratio = upper ? toHi : toLo;
   const end = upper ? hi : lo;
-  const near = ratio !== null && ratio > 1 - NEAR;
+  const near = ratio !== null && ratio > 1 - NEAR && end?.nature !== 'physical' && !narrow(lo, hi);
   const shown = `${blank.symbol} = ${formatNumber(value)}${unitText(blank.unit)}`;
   return {
     ...blank,
@@ -87,6 +87,11 @@ function insideFinding(blank: Finding, { lo, hi }: Stretch, value: number): Find
       ? `${shown} is in bounds, near the ${upper ? 'upper' : 'lower'} bound ${formatNumber(end?.value ?? 0)}.`
       : `${shown} is in bounds.`,
   };
+}
+
+/** A stretch so short that all of it would be near: it stands for a single value. */
+function narrow(lo: BoundEnd | undefined, hi: BoundEnd | undefined): boolean {
+  return lo !== undefined && hi !== undefined && lo.value > 0 && hi.value / lo.value < 1 + 2 * NEAR;
 }
 
 /** Value over upper limit, or lower limit over value; null where that says nothing. */

@@ -1,7 +1,8 @@
+import { holds } from '../bounds/interval.js';
 import { kernelFor } from '../evaluation/kernel.js';
 import type { Reckoner } from '../evaluation/reckoner.js';
 import { formatNumber } from '../expression/number-text.js';
-import { toSI } from '../quantity/unit.js';
+import { fromSI, toSI } from '../quantity/unit.js';
 import {
   slotOf,
   unitOf,
@@ -60,13 +61,15 @@ function seamRemark(sheet: CompiledSheet, { line }: CompiledLine, seam: Seam, po
   const slot = slotOf(sheet, seam.on);
   if (!unit || slot === undefined) return [];
   const given = [...new Set([...box.held.keys(), ...box.sides.map(({ symbol }) => symbol), seam.on])];
-  const others = [...seam.below.needs, ...seam.above.needs].filter((need) => sheet.lines.has(need));
+  const conditions = [...seam.below.when, ...seam.above.when].filter(({ on }) => on !== seam.on);
+  const others = [...seam.below.needs, ...seam.above.needs, ...conditions.map(({ on }) => on)];
   let jump = 0;
   for (let i = 0; i < SAMPLES; i += 1) {
     const values = new Float64Array(sheet.slots).fill(Number.NaN);
     for (const [symbol, value] of samplePoint(box, i)) values[slotOf(sheet, symbol) ?? 0] = value;
     values[slot] = toSI(seam.at, unit);
-    for (const need of others) fill(sheet, values, given, need);
+    for (const need of others) if (sheet.lines.has(need)) fill(sheet, values, given, need);
+    if (!conditions.every(({ on, interval }) => holds(shownAt(sheet, values, on), interval))) continue;
     const ratio = seam.above.run(values) / seam.below.run(values);
     if (Number.isFinite(ratio) && ratio > 0)
       jump = Math.max(jump, Math.abs(ratio - 1), Math.abs(1 / ratio - 1));
@@ -79,6 +82,12 @@ function seamRemark(sheet: CompiledSheet, { line }: CompiledLine, seam: Seam, po
       message: `${line.symbol} jumps by ${formatNumber(jump * 100, 2)} % at most at the seam ${seam.on} = ${formatNumber(seam.at)}.`,
     },
   ];
+}
+
+function shownAt(sheet: CompiledSheet, values: Float64Array, symbol: string): number {
+  const unit = unitOf(sheet, symbol);
+  const value = values[slotOf(sheet, symbol) ?? 0] ?? Number.NaN;
+  return unit ? fromSI(value, unit) : value;
 }
 
 /** Computes a line the seam's formulas stand on, unless it is among the sampled symbols. */
