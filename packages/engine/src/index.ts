@@ -70,7 +70,7 @@ export { parse, type ExpressionFault, type Parsed } from './expression/parse.js'
 export { formatNumber, numberTex } from './expression/number-text.js';
 export { symbolTex } from './expression/symbol-tex.js';
 
-export { QUANTITIES, serves } from './quantity/dictionary.js';
+export { QUANTITIES, serves, servingQuantity } from './quantity/dictionary.js';
 export type { DictionaryEntry, Sign } from './quantity/dictionary-entry.js';
 export { readUnit, type Unit, type UnitReading } from './quantity/unit.js';
 export { unitsFor, convert } from './quantity/unit-choices.js';

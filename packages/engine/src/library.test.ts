@@ -181,7 +181,11 @@ describe('duties', () => {
       ...moistAir,
       inputs: { ...moistAir.inputs, T_i: { value: 101, unit: 'degC' } },
     });
-    expect(evaluation.ok).toBe(false);
+    expect(evaluation).toMatchObject({ ok: true, outcome: { outcome: 'refused' } });
+    const findings = evaluation.ok ? evaluation.outcome.findings : [];
+    expect(findings).toContainEqual(
+      expect.objectContaining({ symbol: 'p_BM.p_Bi', kind: 'outside', nature: 'definition', deviable: false }),
+    );
   });
 
   it('refuses a Schmidt number at which nobody measured', () => {

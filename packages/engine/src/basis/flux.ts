@@ -17,9 +17,8 @@ export interface ReadForce {
 
 /** Reads a driving force: both ends in one kind, with units of that kind. */
 export function readDrivingForce(force: DrivingForce): { force: ReadForce | null; problems: Problem[] } {
-  const target = forceTarget(force.kind);
   const ends = (['interface', 'bulk'] as const).map((end) =>
-    readValue(force[end], target, `drivingForce.${end}`),
+    readValue(force[end], forceTarget(force.kind, end), `drivingForce.${end}`),
   );
   const [at, bulk] = ends;
   if (at?.ok && bulk?.ok)
@@ -27,8 +26,8 @@ export function readDrivingForce(force: DrivingForce): { force: ReadForce | null
   return { force: null, problems: ends.flatMap((end) => (end.ok ? [] : [end.problem])) };
 }
 
-function forceTarget(kind: DrivingForce['kind']): Target {
-  if (kind === 'partial-pressure') return targetByName('partial-pressure-interface');
+function forceTarget(kind: DrivingForce['kind'], end: 'interface' | 'bulk'): Target {
+  if (kind === 'partial-pressure') return targetByName(`partial-pressure-${end}`);
   const unit = readUnit(kind === 'concentration' ? 'mol/m^3' : '1');
   if (!unit.ok) throw new RangeError('a unit of the engine cannot be read');
   const title = kind === 'concentration' ? 'Concentration' : 'Mole fraction';
@@ -51,13 +50,20 @@ export function fluxFrom(
   const basis = basisFor(force.kind, coefficient.phase);
   if (!basis)
     return fault(
+      'malformed',
       `A ${force.kind.replace('-', ' ')} difference has no coefficient in a liquid; use a concentration or mole fraction.`,
     );
   if (force.kind === 'mole-fraction' && Math.max(force.interface, force.bulk) > 1)
-    return fault('A mole fraction is at most 1.');
+    return fault('domain', 'A mole fraction is at most 1.');
+  if (
+    force.kind === 'partial-pressure' &&
+    Math.max(force.interface, force.bulk) > (state.pressure ?? Infinity)
+  )
+    return fault('domain', 'A partial pressure is at most the total pressure.');
   const converted = convertBasis(coefficient, basis, state);
   if (converted.value === null)
     return fault(
+      'missing',
       `For a flux on this driving force the ${converted.missing.join(' and the ')} must be known.`,
     );
   const difference = force.interface - force.bulk;
@@ -77,8 +83,8 @@ export function fluxFrom(
   };
 }
 
-function fault(message: string): { ok: false; problem: Problem } {
-  return { ok: false, problem: { code: 'missing', field: 'drivingForce', message } };
+function fault(code: Problem['code'], message: string): { ok: false; problem: Problem } {
+  return { ok: false, problem: { code, field: 'drivingForce', message } };
 }
 
 function basisFor(kind: DrivingForce['kind'], phase: 'gas' | 'liquid'): CoefficientBasis | null {

@@ -1,9 +1,10 @@
-import type { CompiledCorrelation, CompiledSheet, PropertyLibrary } from '../sheet/compiled.js';
+import type { CompiledCorrelation, PropertyLibrary } from '../sheet/compiled.js';
 import { readDrivingForce, type ReadForce } from '../basis/flux.js';
 import { checkDeviationForm, checkDeviationTargets, coveringDeviations } from './check-deviations.js';
 import { checkOverDetermined } from './check-over-determined.js';
 import { findingsOf } from './findings-of.js';
 import { readInputs } from './given-values.js';
+import { missingProblems } from './missing-problems.js';
 import { numbersOf } from './numbers-of.js';
 import {
   COEFFICIENT_BASES,
@@ -41,7 +42,8 @@ export function evaluate(
   ];
   if (problems.length > 0) return { ok: false, problems };
   const work = reckon(sheet, request, inputs.values, library);
-  if (work.missing.size > 0) return { ok: false, problems: missingProblems(sheet, work.missing) };
+  if (work.missing.size > 0)
+    return { ok: false, problems: missingProblems(sheet, request, library, work.missing) };
   return decide(compiled, request, work, force.force, inputs.remarks);
 }
 
@@ -114,21 +116,4 @@ function checkBases({ bases = [] }: EvaluationRequest): Problem[] {
           },
         ],
   );
-}
-
-function missingProblems(sheet: CompiledSheet, missing: ReadonlySet<string>): Problem[] {
-  return [...missing].map((symbol): Problem => {
-    const quantity = sheet.quantities.get(symbol);
-    const title = quantity?.entry.title ?? symbol;
-    const ways = [
-      ...(quantity?.definition.table ? [`choose a row of "${quantity.definition.table}"`] : []),
-      ...(quantity?.definition.equations?.length ? ['name a property equation for it'] : []),
-    ];
-    const otherwise = ways.length > 0 ? `, or ${ways.join(', or ')}` : '';
-    return {
-      code: 'missing',
-      field: `inputs.${symbol}`,
-      message: `${title} (${symbol}) is needed: give it${otherwise}.`,
-    };
-  });
 }

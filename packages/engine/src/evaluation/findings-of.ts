@@ -1,4 +1,5 @@
 import { formatNumber } from '../expression/number-text.js';
+import { holds, type Interval } from '../bounds/interval.js';
 import { holdAgainstBound } from '../bounds/hold-against-bound.js';
 import { unitOf, type CompiledLine, type CompiledSheet } from '../sheet/compiled.js';
 import type { Finding } from './outcome.js';
@@ -23,7 +24,7 @@ export function findingsOf(
 }
 
 function equationFindings({ symbol, reckoner }: FilledQuantity): Finding[] {
-  return reckoner.sheet.bounds.map((bound) => {
+  const own = reckoner.sheet.bounds.map((bound) => {
     const value = reckoner.solve(bound.on) ? reckoner.shownValueOf(bound.on) : null;
     return holdAgainstBound(
       bound,
@@ -32,6 +33,7 @@ function equationFindings({ symbol, reckoner }: FilledQuantity): Finding[] {
       `${symbol}.${bound.on}`,
     );
   });
+  return [...own, ...gapFindings(reckoner, `${symbol}.`)];
 }
 
 /** Symbols needed by no part that was worked out, though by one that was not. */
@@ -51,24 +53,25 @@ function collect(sheet: CompiledSheet, symbol: string, into: Set<string>): void 
 }
 
 /** Where no piece of an equation holds, the symbols whose value falls in the gap, with the neighbours named. */
-function gapFindings(reckoner: Reckoner): Finding[] {
+function gapFindings(reckoner: Reckoner, prefix = ''): Finding[] {
   return [...reckoner.gaps].flatMap((symbol) => {
     const line = reckoner.sheet.lines.get(symbol);
-    return line ? gapFinding(reckoner, line) : [];
+    return line ? gapFinding(reckoner, line, prefix) : [];
   });
 }
 
-function gapFinding(reckoner: Reckoner, { line, variants }: CompiledLine): Finding[] {
+function gapFinding(reckoner: Reckoner, { line, variants }: CompiledLine, prefix: string): Finding[] {
   const symbols = [...new Set(variants.flatMap(({ when }) => when.map(({ on }) => on)))];
-  return symbols.map((on) => {
+  const sides = symbols.map((on) => {
     const value = reckoner.shownValueOf(on);
     const intervals = variants.flatMap(({ when }) => when.filter((c) => c.on === on).map((c) => c.interval));
-    const below = Math.max(...intervals.map(({ hi }) => hi ?? Infinity).filter((hi) => hi <= value));
-    const above = Math.min(...intervals.map(({ lo }) => lo ?? -Infinity).filter((lo) => lo >= value));
-    const lo = Number.isFinite(below) ? below : null;
-    const hi = Number.isFinite(above) ? above : null;
+    return { on, value, ...neighboursOf(value, intervals) };
+  });
+  // Where every symbol for itself lies in some piece, it is their combination that none covers.
+  const uncovered = sides.filter(({ covered }) => !covered);
+  return (uncovered.length > 0 ? uncovered : sides).map(({ on, value, lo, hi }) => {
     return {
-      symbol: on,
+      symbol: `${prefix}${on}`,
       kind: 'between',
       value,
       unit: unitOf(reckoner.sheet, on)?.text ?? '1',
@@ -81,9 +84,29 @@ function gapFinding(reckoner: Reckoner, { line, variants }: CompiledLine): Findi
       ratio: null,
       deviable: false,
       beyond: [],
-      message: `No piece of the equation for ${line.symbol} covers ${on} = ${formatNumber(value)}${neighbours(lo, hi)}.`,
+      message: `No piece of the equation for ${nameOf(line, prefix)} covers ${on} = ${formatNumber(value)}${neighbours(lo, hi)}.`,
     };
   });
+}
+
+/** What the message calls a line: of a property equation the quantity that it fills. */
+function nameOf({ symbol }: CompiledLine['line'], prefix: string): string {
+  return prefix ? prefix.slice(0, -1) : symbol;
+}
+
+/** The ends of the intervals next to a value that lies in none of them. */
+function neighboursOf(
+  value: number,
+  intervals: readonly Interval[],
+): { covered: boolean; lo: number | null; hi: number | null } {
+  if (intervals.some((interval) => holds(value, interval))) return { covered: true, lo: null, hi: null };
+  const below = Math.max(...intervals.flatMap(({ hi }) => (hi !== undefined && hi <= value ? [hi] : [])));
+  const above = Math.min(...intervals.flatMap(({ lo }) => (lo !== undefined && lo >= value ? [lo] : [])));
+  return {
+    covered: false,
+    lo: Number.isFinite(below) ? below : null,
+    hi: Number.isFinite(above) ? above : null,
+  };
 }
 
 function neighbours(lo: number | null, hi: number | null): string {

@@ -98,14 +98,18 @@ export class Reckoner {
   }
 
   private fault(symbol: string, { line }: CompiledLine, variant: CompiledVariant): void {
-    if (this.faults.some(({ field }) => field === symbol)) return;
     const inputs = variant.needs
       .map((need) => `${need} = ${this.shownValueOf(need).toPrecision(4)}`)
       .join(', ');
-    this.faults.push({
+    this.addFault({
       code: 'domain',
       field: symbol,
       message: `${line.name} (${symbol}) has no finite value at ${inputs}.`,
     });
+  }
+
+  /** Keeps a fault, once for each field. */
+  addFault(problem: Problem): void {
+    if (!this.faults.some(({ field }) => field === problem.field)) this.faults.push(problem);
   }
 }

@@ -1,4 +1,4 @@
-import { serves } from '../quantity/dictionary.js';
+import { servingQuantity } from '../quantity/dictionary.js';
 import { fromSI, measuresSame, toSI } from '../quantity/unit.js';
 import {
   unitOf,
@@ -41,6 +41,7 @@ export function suppliesFor(
   const filled: FilledQuantity[] = [];
   const rows = new Map<string, string>();
   const inProgress = new Set<string>();
+  const definitions = [...sheet.quantities.values()].map(({ definition }) => definition);
   let outer: Reckoner | null = null;
 
   const fromEquation = (quantity: CompiledQuantity, missing: Set<string>): number | null => {
@@ -50,12 +51,16 @@ export function suppliesFor(
     if (!equation || !outer || inProgress.has(symbol)) return null;
     inProgress.add(symbol);
     const inner = new Reckoner(equation.sheet, innerSupply(symbol, equation, outer));
-    const solved = inner.solve(PROPERTY_ANSWER, missing);
+    const lacking = new Set<string>();
+    const solved = inner.solve(PROPERTY_ANSWER, lacking);
     inProgress.delete(symbol);
-    outer.faults.push(...inner.faults.map((fault) => ({ ...fault, field: `${symbol}.${fault.field}` })));
-    if (!solved) return null;
-    filled.push({ symbol, equation, reckoner: inner });
-    return inner.valueOf(PROPERTY_ANSWER);
+    for (const name of lacking) missing.add(name);
+    if (lacking.size > 0) return null;
+    // An equation without a value here is kept too: its bounds and its gaps say why.
+    if (!filled.some((other) => other.symbol === symbol)) filled.push({ symbol, equation, reckoner: inner });
+    const faults = solved ? signFaults(quantity, equation, inner) : inner.faults;
+    for (const fault of faults) outer.addFault({ ...fault, field: `${symbol}.${fault.field}` });
+    return solved && faults.length === 0 ? inner.valueOf(PROPERTY_ANSWER) : null;
   };
 
   /** The equation's own inputs: given as `rho.T`, from its table's row, or the sheet's quantity of that name. */
@@ -70,19 +75,12 @@ export function suppliesFor(
         rows.set(row.name, row.key);
         return row.value;
       }
-      const match = [...sheet.quantities.values()].filter((q) =>
-        serves(q.definition.is, wanted.definition.is),
-      );
-      const exact = match.find((q) => q.definition.is === wanted.definition.is) ?? match[0];
-      if (exact && !inProgress.has(exact.definition.symbol)) {
-        const found = new Set<string>();
-        if (sheetReckoner.solve(exact.definition.symbol, found))
-          return sheetReckoner.valueOf(exact.definition.symbol);
-        for (const name of found) missing.add(name);
+      const match = servingQuantity(definitions, wanted.definition.is)?.symbol;
+      if (match === undefined || inProgress.has(match)) {
+        missing.add(`${symbol}.${inner}`);
         return null;
       }
-      missing.add(`${symbol}.${inner}`);
-      return null;
+      return sheetReckoner.solve(match, missing) ? sheetReckoner.valueOf(match) : null;
     };
 
   const supply: Supply = (quantity, missing) => {
@@ -100,6 +98,20 @@ export function suppliesFor(
   };
 
   return { supply, filled, rows, attach: (reckoner) => void (outer = reckoner) };
+}
+
+/** A property equation outside its range can give what no fluid has, such as a density below zero. */
+function signFaults({ entry }: CompiledQuantity, equation: CompiledEquation, inner: Reckoner): Problem[] {
+  const value = inner.valueOf(PROPERTY_ANSWER);
+  if (entry.sign === 'any' || value > 0 || (entry.sign === 'non-negative' && value === 0)) return [];
+  const shown = `${inner.shownValueOf(PROPERTY_ANSWER).toPrecision(4)} ${equation.definition.unit}`;
+  return [
+    {
+      code: 'domain',
+      field: PROPERTY_ANSWER,
+      message: `${equation.definition.title} gives ${shown} here, which ${entry.title.toLowerCase()} cannot be.`,
+    },
+  ];
 }
 
 function rowValue(

@@ -42,6 +42,19 @@ export function serves(given: string, wanted: string): boolean {
   return given === wanted || covers(given, wanted) || covers(wanted, given);
 }
 
+/**
+ * The quantity that serves where `wanted` is asked for: the one of that name, else the one that stands for it under a
+ * wider or narrower name. Where there are two of a kind nobody but a person can say which; then there is none.
+ */
+export function servingQuantity<T extends { is: string }>(
+  quantities: readonly T[],
+  wanted: string,
+): T | undefined {
+  const exact = quantities.filter(({ is }) => is === wanted);
+  const [match, ...others] = exact.length > 0 ? exact : quantities.filter(({ is }) => serves(is, wanted));
+  return others.length > 0 ? undefined : match;
+}
+
 function covers(wide: string, narrow: string): boolean {
   return QUANTITIES[wide]?.covers?.includes(narrow) ?? false;
 }

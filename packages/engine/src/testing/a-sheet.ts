@@ -3,6 +3,7 @@ import { evaluate } from '../evaluation/evaluate.js';
 import { checkPropertyStructure, checkStructure } from '../sheet/check-structure.js';
 import { compileCorrelation, compilePropertyEquation } from '../sheet/compile-sheet.js';
 import type { CompiledCorrelation, CompiledEquation, PropertyLibrary } from '../sheet/compiled.js';
+import type { Quantity } from '../sheet/common-schema.js';
 import type { CorrelationDefinition, Part, PropertyEquationDefinition } from '../sheet/definition.js';
 
 const source = {
@@ -192,6 +193,22 @@ export function compiledEquation(key: string, definition: PropertyEquationDefini
   const result = compilePropertyEquation(key, structure.definition);
   if (!result.ok) throw new Error(problemText(result.problems));
   return result.compiled;
+}
+
+/** What keeps the changed sheet from compiling. */
+export function definitionProblems(changes: Partial<CorrelationDefinition>): Problem[] {
+  const result = compileCorrelation(aSheet(changes));
+  return result.ok ? [] : result.problems;
+}
+
+/** The one part of the sheet with its result changed. */
+export function partWith(result: Partial<Part['result']>): Part {
+  return { ...GAS_PART, result: { ...GAS_PART.result, ...result } };
+}
+
+/** The sheet's quantities with one of them changed. */
+export function quantitiesWith(symbol: string, change: Partial<Quantity>): Quantity[] {
+  return aSheet().quantities.map((q) => (q.symbol === symbol ? { ...q, ...change } : q));
 }
 
 function problemText(problems: readonly Problem[]): string {
