@@ -88,6 +88,20 @@ describe('bodies', () => {
     expect(problem.fields?.map((entry) => entry.field)).toEqual([field]);
   });
 
+  it('just under a megabyte are read to their end, whatever they hold', async () => {
+    const room = 1024 * 1024 - 100;
+    for (const long of ['a'.repeat(room), String.raw`\"`.repeat(room / 2), String.raw`\\`.repeat(room / 2)]) {
+      expect(problemOf(await send(`{"email":"${long}","password":"x"}`).expect(400)).fields?.[0]?.field).toBe(
+        'email',
+      );
+    }
+    const many = `{"a":[${'{},'.repeat(room / 3 - 10)}{}]}`;
+    expect(codeOf(await send(many).expect(400))).toBe('malformed');
+    expect(codeOf(await send(`{"a":${'['.repeat(room / 2)}${']'.repeat(room / 2)}}`).expect(400))).toBe(
+      'malformed',
+    );
+  });
+
   it('of more than a megabyte are refused, however they are sent', async () => {
     const big = `{"email":"${'a'.repeat(10 * 1024 * 1024)}"}`;
     expect(codeOf(await send(big).expect(413))).toBe('too-large');

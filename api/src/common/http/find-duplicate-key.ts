@@ -1,5 +1,3 @@
-const STRING = /"(?:[^"\\]|\\.)*"/y;
-
 interface Level {
   /** Names seen so far; undefined inside an array. */
   readonly keys: Set<string> | undefined;
@@ -51,7 +49,9 @@ export function findDuplicateKey(text: string): string | undefined {
   return undefined;
 }
 
+/** The string literal that begins at a place, quotes included. */
 function stringAt(text: string, at: number): string {
-  STRING.lastIndex = at;
-  return STRING.exec(text)?.[0] ?? '""';
+  let end = at + 1;
+  while (end < text.length && text[end] !== '"') end += text[end] === '\\' ? 2 : 1;
+  return text.slice(at, end + 1);
 }

@@ -1,6 +1,8 @@
 import type { FieldProblem } from '../problem.js';
 
 const DEEPEST = 64;
+/** Enough to mend what is wrong; a hostile body could hold a million faults. */
+const MOST_PROBLEMS = 100;
 const FORBIDDEN_KEYS = new Set(['__proto__', 'constructor', 'prototype']);
 
 /**
@@ -9,29 +11,45 @@ const FORBIDDEN_KEYS = new Set(['__proto__', 'constructor', 'prototype']);
  */
 export function inspectJson(value: unknown): FieldProblem[] {
   const problems: FieldProblem[] = [];
-  inspect(value, '', 0, problems);
+  inspect(value, [], problems);
   return problems;
 }
 
-function inspect(value: unknown, field: string, depth: number, problems: FieldProblem[]): void {
-  const refuse = (message: string): void => {
-    problems.push({ field, code: 'malformed', message });
-  };
-  if (typeof value === 'number' && !Number.isFinite(value)) refuse('This number is too large to be held.');
-  if (typeof value === 'string' && !isText(value)) refuse('This text holds a character that cannot be kept.');
-  if (typeof value !== 'object' || value === null) return;
-  if (depth >= DEEPEST) {
-    refuse(`This is nested deeper than ${DEEPEST} levels.`);
-    return;
-  }
-  for (const [key, inner] of Object.entries(value)) {
-    const path = field === '' ? key : `${field}.${key}`;
-    if (FORBIDDEN_KEYS.has(key) || !isText(key)) {
-      problems.push({ field: path, code: 'malformed', message: 'This name cannot be used for a field.' });
-    } else {
-      inspect(inner, path, depth + 1, problems);
+type Path = (string | number)[];
+
+/** Walks in place; the path is put into words only where something is wrong. */
+function inspect(value: unknown, path: Path, problems: FieldProblem[]): void {
+  if (problems.length >= MOST_PROBLEMS) return;
+  const fault = faultOf(value, path.length);
+  if (fault !== undefined) {
+    problems.push({ field: path.join('.'), code: 'malformed', message: fault });
+  } else if (Array.isArray(value)) {
+    for (let index = 0; index < value.length; index += 1) step(value[index], index, path, problems);
+  } else if (typeof value === 'object' && value !== null) {
+    for (const [key, inner] of Object.entries(value)) {
+      if (FORBIDDEN_KEYS.has(key) || !isText(key)) {
+        const field = [...path, key].join('.');
+        problems.push({ field, code: 'malformed', message: 'This name cannot be used for a field.' });
+      } else {
+        step(inner, key, path, problems);
+      }
     }
   }
+}
+
+function step(inner: unknown, place: string | number, path: Path, problems: FieldProblem[]): void {
+  path.push(place);
+  inspect(inner, path, problems);
+  path.pop();
+}
+
+function faultOf(value: unknown, depth: number): string | undefined {
+  if (typeof value === 'number' && !Number.isFinite(value)) return 'This number is too large to be held.';
+  if (typeof value === 'string' && !isText(value)) return 'This text holds a character that cannot be kept.';
+  if (typeof value === 'object' && value !== null && depth >= DEEPEST) {
+    return `This is nested deeper than ${DEEPEST} levels.`;
+  }
+  return undefined;
 }
 
 function isText(text: string): boolean {
