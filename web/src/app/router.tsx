@@ -1,7 +1,7 @@
 import { Navigate, createBrowserRouter, type RouteObject } from 'react-router-dom';
 import { paths } from '../shared/paths';
-import { Loading } from '../shared/ui/loading';
 import { PageFrame } from './layout/page-frame';
+import { FirstLoading } from './layout/first-loading';
 import { NotFound } from './routes/not-found';
 import { RouteError } from './routes/route-error';
 
@@ -14,12 +14,29 @@ const signedInRoutes: RouteObject[] = [
     path: '/register/:slug/revisions/:n',
     lazy: async () => ({ Component: (await import('./routes/sheet')).SheetRoute }),
   },
+  {
+    path: '/geometries',
+    lazy: async () => ({ Component: (await import('./routes/geometries')).GeometriesRoute }),
+  },
+  {
+    path: '/geometries/:slug',
+    lazy: async () => ({ Component: (await import('./routes/geometry')).GeometryRoute }),
+  },
+  {
+    path: '/property-equations',
+    lazy: async () => ({ Component: (await import('./routes/property-equations')).PropertyEquationsRoute }),
+  },
+  {
+    path: '/property-equations/:slug',
+    lazy: async () => ({ Component: (await import('./routes/property-equation')).PropertyEquationRoute }),
+  },
+  { path: '/journal', lazy: async () => ({ Component: (await import('./routes/journal')).JournalRoute }) },
 ];
 
 export const routes: RouteObject[] = [
   {
     element: <PageFrame />,
-    hydrateFallbackElement: <Loading what="the page" />,
+    hydrateFallbackElement: <FirstLoading />,
     errorElement: <RouteError />,
     children: [
       {

@@ -6,11 +6,18 @@ import { paths } from '../../shared/paths';
 import { useSession } from '../../shared/session/use-session';
 import './masthead.css';
 
-const NOUNS = [{ to: paths.register, noun: 'Register' }];
+/** The pages of the masthead; one with a permission is shown to those who have it. */
+const NOUNS: readonly { to: string; noun: string; permission?: string }[] = [
+  { to: paths.register, noun: 'Register' },
+  { to: paths.geometries, noun: 'Geometries' },
+  { to: paths.propertyEquations, noun: 'Property equations' },
+  { to: paths.journal, noun: 'Journal', permission: 'journal.read' },
+];
 
 /** The product's word, its nouns, and who is signed in. */
 export function Masthead() {
-  const { session } = useSession();
+  const { session, may } = useSession();
+  const nouns = NOUNS.filter(({ permission }) => permission === undefined || may(permission));
   return (
     <header className="masthead">
       <Link className="masthead-word" to={paths.start}>
@@ -20,7 +27,7 @@ export function Masthead() {
         <>
           <nav aria-label="Main">
             <ul className="masthead-nouns">
-              {NOUNS.map(({ to, noun }) => (
+              {nouns.map(({ to, noun }) => (
                 <li key={to}>
                   <NavLink to={to}>{noun}</NavLink>
                 </li>

@@ -158,6 +158,9 @@ export interface ListedPropertyEquation {
 export interface PropertyEquationSheet extends ListedPropertyEquation {
   definition: PropertyEquationDefinition;
   checks: CheckReport[];
+  /** Why it is not approved. */
+  standingNote: string | null;
+  caution: string;
 }
 
 export interface JournalEntry {
@@ -173,7 +176,8 @@ export interface JournalPage {
   items: JournalEntry[];
   nextCursor: string | null;
   size: number;
-  root: string;
+  /** Null when stored hashes are gone. */
+  root: string | null;
 }
 export interface JournalVerification {
   ok: boolean;

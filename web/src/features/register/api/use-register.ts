@@ -33,3 +33,5 @@ export function useRegister(filters: RegisterFilters) {
     retry,
   };
 }
+
+export type Register = ReturnType<typeof useRegister>;

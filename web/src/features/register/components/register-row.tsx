@@ -11,12 +11,14 @@ import { titleBesideAuthors } from '../model/title-beside-authors';
 import { REYNOLDS_AXIS, boundOfRow } from '../model/strip-of-row';
 
 /** One correlation: what it was measured on, whose it is, where it holds, how it stands. */
-export function RegisterRow({ item }: { item: ListedCorrelation }) {
+export function RegisterRow({ item, withGeometry }: { item: ListedCorrelation; withGeometry: boolean }) {
   return (
     <tr role="row">
-      <td role="cell" className="register-geometry">
-        <Link to={paths.geometry(item.geometry)}>{item.geometryName}</Link>
-      </td>
+      {withGeometry ? (
+        <td role="cell" className="register-geometry">
+          <Link to={paths.geometry(item.geometry)}>{item.geometryName}</Link>
+        </td>
+      ) : null}
       <th role="rowheader" scope="row" className="register-correlation">
         <Link to={paths.sheet(item.slug)}>
           {authorWords(item.authors)}

@@ -7,17 +7,21 @@ interface RegisterTableProps {
   items: readonly ListedCorrelation[];
   /** The list is out of date: newer filters are on their way. */
   stale: boolean;
+  /** Off where all rows are of one geometry. */
+  withGeometry?: boolean;
 }
 
 /** The register as a table; on a phone its rows fold into stacked lines, so roles are written out. */
-export function RegisterTable({ items, stale }: RegisterTableProps) {
+export function RegisterTable({ items, stale, withGeometry = true }: RegisterTableProps) {
   return (
     <table className="register-table" role="table" aria-label="Correlations" data-stale={stale}>
       <thead role="rowgroup">
         <tr role="row">
-          <th role="columnheader" scope="col">
-            Geometry
-          </th>
+          {withGeometry ? (
+            <th role="columnheader" scope="col" className="register-geometry">
+              Geometry
+            </th>
+          ) : null}
           <th role="columnheader" scope="col">
             Correlation
           </th>
@@ -25,14 +29,14 @@ export function RegisterTable({ items, stale }: RegisterTableProps) {
             Reynolds number
             <StripAxisScale axis={REYNOLDS_AXIS} labelled={[-3, 0, 3, 6]} />
           </th>
-          <th role="columnheader" scope="col">
+          <th role="columnheader" scope="col" className="register-standing">
             Standing
           </th>
         </tr>
       </thead>
       <tbody role="rowgroup">
         {items.map((item) => (
-          <RegisterRow key={item.slug} item={item} />
+          <RegisterRow key={item.slug} item={item} withGeometry={withGeometry} />
         ))}
       </tbody>
     </table>

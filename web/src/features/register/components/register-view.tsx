@@ -6,6 +6,7 @@ import { Loading } from '../../../shared/ui/loading';
 import { ProblemNotice } from '../../../shared/ui/problem-notice';
 import { useRegister } from '../api/use-register';
 import { NO_FILTERS, isFiltered, type RegisterFilters } from '../model/register-filters';
+import { MoreCorrelations } from './more-correlations';
 import { RegisterFiltersForm } from './register-filters-form';
 import { RegisterTable } from './register-table';
 import './register.css';
@@ -36,16 +37,7 @@ export function RegisterView({ filters, onChange }: RegisterViewProps) {
       {items && items.length > 0 ? (
         <RegisterTable items={items} stale={register.fetching && !register.fetchingMore} />
       ) : null}
-      {items && register.hasMore ? (
-        <div className="register-more">
-          <Button onClick={register.showMore} loading={register.fetchingMore}>
-            Show more correlations
-          </Button>
-          <span>
-            {items.length} of {total} shown
-          </span>
-        </div>
-      ) : null}
+      <MoreCorrelations register={register} />
     </>
   );
 }

@@ -9,7 +9,7 @@ import { MarginRow } from '../../../shared/ui/sheet-page';
 import { SymbolMark } from '../../../shared/ui/symbol-mark';
 
 /** The worked checks that every start of the machine recomputes. */
-export const ChecksSection = memo(function ChecksSection({ sheet }: { sheet: Sheet }) {
+export const ChecksSection = memo(function ChecksSection({ sheet }: { sheet: Pick<Sheet, 'checks'> }) {
   const { checks } = sheet;
   return (
     <MarginRow

@@ -1,0 +1,40 @@
+import type { JournalEntry } from '../../../shared/api/types';
+import { formatMinute } from '../../../shared/format/format-date';
+import { SetTable } from '../../../shared/ui/set-table';
+import { actWords } from '../model/act-words';
+import './journal.css';
+
+/** Entries as sentences, with when and the start of each one's hash. */
+export function JournalTable({ entries }: { entries: readonly JournalEntry[] }) {
+  return (
+    <SetTable label="Journal entries">
+      <thead>
+        <tr>
+          <th scope="col" className="journal-number">
+            No.
+          </th>
+          <th scope="col">When</th>
+          <th scope="col">Who did what</th>
+          <th scope="col">Leaf</th>
+        </tr>
+      </thead>
+      <tbody>
+        {entries.map((entry) => (
+          <tr key={entry.index}>
+            <td className="journal-number">{entry.index}</td>
+            <td className="journal-when">
+              <time dateTime={entry.at}>{formatMinute(entry.at)}</time>
+            </td>
+            <td>
+              <strong>{entry.actor?.name ?? 'Nobody signed in'}</strong> {actWords(entry.act)}
+              {entry.subject ? <span className="journal-subject">{entry.subject}</span> : null}
+            </td>
+            <td className="journal-leaf" title={entry.leaf}>
+              {entry.leaf.slice(0, 8)}
+            </td>
+          </tr>
+        ))}
+      </tbody>
+    </SetTable>
+  );
+}
