@@ -80,11 +80,17 @@ function nameText({ family, given, literal }: Name): string {
   return [family, given].map(namePart).join(', ');
 }
 
-/** Braces keep what else would be the comma after a name, the word between two, or a part's label. */
+/** Braces keep whole what is no ordinary name: BibTeX would find words between names and labels in it. */
 function namePart(text: string): string {
-  const escaped = escapedText(text);
-  return /[,="]|\band\b/i.test(escaped) ? `{${escaped}}` : escaped;
+  const ordinary = ORDINARY_NAME.test(text) && !RARE_SCRIPT.test(text) && !/\band\b/i.test(text);
+  return ordinary ? text : `{${escapedText(text)}}`;
 }
+
+/** Words, of which those joined by hyphens are capitals throughout: `al-` would be taken for a particle. */
+const ORDINARY_NAME =
+  /^(?:[\p{L}\p{M}'’.]+|\p{Lu}[\p{L}\p{M}'’.]*(?:-\p{Lu}[\p{L}\p{M}'’.]*)+)(?: [\p{L}\p{M}'’.]+)*$/u;
+/** The library tells capitals by half a character here. */
+const RARE_SCRIPT = /[\u{10000}-\u{10ffff}]/u;
 
 function escapedText(text: string): string {
   return (
