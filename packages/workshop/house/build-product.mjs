@@ -35,46 +35,53 @@ export const copyServerAssets = () => {
  * @property {() => Promise<number>} make
  */
 
-/** @type {Product[]} */
-const products = [
-  {
-    name: 'server',
-    sources: [...everywhere, ...packages, fromRoot('api', 'src'), fromRoot('api', 'tsconfig.json')],
-    outcome: fromRoot('api', 'dist', 'main.js'),
-    make: async () => {
-      const code = await runNode(typescript, ['-b', 'packages/engine', 'packages/api-client', 'api'], {
-        cwd: root,
-      });
-      if (code === 0) copyServerAssets();
-      return code;
-    },
+/** @type {Product} */
+const server = {
+  name: 'server',
+  sources: [...everywhere, ...packages, fromRoot('api', 'src'), fromRoot('api', 'tsconfig.json')],
+  outcome: fromRoot('api', 'dist', 'main.js'),
+  make: async () => {
+    const code = await runNode(typescript, ['-b', 'packages/engine', 'packages/api-client', 'api'], {
+      cwd: root,
+    });
+    if (code === 0) copyServerAssets();
+    return code;
   },
-  {
-    name: 'screens',
-    sources: [
-      ...everywhere,
-      ...packages,
-      ...['src', 'public', 'index.html', 'vite.config.ts', 'package.json', 'tsconfig.json'].map((name) =>
-        fromRoot('web', name),
-      ),
-    ],
-    outcome: fromRoot('web', 'dist', 'index.html'),
-    make: () => runNode(vite, ['build', '--logLevel', 'warn'], { cwd: fromRoot('web') }),
-  },
-];
+};
+
+/** @type {Product} */
+const screens = {
+  name: 'screens',
+  sources: [
+    ...everywhere,
+    ...packages,
+    ...['src', 'public', 'index.html', 'vite.config.ts', 'package.json', 'tsconfig.json'].map((name) =>
+      fromRoot('web', name),
+    ),
+  ],
+  outcome: fromRoot('web', 'dist', 'index.html'),
+  make: () => runNode(vite, ['build', '--logLevel', 'warn'], { cwd: fromRoot('web') }),
+};
 
 /**
- * Builds what changed since the last build that ended well. Needs an install.
- * @returns {Promise<void>}
+ * Builds one product where its sources changed since it last built well.
+ * @param {Product} product
  */
+const ensure = async ({ name, sources, outcome, make }) => {
+  const stampFile = join(cacheFolder, 'built', name);
+  const wanted = fingerprint(root, sources, [process.versions.node]);
+  if (existsSync(outcome) && readStamp(stampFile) === wanted) return;
+  console.log(`Building the ${name} …`);
+  const code = await make();
+  if (code !== 0) throw new CannotGoOn([`The ${name} did not build; see above.`]);
+  writeStamp(stampFile, wanted);
+};
+
+/** Needs an install, as the next one does. */
+export const ensureServerBuilt = () => ensure(server);
+
+/** @returns {Promise<void>} */
 export const ensureBuilt = async () => {
-  for (const { name, sources, outcome, make } of products) {
-    const stampFile = join(cacheFolder, 'built', name);
-    const wanted = fingerprint(root, sources, [process.versions.node]);
-    if (existsSync(outcome) && readStamp(stampFile) === wanted) continue;
-    console.log(`Building the ${name} …`);
-    const code = await make();
-    if (code !== 0) throw new CannotGoOn([`The ${name} did not build; see above.`]);
-    writeStamp(stampFile, wanted);
-  }
+  await ensure(server);
+  await ensure(screens);
 };

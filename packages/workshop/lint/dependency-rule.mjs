@@ -188,19 +188,20 @@ const prohibitions = [
   },
   {
     from: { element: { type: api }, file: { categories: 'pure' } },
-    disallow: {
-      to: [
-        { module: { source: ['@nestjs/*', 'drizzle-orm', 'better-sqlite3'] } },
-        { file: { categories: ['controller', 'service', 'repository', 'nest-module'] } },
-      ],
-    },
-    message: 'Policies, errors and mappers are free of Nest, Drizzle and everything that reads or writes.',
+    disallow: { to: { module: { source: ['@nestjs/*', 'drizzle-orm', 'better-sqlite3'] } } },
+    message: 'Policies, errors and mappers are free of Nest and Drizzle.',
   },
   {
     from: { element: { type: api }, file: { categories: 'pure' } },
     dependency: { kind: 'value' },
-    disallow: { to: local('api-database') },
-    message: 'Policies, errors and mappers may name the types of rows, but use nothing of the database.',
+    disallow: {
+      to: [
+        { file: { categories: ['controller', 'service', 'repository', 'nest-module'] } },
+        local('api-database'),
+      ],
+    },
+    message:
+      'Policies, errors and mappers may name the types of what reads and writes, but use nothing of it.',
   },
   {
     from: { element: { type: 'api-feature' }, file: product },

@@ -199,6 +199,8 @@ describe('the dependency rule', () => {
   it('lets a mapper name the type of a row, and nothing else of the database', async () => {
     const file = `${feature}/correlations.mapper.ts`;
     expect(await complaints(file, `import type { Row } from '../database/schema/people.js';\n`)).toEqual([]);
+    expect(await complaints(file, `import type { Row } from './correlations.read-model.js';\n`)).toEqual([]);
+    expect(await complaints(file, `import type { SQL } from 'drizzle-orm';\n`)).toHaveLength(1);
     expect(await complaints(file, `import { people } from '../database/schema/people.js';\n`)).toHaveLength(
       1,
     );
