@@ -2,14 +2,16 @@ import type { AddressInfo } from 'node:net';
 import type { NestExpressApplication } from '@nestjs/platform-express';
 import { Config } from './config/config.js';
 import { DEMO_PASSWORD, demoPeople } from './people/demo-people.js';
+import { FirstAdministratorService } from './people/first-administrator.service.js';
 import { OfficeService } from './people/office.service.js';
 import { PeopleService } from './people/people.service.js';
 
-/** What the terminal says once the server can be used: where it is and, of a demo office, how to sign in. */
+/** What the terminal says once the server can be used: where it is, and how to sign in. */
 export function greeting(app: NestExpressApplication): string {
   const config = app.get(Config);
   const { port } = app.getHttpServer().address() as AddressInfo;
-  const lines = ['', `Merestone is at ${config.origin ?? `http://localhost:${port}`}`];
+  const address = config.origin ?? `http://localhost:${port}`;
+  const lines = ['', `Merestone is at ${address}`];
   if (app.get(OfficeService).isDemo()) {
     const people = demoPeople(app.get(PeopleService).list());
     lines.push(
@@ -18,6 +20,15 @@ export function greeting(app: NestExpressApplication): string {
     );
     lines.push(
       ...people.map(({ email, name, roles }) => `  ${email.padEnd(36)}${roles.join(', ').padEnd(24)}${name}`),
+    );
+  }
+  const token = app.get(FirstAdministratorService).newToken();
+  if (token !== undefined) {
+    // Behind the # it reaches no log.
+    lines.push(
+      '',
+      'There is no administrator yet. This link lets the first one in, once, until the server ends:',
+      `  ${address}/first-administrator#${token}`,
     );
   }
   return `${lines.join('\n')}\n\n`;

@@ -1,5 +1,7 @@
 import { Module } from '@nestjs/common';
 import { AttemptLimiter } from '../common/attempt-limiter.js';
+import { FirstAdministratorController } from './first-administrator.controller.js';
+import { FirstAdministratorService } from './first-administrator.service.js';
 import { OfficeService } from './office.service.js';
 import { PasswordService } from './password.service.js';
 import { PeopleController } from './people.controller.js';
@@ -8,7 +10,7 @@ import { PeopleService } from './people.service.js';
 import { SigningService } from './signing.service.js';
 
 @Module({
-  controllers: [PeopleController],
+  controllers: [PeopleController, FirstAdministratorController],
   providers: [
     PeopleRepository,
     PeopleService,
@@ -16,7 +18,8 @@ import { SigningService } from './signing.service.js';
     SigningService,
     OfficeService,
     AttemptLimiter,
+    FirstAdministratorService,
   ],
-  exports: [PeopleService, SigningService, OfficeService, AttemptLimiter],
+  exports: [PeopleService, FirstAdministratorService, SigningService, OfficeService, AttemptLimiter],
 })
 export class PeopleModule {}

@@ -33,6 +33,23 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/people/first-administrator": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** The first person of an office, with the token from the server's terminal */
+        post: operations["addFirstAdministrator"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/journal": {
         parameters: {
             query?: never;
@@ -447,6 +464,15 @@ export interface components {
         };
         PeopleResponse: {
             items: components["schemas"]["PersonEntry"][];
+        };
+        FirstAdministratorBody: {
+            /** @description The token of the link that the server's terminal shows */
+            token: string;
+            name: string;
+            /** Format: email */
+            email: string;
+            /** Format: password */
+            password: string;
         };
         JournalActor: {
             id: string;
@@ -1602,6 +1628,45 @@ export interface operations {
                 content?: never;
             };
             /** @description Needs the permission people.list */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    addFirstAdministrator: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["FirstAdministratorBody"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PersonEntry"];
+                };
+            };
+            /** @description The token does not hold, or there is an administrator */
             403: {
                 headers: {
                     [name: string]: unknown;
