@@ -1,6 +1,8 @@
 import { Module, type DynamicModule } from '@nestjs/common';
 import { APP_GUARD } from '@nestjs/core';
+import { AttachmentsModule } from './attachments/attachments.module.js';
 import { CandidatesModule } from './candidates/candidates.module.js';
+import { CitationsModule } from './citations/citations.module.js';
 import { CorrelationsModule } from './correlations/correlations.module.js';
 import { SeedModule } from './database/seed/seed.module.js';
 import { EvaluationsModule } from './evaluations/evaluations.module.js';
@@ -27,7 +29,9 @@ import { SessionModule } from './session/session.module.js';
     PeopleModule,
     SessionModule,
     SeedModule,
+    AttachmentsModule,
     CandidatesModule,
+    CitationsModule,
     CorrelationsModule,
     EvaluationsModule,
     GeometriesModule,

@@ -25,6 +25,7 @@ export const PROBLEM_CODES = {
   duplicate: { status: 409, title: 'This exists already' },
   'too-large': { status: 413, title: 'The request is too large' },
   'unsupported-media-type': { status: 415, title: 'The body is not JSON' },
+  'file-type': { status: 415, title: 'This file cannot be kept' },
   'out-of-bounds': { status: 422, title: 'A value is outside a bound' },
   'past-reach': { status: 422, title: 'A value is too far outside a bound' },
   'between-pieces': { status: 422, title: 'A value falls between the stated ranges' },

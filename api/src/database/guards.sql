@@ -315,3 +315,101 @@ WHEN EXISTS (
 BEGIN
   SELECT RAISE(ABORT, 'the content of this revision is frozen');
 END;
+
+-- Attached documents stay as they were put; only where one may go can be set anew.
+
+CREATE TRIGGER attachment_keeps_rows BEFORE UPDATE ON attachment
+WHEN OLD.rowid <> NEW.rowid
+  OR OLD.id <> NEW.id
+  OR OLD.owner_kind <> NEW.owner_kind
+  OR OLD.owner_id <> NEW.owner_id
+  OR OLD.source IS NOT NEW.source
+  OR OLD.name <> NEW.name
+  OR OLD.media_type <> NEW.media_type
+  OR OLD.size <> NEW.size
+  OR OLD.sha256 <> NEW.sha256
+  OR OLD.active_content <> NEW.active_content
+  OR OLD.at <> NEW.at
+  OR OLD.by_id <> NEW.by_id
+  OR OLD.by_name <> NEW.by_name
+BEGIN
+  SELECT RAISE(ABORT, 'attached documents cannot be changed');
+END;
+
+CREATE TRIGGER attachment_keeps_all BEFORE DELETE ON attachment
+BEGIN
+  SELECT RAISE(ABORT, 'attached documents cannot be removed');
+END;
+
+CREATE TRIGGER attachment_keeps_places BEFORE INSERT ON attachment
+WHEN EXISTS (
+  SELECT 1 FROM attachment
+  WHERE id = NEW.id
+    OR rowid = NEW.rowid
+    OR (owner_kind = NEW.owner_kind AND owner_id = NEW.owner_id AND sha256 = NEW.sha256)
+)
+BEGIN
+  SELECT RAISE(ABORT, 'attached documents cannot be replaced');
+END;
+
+-- An appointment is proposed once, confirmed once and ended once; what was written of each stays.
+
+CREATE TRIGGER appointment_keeps_rows BEFORE UPDATE ON appointment
+WHEN OLD.id <> NEW.id
+  OR OLD.person_id <> NEW.person_id
+  OR OLD.geometries IS NOT NEW.geometries
+  OR OLD.until <> NEW.until
+  OR OLD.proposed_at <> NEW.proposed_at
+  OR OLD.proposed_by_id <> NEW.proposed_by_id
+  OR OLD.proposed_by_name <> NEW.proposed_by_name
+  OR OLD.ended_at IS NOT NULL
+  OR (OLD.confirmed_at IS NOT NULL AND (
+    OLD.confirmed_at IS NOT NEW.confirmed_at
+    OR OLD.confirmed_by_id IS NOT NEW.confirmed_by_id
+    OR OLD.confirmed_by_name IS NOT NEW.confirmed_by_name))
+BEGIN
+  SELECT RAISE(ABORT, 'appointments cannot be changed');
+END;
+
+CREATE TRIGGER appointment_is_confirmed_by_others BEFORE UPDATE ON appointment
+WHEN NEW.confirmed_by_id IN (NEW.person_id, NEW.proposed_by_id)
+BEGIN
+  SELECT RAISE(ABORT, 'an appointment is confirmed by a second person');
+END;
+
+CREATE TRIGGER appointment_begins_proposed BEFORE INSERT ON appointment
+WHEN NEW.confirmed_at IS NOT NULL OR NEW.confirmed_by_id IS NOT NULL OR NEW.person_id = NEW.proposed_by_id
+BEGIN
+  SELECT RAISE(ABORT, 'an appointment is proposed by somebody else and then confirmed');
+END;
+
+CREATE TRIGGER appointment_keeps_all BEFORE DELETE ON appointment
+BEGIN
+  SELECT RAISE(ABORT, 'appointments cannot be removed');
+END;
+
+CREATE TRIGGER appointment_keeps_places BEFORE INSERT ON appointment
+WHEN EXISTS (SELECT 1 FROM appointment WHERE id = NEW.id OR rowid = NEW.rowid)
+BEGIN
+  SELECT RAISE(ABORT, 'appointments cannot be replaced');
+END;
+
+-- A link that lets somebody in is over once it was used or replaced.
+
+CREATE TRIGGER one_time_link_ends_once BEFORE UPDATE ON one_time_link
+WHEN OLD.ended_at IS NOT NULL
+  OR NEW.ended_at IS NULL
+  OR OLD.token_hash <> NEW.token_hash
+  OR OLD.purpose <> NEW.purpose
+  OR OLD.person_id IS NOT NEW.person_id
+  OR OLD.made_at <> NEW.made_at
+  OR OLD.expires_at <> NEW.expires_at
+BEGIN
+  SELECT RAISE(ABORT, 'a link that lets somebody in cannot be changed');
+END;
+
+CREATE TRIGGER one_time_link_keeps_places BEFORE INSERT ON one_time_link
+WHEN EXISTS (SELECT 1 FROM one_time_link WHERE token_hash = NEW.token_hash OR rowid = NEW.rowid)
+BEGIN
+  SELECT RAISE(ABORT, 'a link that lets somebody in cannot be replaced');
+END;

@@ -4,7 +4,24 @@
  */
 export const ACTS = {
   'office.founded': 'set up the office',
+  'office.first-link': 'printed the link for the first administrator',
+  'settings.changed': 'changed the settings of the office',
   'person.added': 'added a person',
+  'person.invited': 'invited a person',
+  'person.joined': 'took up an invitation',
+  'person.changed': 'changed name or roles of a person',
+  'person.deactivated': 'made a person inactive',
+  'person.reactivated': 'made a person active again',
+  'password.changed': 'changed their password',
+  'password-reset.asked': 'asked for a new password',
+  'password-reset.done': 'chose a new password by link',
+  'session.closed': 'ended another session of theirs',
+  'appointment.proposed': 'proposed a technical authority',
+  'appointment.confirmed': 'confirmed a technical authority',
+  'appointment.ended': 'ended the appointment of a technical authority',
+  'appointment.lapsed': 'ended an appointment whose date had passed',
+  'notice.read': 'read a notice',
+  'notices.chosen': 'chose which notices come by mail',
   'session.started': 'signed in',
   'session.refused': 'was refused at sign-in',
   'session.ended': 'signed out',
@@ -23,6 +40,8 @@ export const ACTS = {
   'revision.withdrawn': 'withdrew a revision',
   'evaluation.deviated': 'evaluated outside a bound',
   'property-equation.drafted': 'drafted a property equation',
+  'attachment.added': 'attached a document',
+  'attachment.relicensed': 'changed where a document may go',
   'geometries.added': 'added geometries',
 } as const satisfies Record<string, string>;
 
