@@ -42,7 +42,6 @@ export async function createTestApp({ settings, controllers = [] }: TestAppOptio
   })
     .overrideProvider(Clock)
     .useValue(clock)
-    .setLogger(false)
     .compile();
   const app = module.createNestApplication<NestExpressApplication>({ bodyParser: false, logger: false });
   configureApp(app);
