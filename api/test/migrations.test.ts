@@ -54,7 +54,8 @@ function addSomebody(): void {
   connection.sqlite.exec(`
     INSERT INTO person (id, name, email, created_at) VALUES ('p', 'Anna', 'anna@office.example', 'now');
     INSERT INTO person_role VALUES ('p', 'engineer'), ('p', 'reviewer');
-    INSERT INTO session VALUES ('h', 'p', 'a', 'b', 'c', 'd');`);
+    INSERT INTO session (id_hash, person_id, started_at, seen_at, idle_until, ends_at)
+      VALUES ('h', 'p', 'a', 'b', 'c', 'd');`);
 }
 
 describe('a connection', () => {

@@ -14,6 +14,8 @@ export const mail = sqliteTable(
     nextTryAt: text('next_try_at'),
     sentAt: text('sent_at'),
     lastError: text('last_error'),
+    /** A link that lets somebody in. Apart from the body, so that it is gone once the letter is. */
+    link: text('link'),
   },
   (table) => [index('mail_due').on(table.state, table.nextTryAt)],
 );

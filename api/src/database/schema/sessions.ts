@@ -15,6 +15,8 @@ export const session = sqliteTable(
     idleUntil: text('idle_until').notNull(),
     /** Ends then in any case. */
     endsAt: text('ends_at').notNull(),
+    /** What the browser said of itself, so that people recognise their sessions. */
+    agent: text('agent'),
   },
   (table) => [index('session_by_person').on(table.personId), index('session_by_end').on(table.endsAt)],
 );
