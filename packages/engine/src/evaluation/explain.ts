@@ -88,7 +88,7 @@ export function unitTex(unit: string): string {
     .replaceAll('%', '\\%')
     .replaceAll(' ', '\\,')
     .replace(/deg([CF])/g, '{}^{\\circ}$1')
-    .replace(/\bu(Pa|m)\b/g, '\\text{µ}$1')
+    .replace(/(?<![A-Za-z])[uµμ](?=(?:m|g|l|L|s|mol|Pa|bar|J|W|N|A|V)(?![A-Za-z]))/g, '\\mu ')
     .replace(/\^(-?\d+(?:\.\d+)?)/g, '^{$1}');
   return `\\mathrm{${body}}`;
 }
