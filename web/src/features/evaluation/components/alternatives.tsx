@@ -1,6 +1,7 @@
 import { Link } from 'react-router-dom';
 import type { OtherSheet } from '../../../shared/api/types';
 import { withQuery } from '../../../shared/api/http';
+import { useFocusWhenLost } from '../hooks/use-focus-when-lost';
 import { paths } from '../../../shared/paths';
 
 interface AlternativesProps {
@@ -11,9 +12,15 @@ interface AlternativesProps {
 /** The sheets of the register that cover the duty, or the word that none does. */
 export function Alternatives({ items, geometry }: AlternativesProps) {
   const all = <Link to={withQuery(paths.register, { geometry })}>all sheets of this geometry</Link>;
-  if (items.length === 0) return <p>No other sheet of the register covers this duty. See {all}.</p>;
+  const box = useFocusWhenLost<HTMLDivElement>(items);
+  if (items.length === 0)
+    return (
+      <div ref={box} tabIndex={-1}>
+        No other sheet of the register covers this duty. See {all}.
+      </div>
+    );
   return (
-    <div role="group" aria-label="Sheets that cover this duty">
+    <div ref={box} tabIndex={-1} role="group" aria-label="Sheets that cover this duty">
       <p>
         {items.length === 1
           ? 'One sheet of the register covers it:'

@@ -2,9 +2,10 @@ import type { Finding } from '@merestone/engine';
 import { Button } from 'antd';
 import { useState } from 'react';
 import { ErrorSummary } from '../../../shared/ui/error-summary';
-import { symbolText } from '../../../shared/format/symbol-parts';
+import { useFocusWhenLost } from '../hooks/use-focus-when-lost';
 import type { EvaluationState } from '../hooks/use-evaluation';
 import { fieldId } from '../model/field-id';
+import { findingLabel } from '../model/finding-label';
 import { MIN_REASON, reasonError } from '../model/reason-error';
 import { ReasonField } from './reason-field';
 
@@ -18,6 +19,7 @@ interface DeviationFormProps {
 export function DeviationForm({ refusing, evaluation, onLeave }: DeviationFormProps) {
   const { duty, change, keeping, evaluateAndKeep } = evaluation;
   const [pressed, setPressed] = useState<{ fieldId: string; message: string }[]>([]);
+  const box = useFocusWhenLost<HTMLDivElement>(true);
   const reasonOf = (symbol: string) => duty.reasons[symbol] ?? '';
   const allGood = refusing.every(({ symbol }) => reasonError(symbol, reasonOf(symbol)) === null);
   const record = () => {
@@ -30,7 +32,7 @@ export function DeviationForm({ refusing, evaluation, onLeave }: DeviationFormPr
       evaluateAndKeep(refusing.map(({ symbol }) => ({ symbol, reason: reasonOf(symbol).trim() })));
   };
   return (
-    <div className="deviation" role="group" aria-label="Record a deviation">
+    <div ref={box} tabIndex={-1} className="deviation" role="group" aria-label="Record a deviation">
       <p>
         A deviation uses the sheet outside a bound, for a reason that stands on record with your name. The
         number is marked <strong>provisional, not for design</strong> wherever it goes, until a technical
@@ -41,7 +43,7 @@ export function DeviationForm({ refusing, evaluation, onLeave }: DeviationFormPr
         <ReasonField
           key={symbol}
           id={fieldId(`reason-${symbol}`)}
-          label={`Why may ${symbolText(symbol)} be outside its bound here?`}
+          label={`Why may ${findingLabel(symbol)} be outside its bound here?`}
           value={reasonOf(symbol)}
           error={pressed.length > 0 ? reasonError(symbol, reasonOf(symbol)) : null}
           onChange={(reason) => change({ do: 'give-reason', symbol, reason })}

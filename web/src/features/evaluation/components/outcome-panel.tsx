@@ -15,12 +15,17 @@ interface OutcomePanelProps {
 
 /** What the duty comes to: a number with all its steps, a refusal, or what is still needed. */
 export function OutcomePanel({ evaluation, firstNumber, notInUse }: OutcomePanelProps) {
-  const { shown, keeping } = evaluation;
+  const { shown, failure } = evaluation;
   return (
     <section aria-label="Result" className="outcome">
       <OutcomeAnnouncer shown={shown} />
-      {keeping.state === 'failed' && keeping.problem.fields.length === 0 ? (
-        <ProblemNotice problem={keeping.problem} />
+      {failure ? (
+        <>
+          <ProblemNotice problem={failure} />
+          {failure.fields.map(({ field, message }) => (
+            <p key={field + message}>{message}</p>
+          ))}
+        </>
       ) : null}
       {shown.kind === 'nothing' ? <WaitingForDuty evaluation={evaluation} /> : null}
       {shown.kind === 'refusal' ? (

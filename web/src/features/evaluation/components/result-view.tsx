@@ -1,4 +1,5 @@
 import type { EvaluationState } from '../hooks/use-evaluation';
+import { useFocusWhenLost } from '../hooks/use-focus-when-lost';
 import { copyText } from '../model/copy-text';
 import { notableFindings } from '../model/refusing-findings';
 import type { Shown } from '../model/shown-outcome';
@@ -21,6 +22,7 @@ interface ResultViewProps {
 /** A number with everything that belongs to it: mark, groups, bases, flux, findings, steps and where it comes from. */
 export function ResultView({ shown, evaluation, firstNumber }: ResultViewProps) {
   const { sheet } = evaluation;
+  const heading = useFocusWhenLost<HTMLHeadingElement>(shown.kind === 'kept' ? shown.outcome.id : null);
   const { outcome } = shown;
   const mark = outcome.outcome === 'deviating' ? outcome.mark : null;
   const notable = notableFindings(outcome.findings);
@@ -29,7 +31,9 @@ export function ResultView({ shown, evaluation, firstNumber }: ResultViewProps) 
   );
   return (
     <div className={mark ? 'result result-marked' : 'result'}>
-      <h2>Result</h2>
+      <h2 ref={heading} tabIndex={-1}>
+        Result
+      </h2>
       <RecordLine shown={shown} />
       <Headline numbers={outcome} request={shown.request} mark={mark} definition={sheet.definition} />
       {notable.map((finding) => (

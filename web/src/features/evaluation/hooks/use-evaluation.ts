@@ -78,6 +78,8 @@ export function useEvaluation(sheet: EvaluatedSheet, personId: string) {
     preview,
     filled,
     keeping,
+    /** Why the server did not compute the duty as it stands, other than a bound. */
+    failure: keeping.state === 'failed' && keeping.asked === asked ? keeping.problem : null,
     shown,
     readings,
     errors,

@@ -4,6 +4,7 @@ import { formatUnit } from '../../../shared/format/format-unit';
 import { NUMBER_SPACE } from '../../../shared/format/format-number';
 import { coefficientWords } from './coefficient-words';
 import type { EvaluatedSheet } from './evaluated-sheet';
+import { findingLabel } from './finding-label';
 import { notableFindings } from './refusing-findings';
 import type { Shown } from './shown-outcome';
 
@@ -62,7 +63,7 @@ function recordLine(shown: CopyTextInput['shown']): string {
 
 function deviationLines(shown: CopyTextInput['shown']): string[] {
   return shown.outcome.outcome === 'deviating'
-    ? shown.outcome.deviations.map(({ symbol, reason }) => `Deviation on ${symbolText(symbol)}: ${reason}`)
+    ? shown.outcome.deviations.map(({ symbol, reason }) => `Deviation on ${findingLabel(symbol)}: ${reason}`)
     : [];
 }
 

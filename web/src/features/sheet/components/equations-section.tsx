@@ -5,6 +5,7 @@ import { formatDay } from '../../../shared/format/format-date';
 import { Equation, InlineEquation } from '../../../shared/ui/equation';
 import { MarginNote } from '../../../shared/ui/margin-note';
 import { MarginRow } from '../../../shared/ui/sheet-page';
+import { numberedLines } from '../model/numbered-lines';
 import { VERIFICATION_WORDS } from '../model/plain-words';
 import { MarkedText } from './marked-text';
 import { SourceNotes } from './source-notes';
@@ -17,7 +18,7 @@ interface EquationsSectionProps {
 /** The numbered equations, with their source and how far they have been verified beside them. */
 export const EquationsSection = memo(function EquationsSection({ sheet, tex }: EquationsSectionProps) {
   return (
-    <MarginRow notes={<EquationNotes sheet={sheet} />}>
+    <MarginRow heading={<h2 className="heard-only">Equations</h2>} notes={<EquationNotes sheet={sheet} />}>
       <div className="sheet-equations">
         {tex ? (
           <NumberedEquations tex={tex} />
@@ -50,18 +51,17 @@ function EquationNotes({ sheet }: { sheet: Sheet }) {
 }
 
 function NumberedEquations({ tex }: { tex: DefinitionTex }) {
-  let number = 0;
+  const numbers = new Map(numberedLines(tex).map((line, i) => [line, i + 1]));
   const several = tex.parts.length > 1;
+  const set = (line: LineTex) => <Line key={line.symbol} line={line} number={numbers.get(line) ?? 0} />;
   return (
     <>
-      {tex.intermediates.map((line) => (
-        <Line key={line.symbol} line={line} number={(number += 1)} />
-      ))}
+      {tex.intermediates.map(set)}
       {tex.parts.map((part) => (
         <section key={part.key} aria-label={part.title}>
           {several ? <h3>{part.title}</h3> : null}
-          <Line line={part.result} number={(number += 1)} />
-          {part.coefficient ? <Line line={part.coefficient} number={(number += 1)} /> : null}
+          {set(part.result)}
+          {part.coefficient ? set(part.coefficient) : null}
         </section>
       ))}
     </>

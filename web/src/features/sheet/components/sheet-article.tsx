@@ -7,6 +7,7 @@ import { RunningHead } from '../../../shared/ui/running-head';
 import { SheetPage } from '../../../shared/ui/sheet-page';
 import type { LiveReadings } from '../model/live-readings';
 import { inWords } from '../model/in-words';
+import { numberedLines } from '../model/numbered-lines';
 import { BoundsSection } from './bounds-section';
 import { ChecksSection } from './checks-section';
 import { EquationsSection } from './equations-section';
@@ -32,9 +33,7 @@ export function SheetArticle({ sheet, live, duty, outcome }: SheetArticleProps) 
     const compilation = compileCorrelation(definition);
     return compilation.ok ? definitionTex(compilation.compiled) : null;
   }, [definition]);
-  const equations = tex
-    ? tex.intermediates.length + tex.parts.flatMap((p) => [p.result, p.coefficient ?? []].flat()).length
-    : 0;
+  const equations = tex ? numberedLines(tex).length : 0;
   return (
     <SheetPage
       title={sheet.title}
