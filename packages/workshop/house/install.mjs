@@ -52,6 +52,17 @@ export const installedAsLocked = (lock, hidden) => {
   return [...found.keys()].every((path) => asked.has(path));
 };
 
+/**
+ * Whether every package has its folder, those of single workspaces included: a stamp does not notice one being deleted.
+ * @param {string} lock
+ * @param {string} base folder that the lock file's paths start from
+ * @returns {boolean}
+ */
+export const foldersAreThere = (lock, base) =>
+  [...lockedPackages(lock)].every(
+    ([path, entry]) => entry.optional || entry.devOptional || existsSync(join(base, path)),
+  );
+
 /** Whether the compiled SQLite opens under this Node; it fits one ABI only. */
 const sqliteOpens = () => {
   try {
@@ -66,7 +77,8 @@ const sqliteOpens = () => {
 
 /** @returns {boolean} */
 export const installIsCurrent = () =>
-  readStamp(stampFile) === wanted() || (installedAsLocked(lockFile, hiddenLockFile) && sqliteOpens());
+  foldersAreThere(lockFile, root) &&
+  (readStamp(stampFile) === wanted() || (installedAsLocked(lockFile, hiddenLockFile) && sqliteOpens()));
 
 /**
  * Where this Node brings its own headers, node-gyp need not fetch them.

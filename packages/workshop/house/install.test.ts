@@ -1,10 +1,10 @@
-import { mkdtempSync, rmSync, writeFileSync } from 'node:fs';
+import { mkdirSync, mkdtempSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { afterEach, beforeEach, describe, expect, it } from 'vitest';
-import { installedAsLocked } from './install.mjs';
+import { foldersAreThere, installedAsLocked } from './install.mjs';
 
-describe('installedAsLocked', () => {
+describe('what is installed', () => {
   let folder: string;
   beforeEach(() => (folder = mkdtempSync(join(tmpdir(), 'merestone-lock-'))));
   afterEach(() => {
@@ -46,5 +46,13 @@ describe('installedAsLocked', () => {
 
   it('refuses where nothing was installed', () => {
     expect(installedAsLocked(lock(), join(folder, 'nowhere.json'))).toBe(false);
+  });
+
+  it('misses the folder of a package, not that of another platform', () => {
+    const file = lock();
+    mkdirSync(join(folder, 'node_modules', 'a'), { recursive: true });
+    expect(foldersAreThere(file, folder)).toBe(false);
+    mkdirSync(join(folder, 'node_modules', 'a', 'node_modules', 'b'), { recursive: true });
+    expect(foldersAreThere(file, folder)).toBe(true);
   });
 });
