@@ -41,6 +41,14 @@ export {
   type PartTex,
 } from './sheet/definition-tex.js';
 
+export {
+  sketchLines,
+  type DimensionOfSketch,
+  type LineSketch,
+  type SketchLine,
+  type SketchSymbol,
+} from './sheet/sketch-lines.js';
+
 export * from './evaluation/outcome.js';
 export { evaluate } from './evaluation/evaluate.js';
 export {
@@ -72,6 +80,8 @@ export { symbolTex } from './expression/symbol-tex.js';
 
 export { QUANTITIES, serves, servingQuantity } from './quantity/dictionary.js';
 export type { DictionaryEntry, Sign } from './quantity/dictionary-entry.js';
+export { GROUPS, GROUP_SLOTS, type GroupEntry, type GroupSlot } from './quantity/group-dictionary.js';
+export { groupForSheet, type GroupForSheet } from './quantity/group-for-sheet.js';
 export { readUnit, type Unit, type UnitReading } from './quantity/unit.js';
 export { unitsFor, convert } from './quantity/unit-choices.js';
 export { CONSTANTS } from './quantity/constants.js';
