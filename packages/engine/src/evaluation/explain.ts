@@ -1,4 +1,5 @@
 import { formatNumber, numberTex, putInTex } from '../expression/number-text.js';
+import { isCompoundTex } from '../expression/is-compound-tex.js';
 import { symbolTex } from '../expression/symbol-tex.js';
 import { treeTex } from '../expression/tree-tex.js';
 import { CONSTANTS } from '../quantity/constants.js';
@@ -17,7 +18,10 @@ export function sheetSymbolTex(sheet: CompiledSheet, symbol: string): string {
 
 /** A formula in symbols. */
 export function formulaTex(sheet: CompiledSheet, tree: Parameters<typeof treeTex>[0]): string {
-  return treeTex(tree, (name) => ({ tex: sheetSymbolTex(sheet, name), compound: false }));
+  return treeTex(tree, (name) => {
+    const tex = sheetSymbolTex(sheet, name);
+    return { tex, compound: isCompoundTex(tex) };
+  });
 }
 
 /** Writes out the lines that were computed, in the order in which they were. */
