@@ -16,11 +16,20 @@ export function checkOverDetermined(sheet: CompiledSheet, request: EvaluationReq
     }));
 }
 
-/** Whether all quantities (and given groups) behind a group are given. */
-function made(sheet: CompiledSheet, symbol: string, given: ReadonlySet<string>): boolean {
-  const line = sheet.lines.get(symbol);
-  if (!line) return false;
-  return line.variants.every(({ needs }) =>
-    needs.every((need) => given.has(need) || (sheet.lines.has(need) && made(sheet, need, given))),
-  );
+/** Whether all quantities (and given groups) behind a group are given; `known` keeps the answers of lines on the way. */
+function made(
+  sheet: CompiledSheet,
+  symbol: string,
+  given: ReadonlySet<string>,
+  known = new Map<string, boolean>(),
+): boolean {
+  const before = known.get(symbol);
+  if (before !== undefined) return before;
+  const variants = sheet.lines.get(symbol)?.variants;
+  const answer =
+    variants?.every(({ needs }) =>
+      needs.every((need) => given.has(need) || made(sheet, need, given, known)),
+    ) ?? false;
+  known.set(symbol, answer);
+  return answer;
 }

@@ -1,4 +1,5 @@
 import type { CompiledCorrelation, PropertyLibrary } from '../sheet/compiled.js';
+import { fluidStateOf } from '../basis/fluid-state.js';
 import { readDrivingForce, type ReadForce } from '../basis/flux.js';
 import { checkDeviationForm, checkDeviationTargets, coveringDeviations } from './check-deviations.js';
 import { checkOverDetermined } from './check-over-determined.js';
@@ -55,6 +56,8 @@ function decide(
   remarks: string[],
 ): Evaluation {
   const { reckoner, supplies } = work;
+  // The state of the fluid serves conversions only; asked for here, so that what fills it is held against its bounds too.
+  fluidStateOf(reckoner);
   const findings = findingsOf(reckoner, supplies.filled, work.parts);
   const outside = findings.filter(
     ({ kind }) => kind === 'outside' || kind === 'past-reach' || kind === 'between',

@@ -153,6 +153,40 @@ describe('the bounds of a property equation', () => {
     expect(outcomeOf(aSheet(), request)).toMatchObject({ outcome: 'refused', code: 'past-reach' });
   });
 
+  test('refuse also where the value serves a conversion only', () => {
+    // p_BM of a low-flux coefficient is in no formula of the sheet; only F stands on it.
+    const inert = idealDensity({
+      title: 'Inert pressure',
+      gives: 'log-mean-inert-pressure',
+      unit: 'Pa',
+      quantities: [{ symbol: 'P', is: 'total-pressure', unit: 'Pa' }],
+      tables: undefined,
+      bounds: [{ on: 'P', basis: 'stated', stretches: [{ hi: { value: 1e5, nature: 'data' } }] }],
+      expression: '0.9*P',
+      checks: [
+        {
+          title: 'One',
+          kind: 'computed',
+          inputs: { P: { value: 1000 } },
+          expected: { value: { value: 900 } },
+          tolerancePercent: 1,
+        },
+      ],
+    });
+    const sheet = aSheet({ quantities: quantitiesWith('p_BM', { equations: ['inert'] }) });
+    const request = aRequest(STATE, { equations: { p_BM: 'inert' } });
+    const outcome = outcomeOf(sheet, request, libraryOf({ inert }));
+    expect(outcome).toMatchObject({ outcome: 'refused', code: 'out-of-bounds' });
+    expect(outcome.findings).toContainEqual(expect.objectContaining({ symbol: 'p_BM.P', kind: 'outside' }));
+    const within = numbersOf(
+      sheet,
+      { ...request, inputs: { ...request.inputs, P: { value: 90000 } } },
+      libraryOf({ inert }),
+    );
+    expect(within.equations).toEqual([expect.objectContaining({ symbol: 'p_BM', value: 81000 })]);
+    expect(within.findings).toContainEqual(expect.objectContaining({ symbol: 'p_BM.P', kind: 'within' }));
+  });
+
   test('name the bound even where the equation has no value at all', () => {
     const pieces = idealDensity({
       expression: undefined,

@@ -26,6 +26,9 @@ export class Reckoner {
   readonly gaps = new Set<string>();
   readonly faults: Problem[] = [];
   private readonly known = new Set<string>();
+  /** Symbols that failed under the question at hand, with what they lack: each is tried once, however often it is needed. */
+  private readonly failed = new Map<string, ReadonlySet<string>>();
+  private depth = 0;
 
   constructor(
     readonly sheet: CompiledSheet,
@@ -55,6 +58,23 @@ export class Reckoner {
   /** Makes a symbol's value known if that is possible; adds to `missing` what keeps it from being so. */
   solve(symbol: string, missing: Set<string> = new Set()): boolean {
     if (this.known.has(symbol)) return true;
+    const lacking = this.failed.get(symbol) ?? this.attempt(symbol);
+    for (const name of lacking ?? []) missing.add(name);
+    return lacking === null;
+  }
+
+  /** Null where the symbol is now known, else what it lacks (nothing, where a gap or a fault is the reason). */
+  private attempt(symbol: string): ReadonlySet<string> | null {
+    const lacking = new Set<string>();
+    this.depth += 1;
+    const solved = this.solveAnew(symbol, lacking);
+    this.depth -= 1;
+    if (!solved) this.failed.set(symbol, lacking);
+    if (this.depth === 0) this.failed.clear();
+    return solved ? null : lacking;
+  }
+
+  private solveAnew(symbol: string, missing: Set<string>): boolean {
     const quantity = this.sheet.quantities.get(symbol);
     if (quantity) {
       const value = this.supply(quantity, missing);
