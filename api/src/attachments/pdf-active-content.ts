@@ -21,6 +21,9 @@ const ACTIVE_NAMES: ReadonlyMap<string, ActiveContent> = new Map([
 /** So short that they turn up in compressed data by chance. */
 const SHORTEST_IN_DATA = 6;
 
+/** A stream's dictionary is right before it; what is further off is not looked at for its kind. */
+const LONGEST_DICTIONARY = 4096;
+
 /** How much of object streams is unpacked: no more than a large document has, no less than a bomb wants. */
 const MOST_STREAMS = 5000;
 const MOST_UNPACKED_EACH = 8 * 1024 * 1024;
@@ -67,7 +70,7 @@ function takeApart(text: string): { outside: string; packed: ObjectStream[] } {
     const from = found.index + found[0].length;
     const end = text.indexOf('endstream', from);
     const to = end < 0 ? text.length : end;
-    const dictionary = decoded(between.slice(between.lastIndexOf('obj') + 1));
+    const dictionary = decoded(between.slice(-LONGEST_DICTIONARY));
     if (/\/ObjStm(?![A-Za-z0-9])/.test(dictionary)) packed.push({ from, to, dictionary });
     done = end < 0 ? text.length : end + 'endstream'.length;
     start.lastIndex = done;
@@ -76,9 +79,11 @@ function takeApart(text: string): { outside: string; packed: ObjectStream[] } {
   return { outside: outside.join(' '), packed };
 }
 
+const FLATE_ALONE = /\/Filter\s*(?:\[\s*\/Fl(?:ateDecode)?\s*\]|\/Fl(?:ateDecode)?(?![A-Za-z0-9]))/;
+
 function unpack(data: Buffer, dictionary: string, room: number): string | undefined {
   if (!dictionary.includes('/Filter')) return data.toString('latin1');
-  if (!/\/Filter\s*\[?\s*\/(?:FlateDecode|Fl)\s*[\]/>]/.test(dictionary)) return undefined;
+  if (!FLATE_ALONE.test(dictionary)) return undefined;
   try {
     return inflateSync(data, { maxOutputLength: Math.min(MOST_UNPACKED_EACH, room) }).toString('latin1');
   } catch {
@@ -86,17 +91,30 @@ function unpack(data: Buffer, dictionary: string, room: number): string | undefi
   }
 }
 
-function namesIn(text: string, shortest = 1): ActiveContent[] {
+function namesIn(text: string, shortest = 1): Set<ActiveContent> {
   const kinds = new Set<ActiveContent>();
-  for (const [, name = ''] of decoded(text).matchAll(/\/([A-Za-z]{2,16})(?![A-Za-z0-9])/g)) {
+  const add = (name: string): void => {
     const kind = name.length < shortest ? undefined : ACTIVE_NAMES.get(name);
     if (kind !== undefined) kinds.add(kind);
+  };
+  for (const [, name = ''] of text.matchAll(PLAIN_NAME)) add(name);
+  let escaped = 0;
+  for (const [, name = ''] of text.matchAll(ESCAPED_NAME)) {
+    escaped += 1;
+    if (escaped > MOST_ESCAPED) return kinds.add('not-inspected');
+    add(decoded(name));
   }
-  return [...kinds];
+  return kinds;
 }
+
+const PLAIN_NAME = new RegExp(`/(${[...ACTIVE_NAMES.keys()].join('|')})(?![A-Za-z0-9#])`, 'g');
+const ESCAPED_NAME = /\/([A-Za-z0-9]{0,16}(?:#[0-9A-Fa-f]{2}[A-Za-z0-9]{0,16}){1,16})(?![A-Za-z0-9#])/g;
+/** No program writes so many; they would only be there to hide among. */
+const MOST_ESCAPED = 100_000;
 
 /** A name may write any of its characters as # and two digits. */
 function decoded(text: string): string {
+  if (!text.includes('#')) return text;
   return text.replace(/#([0-9A-Fa-f]{2})/g, (_, hex: string) =>
     String.fromCharCode(Number.parseInt(hex, 16)),
   );
