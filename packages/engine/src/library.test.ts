@@ -184,7 +184,12 @@ describe('duties', () => {
     expect(evaluation).toMatchObject({ ok: true, outcome: { outcome: 'refused' } });
     const findings = evaluation.ok ? evaluation.outcome.findings : [];
     expect(findings).toContainEqual(
-      expect.objectContaining({ symbol: 'p_BM.p_Bi', kind: 'outside', nature: 'definition', deviable: false }),
+      expect.objectContaining({
+        symbol: 'p_BM.p_Bi',
+        kind: 'outside',
+        nature: 'definition',
+        deviable: false,
+      }),
     );
   });
 

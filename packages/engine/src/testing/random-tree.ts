@@ -17,16 +17,14 @@ export const randomTree: fc.Arbitrary<Tree> = fc.letrec<{ tree: Tree }>((tie) =>
     fc
       .tuple(fc.constantFrom('+', '-', '*', '/', '^'), tie('tree'), tie('tree'))
       .map(([operator, left, right]): Tree => ({ kind: 'binary', operator, left, right })),
-    fc
-      .constantFrom(...(Object.keys(FUNCTIONS) as FunctionName[]))
-      .chain((name) =>
-        fc
-          .array(tie('tree'), {
-            minLength: FUNCTIONS[name].least,
-            maxLength: Math.min(3, FUNCTIONS[name].most),
-          })
-          .map((operands): Tree => ({ kind: 'call', name, operands })),
-      ),
+    fc.constantFrom(...(Object.keys(FUNCTIONS) as FunctionName[])).chain((name) =>
+      fc
+        .array(tie('tree'), {
+          minLength: FUNCTIONS[name].least,
+          maxLength: Math.min(3, FUNCTIONS[name].most),
+        })
+        .map((operands): Tree => ({ kind: 'call', name, operands })),
+    ),
   ),
 })).tree;
 
