@@ -2,7 +2,6 @@ import { ConfigProvider } from 'antd';
 import type { ReactNode } from 'react';
 import { SWRConfig } from 'swr';
 import { asApiProblem } from '../shared/api/api-problem';
-import { getJson } from '../shared/api/http';
 import { antdTheme } from '../theme/antd-theme';
 import { useNightSheet } from '../theme/use-night-sheet';
 
@@ -11,7 +10,7 @@ export function Providers({ children }: { children: ReactNode }) {
   const night = useNightSheet();
   return (
     <ConfigProvider theme={antdTheme(night)} wave={{ disabled: true }}>
-      <SWRConfig value={{ fetcher: getJson, shouldRetryOnError: mayPass, revalidateOnFocus: false }}>
+      <SWRConfig value={{ shouldRetryOnError: mayPass, revalidateOnFocus: false }}>
         {children}
       </SWRConfig>
     </ConfigProvider>

@@ -2,12 +2,13 @@ import { Button } from 'antd';
 import { useState } from 'react';
 import { Link, NavLink, useNavigate } from 'react-router-dom';
 import { asApiProblem } from '../../shared/api/api-problem';
+import type { Permission } from '../../shared/api/types';
 import { paths } from '../../shared/paths';
 import { useSession } from '../../shared/session/use-session';
 import './masthead.css';
 
 /** The pages of the masthead; one with a permission is shown to those who have it. */
-const NOUNS: readonly { to: string; noun: string; permission?: string }[] = [
+const NOUNS: readonly { to: string; noun: string; permission?: Permission }[] = [
   { to: paths.register, noun: 'Register' },
   { to: paths.geometries, noun: 'Geometries' },
   { to: paths.propertyEquations, noun: 'Property equations' },

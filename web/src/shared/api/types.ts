@@ -1,6 +1,5 @@
+import type { components } from '@merestone/api-client';
 import type {
-  Bound,
-  CheckReport,
   CorrelationDefinition,
   Finding,
   Outcome,
@@ -8,179 +7,56 @@ import type {
   Stretch,
 } from '@merestone/engine';
 
-/** Shapes of the server's answers. */
+/*
+ * The server's answers under the names the screens use. They come from its contract; where that only repeats a type
+ * of the engine (definitions, findings, outcomes), the engine's own stands in its place.
+ */
+type Schemas = components['schemas'];
+type Replace<T, U> = Omit<T, keyof U> & U;
 
-export interface FieldProblem {
-  field: string;
-  code: string;
-  message: string;
-}
-export interface OtherSheet {
-  slug: string;
-  title: string;
-  geometry: string;
-}
-export interface ProblemBody {
-  type?: string;
-  title: string;
-  status?: number;
-  detail?: string;
-  fields?: FieldProblem[];
-  findings?: Finding[];
-  alternatives?: OtherSheet[];
-}
+export type FieldProblem = Schemas['FieldProblemResponse'];
+export type OtherSheet = Schemas['AlternativeResponse'];
+export type ProblemBody = Replace<
+  Partial<Schemas['ProblemResponse']>,
+  { title: string; findings?: Finding[] }
+>;
 
-export type Role = 'engineer' | 'reviewer' | 'authority' | 'auditor' | 'administrator';
-export interface PersonName {
-  id: string;
-  name: string;
-}
-export interface SessionAnswer {
-  person: PersonName & { email: string; roles: Role[] };
-  permissions: string[];
-}
-export interface DemoPeople {
-  items: { name: string; email: string; roles: Role[] }[];
-  password: string;
-}
+export type SessionAnswer = Schemas['SessionResponse'];
+export type Permission = SessionAnswer['permissions'][number];
+export type Role = SessionAnswer['person']['roles'][number];
+export type PersonName = Schemas['NamedPerson'];
+export type DemoPeople = Schemas['DemoPeopleResponse'];
 
-export type Standing =
-  'draft' | 'in review' | 'approved' | 'suspended' | 'superseded' | 'withdrawn' | 'declined';
+export type Standing = Sheet['standing'];
 export type Phase = CorrelationDefinition['phase'];
-export type Verification = CorrelationDefinition['verification']['status'];
 
-export interface Geometry {
-  slug: string;
-  name: string;
-  summary: string;
-  characteristicLength: string;
-  velocity: string;
-  cautions: string[];
-  total: number;
-  approved: number;
-}
+export type Geometry = Schemas['GeometryEntry'];
 
-export interface FacetCount {
-  value: string;
-  label: string;
-  count: number;
-}
-export interface ListedBound {
-  symbol: string;
-  name: string;
-  unit: string;
-  basis: Bound['basis'];
-  stretches: Stretch[];
-}
-export interface ListedCorrelation {
-  slug: string;
-  title: string;
-  authors: string[];
-  year: number | null;
-  geometry: string;
-  geometryName: string;
-  phase: Phase;
-  standing: Standing;
-  revision: number;
-  summary: string;
-  verification: Verification;
-  bounds: ListedBound[];
-}
-export interface CorrelationPage {
-  items: ListedCorrelation[];
-  nextCursor: string | null;
-  total: number;
-  facets: { geometry: FacetCount[]; phase: FacetCount[]; standing: FacetCount[] };
-}
+export type FacetCount = Schemas['FacetCount'];
+export type ListedBound = Replace<Schemas['ListedBound'], { stretches: Stretch[] }>;
+export type ListedCorrelation = Replace<Schemas['ListedCorrelation'], { bounds: ListedBound[] }>;
+export type CorrelationPage = Replace<Schemas['CorrelationPage'], { items: ListedCorrelation[] }>;
 
-export interface SheetEquation {
-  slug: string;
-  revision: number;
-  hash: string;
-  definition: PropertyEquationDefinition;
-}
-export interface Sheet {
-  slug: string;
-  title: string;
-  geometry: string;
-  geometryName: string;
-  standing: Standing;
-  revision: number;
-  iteration: number;
-  hash: string;
-  definition: CorrelationDefinition;
-  originator: PersonName;
-  revisions: { number: number; standing: Standing; hash: string; at: string }[];
-  history: { standing: Standing; at: string; by: PersonName; note: string | null }[];
-  reviews: {
-    reviewer: PersonName;
-    verdict: 'recommend' | 'ask-for-changes' | 'decline';
-    at: string;
-    note: string | null;
-  }[];
-  approval: { by: PersonName; at: string; meaning: string; hash: string } | null;
-  checks: CheckReport[];
-  standingNote: string | null;
-  usage: { evaluations: number; calculations: number };
-  equations: SheetEquation[];
-  abilities: Record<'evaluate' | 'edit' | 'submit' | 'review' | 'approve' | 'suspend' | 'withdraw', boolean>;
-  caution: string;
-}
+export type CheckReport = Schemas['CheckReportDto'];
+export type SheetEquation = Replace<Schemas['SheetEquation'], { definition: PropertyEquationDefinition }>;
+export type Sheet = Replace<
+  Schemas['Sheet'],
+  { definition: CorrelationDefinition; equations: SheetEquation[] }
+>;
 
-export interface Provenance {
-  slug: string;
-  revision: number;
-  hash: string;
-  engine: string;
-  equations: { key: string; revision: number; hash: string }[];
-  rows: Record<string, string>;
-}
-export type KeptEvaluation = Exclude<Outcome, { outcome: 'refused' }> & {
-  id: string;
-  at: string;
-  slug: string;
-  revision: number;
-  standing: Standing;
-  provenance: Provenance;
-  caution: string;
-};
+export type Provenance = Schemas['ProvenanceDto'];
+export type KeptEvaluation = Exclude<Outcome, { outcome: 'refused' }> &
+  Pick<
+    Schemas['WithinEvaluation'],
+    'id' | 'at' | 'slug' | 'revision' | 'standing' | 'provenance' | 'caution'
+  >;
 
-export interface ListedPropertyEquation {
-  slug: string;
-  title: string;
-  fluid: string;
-  gives: string;
-  unit: string;
-  revision: number;
-  hash: string;
-  standing: Standing;
-}
-export interface PropertyEquationSheet extends ListedPropertyEquation {
-  definition: PropertyEquationDefinition;
-  checks: CheckReport[];
-  /** Why it is not approved. */
-  standingNote: string | null;
-  caution: string;
-}
+export type ListedPropertyEquation = Schemas['ListedPropertyEquation'];
+export type PropertyEquationSheet = Replace<
+  Schemas['PropertyEquationSheet'],
+  { definition: PropertyEquationDefinition }
+>;
 
-export interface JournalEntry {
-  index: number;
-  at: string;
-  actor: PersonName | null;
-  act: string;
-  subject: string;
-  detail: unknown;
-  leaf: string;
-}
-export interface JournalPage {
-  items: JournalEntry[];
-  nextCursor: string | null;
-  size: number;
-  /** Null when stored hashes are gone. */
-  root: string | null;
-}
-export interface JournalVerification {
-  ok: boolean;
-  entries: number;
-  firstFault?: { index: number; kind: string; message: string };
-}
+export type JournalEntry = Schemas['JournalItem'];
+export type JournalPage = Schemas['JournalResponse'];
+export type JournalVerification = Schemas['VerificationResponse'];

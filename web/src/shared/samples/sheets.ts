@@ -33,13 +33,14 @@ export function sampleSheet(
       { number: 2, standing: 'approved', hash, at: '2026-03-03T10:00:00Z' },
     ],
     history: [
-      { standing: 'draft', at: '2026-02-20T09:00:00Z', by: originator, note: null },
-      { standing: 'in review', at: '2026-02-21T09:00:00Z', by: originator, note: null },
+      { standing: 'draft', at: '2026-02-20T09:00:00Z', by: originator, note: null, class: null },
+      { standing: 'in review', at: '2026-02-21T09:00:00Z', by: originator, note: null, class: null },
       {
         standing: 'approved',
         at: '2026-03-03T10:00:00Z',
         by: { id: 'p-authority', name: 'Ines Vauquelin' },
         note: 'After two reviews.',
+        class: null,
       },
     ],
     reviews: [
@@ -48,8 +49,11 @@ export function sampleSheet(
         verdict: 'recommend',
         at: '2026-02-25T09:00:00Z',
         note: 'Recomputed by hand.',
+        hash,
+        current: true,
       },
     ],
+    comments: [],
     approval: {
       by: { id: 'p-authority', name: 'Ines Vauquelin' },
       at: '2026-03-03T10:00:00Z',
@@ -64,9 +68,11 @@ export function sampleSheet(
       evaluate: true,
       edit: false,
       submit: false,
+      comment: false,
       review: false,
       approve: false,
       suspend: false,
+      reinstate: false,
       withdraw: false,
     },
     caution:

@@ -2,6 +2,7 @@ import { Navigate, Outlet, useLocation } from 'react-router-dom';
 import { signInPath } from '../paths';
 import { Loading } from '../ui/loading';
 import { ProblemNotice } from '../ui/problem-notice';
+import { SheetPage } from '../ui/sheet-page';
 import { useSession } from './use-session';
 
 /** Lets only signed-in people through; others sign in first and come back to where they wanted to go. */
@@ -10,6 +11,9 @@ export function RequireSignIn() {
   const { pathname, search } = useLocation();
   if (session) return <Outlet />;
   if (session === null) return <Navigate to={signInPath(pathname + search)} replace />;
-  if (problem) return <ProblemNotice problem={problem} onRetry={retry} />;
-  return <Loading what="your session" />;
+  return (
+    <SheetPage title={problem ? 'Not reached' : 'One moment'}>
+      {problem ? <ProblemNotice problem={problem} onRetry={retry} /> : <Loading what="your session" />}
+    </SheetPage>
+  );
 }

@@ -1,5 +1,5 @@
 import type { EvaluationRequest } from '@merestone/engine';
-import { sendJson } from '../../../shared/api/http';
+import { api, ask } from '../../../shared/api/client';
 import type { KeptEvaluation } from '../../../shared/api/types';
 
 /** Has the server compute and keep an evaluation of one revision. A refusal comes back as a thrown `ApiProblem`. */
@@ -8,8 +8,10 @@ export function keepEvaluation(
   revision: number,
   request: EvaluationRequest,
 ): Promise<KeptEvaluation> {
-  return sendJson<KeptEvaluation>('POST', `/api/correlations/${encodeURIComponent(slug)}/evaluations`, {
-    revision,
-    ...request,
-  });
+  return ask(
+    api.POST('/api/correlations/{slug}/evaluations', {
+      params: { path: { slug } },
+      body: { revision, ...request },
+    }),
+  );
 }

@@ -56,44 +56,43 @@ export function serveEvaluations() {
   if (!correlation.ok || !equation.ok) throw new Error('the samples do not compile');
   const asked: (EvaluationRequest & { revision?: number })[] = [];
   const answer = (status: number, body: unknown) => new Response(JSON.stringify(body), { status });
-  vi.stubGlobal('fetch', (_path: string, init: { body: string }) => {
-    const { revision, ...request } = JSON.parse(init.body) as EvaluationRequest & { revision?: number };
+  vi.stubGlobal('fetch', async (call: Request) => {
+    const { revision, ...request } = (await call.json()) as EvaluationRequest & { revision?: number };
     asked.push({ revision, ...request });
     const evaluation = evaluate(correlation.compiled, request, () => equation.compiled);
     if (!evaluation.ok)
-      return Promise.resolve(
-        answer(400, { title: 'Not possible', type: 'x:malformed', fields: evaluation.problems }),
-      );
+      return answer(400, {
+        title: 'Not possible',
+        type: 'urn:merestone:problem:malformed',
+        detail: 'Some fields cannot be used.',
+        fields: evaluation.problems,
+      });
     const { outcome } = evaluation;
     if (outcome.outcome === 'refused')
-      return Promise.resolve(
-        answer(422, {
-          type: `urn:merestone:problem:${outcome.code}`,
-          title: 'No number is given here',
-          detail: outcome.message,
-          findings: outcome.findings,
-          alternatives: [{ slug: 'linton-sherwood', title: 'Pipe, turbulent', geometry: 'pipe' }],
-        }),
-      );
-    return Promise.resolve(
-      answer(200, {
-        ...outcome,
-        id: 'ev-0001',
-        at: '2026-03-04T11:22:00Z',
+      return answer(422, {
+        type: `urn:merestone:problem:${outcome.code}`,
+        title: 'No number is given here',
+        detail: outcome.message,
+        findings: outcome.findings,
+        alternatives: [{ slug: 'linton-sherwood', title: 'Pipe, turbulent', geometry: 'pipe' }],
+      });
+    return answer(200, {
+      ...outcome,
+      id: 'ev-0001',
+      at: '2026-03-04T11:22:00Z',
+      slug: 'gilliland-sherwood',
+      revision: 2,
+      standing: 'approved',
+      provenance: {
         slug: 'gilliland-sherwood',
         revision: 2,
-        standing: 'approved',
-        provenance: {
-          slug: 'gilliland-sherwood',
-          revision: 2,
-          hash: 'abc',
-          engine: '0.1.0',
-          equations: [],
-          rows: {},
-        },
-        caution: 'An estimate from a published correlation.',
-      }),
-    );
+        hash: 'abc',
+        engine: '0.1.0',
+        equations: [],
+        rows: {},
+      },
+      caution: 'An estimate from a published correlation.',
+    });
   });
   return asked;
 }

@@ -1,17 +1,19 @@
 import { useState } from 'react';
 import useSWRInfinite from 'swr/infinite';
 import { asApiProblem, type ApiProblem } from '../../../shared/api/api-problem';
-import { getJson, sendJson, withQuery } from '../../../shared/api/http';
+import { api, ask } from '../../../shared/api/client';
 import type { JournalPage, JournalVerification } from '../../../shared/api/types';
 
 const JOURNAL = '/api/journal';
+const PAGE_LENGTH = '50';
 
 /** The journal, latest entry first, page by page. */
 export function useJournal() {
   const { data, error, isValidating, size, setSize, mutate } = useSWRInfinite<JournalPage, ApiProblem>(
     (index: number, before: JournalPage | null) =>
-      index > 0 && !before?.nextCursor ? null : withQuery(JOURNAL, { cursor: before?.nextCursor, limit: 50 }),
-    getJson,
+      index > 0 && !before?.nextCursor ? null : ([JOURNAL, before?.nextCursor ?? null] as const),
+    ([, cursor]: readonly [string, string | null]) =>
+      ask(api.GET(JOURNAL, { params: { query: { limit: PAGE_LENGTH, ...(cursor === null ? {} : { cursor }) } } })),
     { revalidateFirstPage: false },
   );
   return {
@@ -35,7 +37,7 @@ export function useVerification() {
     setWorking(true);
     setProblem(null);
     try {
-      setVerification(await sendJson<JournalVerification>('POST', `${JOURNAL}/verification`));
+      setVerification(await ask(api.POST('/api/journal/verification')));
     } catch (thrown) {
       setProblem(asApiProblem(thrown));
     }

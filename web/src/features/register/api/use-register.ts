@@ -1,21 +1,22 @@
 import { useCallback } from 'react';
 import useSWRInfinite from 'swr/infinite';
 import type { ApiProblem } from '../../../shared/api/api-problem';
-import { getJson } from '../../../shared/api/http';
+import { api, ask } from '../../../shared/api/client';
 import type { CorrelationPage } from '../../../shared/api/types';
-import { registerKey, type RegisterFilters } from '../model/register-filters';
+import { registerQuery, type RegisterFilters, type RegisterQuery } from '../model/register-filters';
 
-export const PAGE_LENGTH = 25;
+const REGISTER = '/api/correlations';
+const PAGE_LENGTH = 25;
 
 /** The correlations that the filters leave, page by page; while new filters load the old list stays. */
 export function useRegister(filters: RegisterFilters) {
   const keyOf = (index: number, before: CorrelationPage | null) => {
     if (index > 0 && !before?.nextCursor) return null;
-    return registerKey(filters, before?.nextCursor ?? null, PAGE_LENGTH);
+    return [REGISTER, registerQuery(filters, before?.nextCursor ?? null, PAGE_LENGTH)] as const;
   };
   const { data, error, isValidating, size, setSize, mutate } = useSWRInfinite<CorrelationPage, ApiProblem>(
     keyOf,
-    getJson,
+    ([, query]: readonly [string, RegisterQuery]) => ask(api.GET(REGISTER, { params: { query } })),
     { keepPreviousData: true, revalidateFirstPage: false, revalidateOnFocus: false },
   );
   const showMore = useCallback(() => void setSize((pages) => pages + 1), [setSize]);

@@ -1,5 +1,4 @@
 import type { Phase, Standing } from '../../../shared/api/types';
-import { withQuery } from '../../../shared/api/http';
 
 /** What the register is narrowed to. Empty texts narrow nothing. */
 export interface RegisterFilters {
@@ -47,14 +46,25 @@ export function isFiltered(filters: RegisterFilters): boolean {
   return NAMES.some((name) => filters[name].trim() !== '');
 }
 
-/** Address of one page of the list. */
-export function registerKey(filters: RegisterFilters, cursor: string | null, limit: number): string {
-  return withQuery('/api/correlations', {
-    q: filters.q.trim(),
-    geometry: filters.geometry,
-    phase: filters.phase,
-    standing: filters.standing,
-    cursor,
+export interface RegisterQuery {
+  q?: string;
+  geometry?: string;
+  phase?: Phase;
+  standing?: Standing;
+  cursor?: string;
+  limit: number;
+}
+
+/** What the server is asked for one page of the list: only what narrows it. */
+export function registerQuery(filters: RegisterFilters, cursor: string | null, limit: number): RegisterQuery {
+  const { geometry, phase, standing } = filters;
+  const q = filters.q.trim();
+  return {
+    ...(q ? { q } : {}),
+    ...(geometry ? { geometry } : {}),
+    ...(phase ? { phase } : {}),
+    ...(standing ? { standing } : {}),
+    ...(cursor === null ? {} : { cursor }),
     limit,
-  });
+  };
 }

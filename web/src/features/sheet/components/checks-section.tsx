@@ -1,6 +1,5 @@
-import type { CheckReport } from '@merestone/engine';
 import { memo } from 'react';
-import type { Sheet } from '../../../shared/api/types';
+import type { CheckReport, Sheet } from '../../../shared/api/types';
 import { formatNumber } from '../../../shared/format/format-number';
 import { Figure } from '../../../shared/ui/figure';
 import { MarginNote } from '../../../shared/ui/margin-note';

@@ -18,8 +18,8 @@ export function PackedBed() {
       <Walls />
       <Circles at={BED} r={10.5} />
       <Flow from={[120, 144]} to={[120, 120]} />
-      <Flow from={[120, 32]} to={[120, 8]} />
-      <Span from={[76.5, 28]} to={[97.5, 28]} symbol="d_p" at="above" />
+      <Flow from={[142, 32]} to={[142, 8]} />
+      <Span from={[76.5, 28]} to={[97.5, 28]} symbol="d_p" at="right" />
     </>
   );
 }

@@ -1,0 +1,8 @@
+/** A path with the query parameters that have a value. */
+export function withQuery(path: string, query: Record<string, string | number | null | undefined>): string {
+  const search = new URLSearchParams();
+  for (const [name, value] of Object.entries(query))
+    if (value !== undefined && value !== null && value !== '') search.set(name, String(value));
+  const text = search.toString();
+  return text ? `${path}?${text}` : path;
+}
