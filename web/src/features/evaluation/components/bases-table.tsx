@@ -1,8 +1,9 @@
 import type { Conversion, Numbers } from '@merestone/engine';
 import { lowerFirst } from '../../../shared/format/lower-first';
+import { InlineEquation } from '../../../shared/ui/equation';
 import { Figure } from '../../../shared/ui/figure';
 import { SetTable } from '../../../shared/ui/set-table';
-import { SymbolMark } from '../../../shared/ui/symbol-mark';
+import { setBasis } from '../model/set-symbol';
 import { Mark } from './mark';
 
 const MEANT: Readonly<Record<Conversion['basis'], string>> = {
@@ -42,7 +43,7 @@ function BasisRow({ conversion, mark }: { conversion: Conversion; mark: string |
   return (
     <tr>
       <th scope="row">
-        <SymbolMark symbol={symbol} />
+        <InlineEquation tex={setBasis(symbol)} />
       </th>
       <td>
         {MEANT[basis]}

@@ -1,6 +1,7 @@
 import type { Finding } from '@merestone/engine';
 import { Link } from 'react-router-dom';
 import { paths } from '../../../shared/paths';
+import { MarkedText } from '../../../shared/ui/marked-text';
 
 interface FindingTextProps {
   finding: Finding;
@@ -13,13 +14,13 @@ export function FindingText({ finding, deviation }: FindingTextProps) {
   if (deviation !== undefined)
     return (
       <p>
-        {firstSentence(finding.message)} Used all the same under a deviation, for the reason on record: “
-        {deviation}”
+        <MarkedText text={firstSentence(finding.message)} /> Used all the same under a deviation, for the
+        reason on record: “{deviation}”
       </p>
     );
   return (
     <p>
-      {finding.message}
+      <MarkedText text={finding.message} />
       {finding.beyond.length > 0 ? (
         <>
           {' '}

@@ -1,7 +1,8 @@
 import type { CorrelationDefinition, Numbers } from '@merestone/engine';
+import { InlineEquation } from '../../../shared/ui/equation';
 import { Figure } from '../../../shared/ui/figure';
 import { SetTable } from '../../../shared/ui/set-table';
-import { SymbolMark } from '../../../shared/ui/symbol-mark';
+import { setSymbol } from '../model/set-symbol';
 import { Mark } from './mark';
 
 interface GroupsTableProps {
@@ -37,7 +38,7 @@ export function GroupsTable({ numbers, mark, definition }: GroupsTableProps) {
         {rows.map(({ symbol, name, value, unit, derived }) => (
           <tr key={symbol}>
             <th scope="row">
-              <SymbolMark symbol={symbol} />
+              <InlineEquation tex={setSymbol(definition, symbol)} />
             </th>
             <td>{name}</td>
             <td className="number">

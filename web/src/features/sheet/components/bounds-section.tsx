@@ -10,9 +10,9 @@ import type { Sheet } from '../../../shared/api/types';
 import { BoundStrip } from '../../../shared/ui/bound-strip/bound-strip';
 import { InlineEquation } from '../../../shared/ui/equation';
 import { MarginNote } from '../../../shared/ui/margin-note';
+import { MarkedText } from '../../../shared/ui/marked-text';
 import { MarginRow } from '../../../shared/ui/sheet-page';
 import type { LiveReadings } from '../model/live-readings';
-import { MarkedText } from './marked-text';
 import { boundWords } from '../model/plain-words';
 import { sentence } from '../model/sentence';
 

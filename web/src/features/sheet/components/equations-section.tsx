@@ -4,10 +4,10 @@ import type { Sheet } from '../../../shared/api/types';
 import { formatDay } from '../../../shared/format/format-date';
 import { Equation, InlineEquation } from '../../../shared/ui/equation';
 import { MarginNote } from '../../../shared/ui/margin-note';
+import { MarkedText } from '../../../shared/ui/marked-text';
 import { MarginRow } from '../../../shared/ui/sheet-page';
 import { numberedLines } from '../model/numbered-lines';
 import { VERIFICATION_WORDS } from '../model/plain-words';
-import { MarkedText } from './marked-text';
 import { SourceNotes } from './source-notes';
 
 interface EquationsSectionProps {

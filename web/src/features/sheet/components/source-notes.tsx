@@ -1,6 +1,5 @@
-import type { Source } from '@merestone/engine';
+import { formatCitation, type Source } from '@merestone/engine';
 import { MarginNote } from '../../../shared/ui/margin-note';
-import { formatCitation } from '../model/format-citation';
 import { READ_WORDS } from '../model/plain-words';
 import { sentence } from '../model/sentence';
 
@@ -41,8 +40,8 @@ export function Citation({ source }: { source: Source }) {
       {doi ? (
         <>
           {' '}
-          <a href={`https://doi.org/${encodeURI(doi)}`} rel="noreferrer" target="_blank">
-            doi:{doi}
+          <a href={doi.href} rel="noreferrer" target="_blank">
+            doi:{doi.name}
           </a>
         </>
       ) : null}

@@ -10,10 +10,10 @@ import { formatUnit } from '../../../shared/format/format-unit';
 import { InlineEquation } from '../../../shared/ui/equation';
 import { Figure } from '../../../shared/ui/figure';
 import { MarginNote } from '../../../shared/ui/margin-note';
+import { MarkedText } from '../../../shared/ui/marked-text';
 import { SetTable } from '../../../shared/ui/set-table';
 import { MarginRow } from '../../../shared/ui/sheet-page';
 import type { LiveReadings } from '../model/live-readings';
-import { MarkedText } from './marked-text';
 import { AVERAGING_WORDS, FORCE_WORDS, STATE_WORDS, WALL_WORDS, accuracyText } from '../model/plain-words';
 
 interface SymbolsSectionProps {
