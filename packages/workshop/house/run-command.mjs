@@ -45,7 +45,8 @@ export const run = (command, args, { cwd, env, quiet = false } = {}) =>
 export const runNode = (script, args, options) => run(process.execPath, [script, ...args], options);
 
 /**
- * Stays in front of a long-running child: hands signals on to it and answers with its exit code.
+ * Stays in front of a long-running child: hands signals on to it and answers with its exit code. A child that ends by
+ * the very signal that was asked for has ended well: 0.
  * @param {import('node:child_process').ChildProcess} child
  * @returns {Promise<number>}
  */
@@ -53,8 +54,11 @@ export const standInFrontOf = (child) =>
   new Promise((resolve, reject) => {
     /** @type {NodeJS.Signals[]} */
     const signals = ['SIGINT', 'SIGTERM', 'SIGHUP'];
+    /** @type {NodeJS.Signals | undefined} */
+    let asked;
     /** @param {NodeJS.Signals} signal */
     const handOn = (signal) => {
+      asked = signal;
       // Ctrl-C in a terminal reaches the child by itself; a second one would cut its tidy end short.
       if (signal === 'SIGINT' && process.stdin.isTTY) return;
       child.kill(signal);
@@ -63,7 +67,7 @@ export const standInFrontOf = (child) =>
     child.once('error', reject);
     child.once('exit', (code, signal) => {
       for (const name of signals) process.off(name, handOn);
-      resolve(exitCodeOf(code, signal));
+      resolve(signal !== null && signal === asked ? 0 : exitCodeOf(code, signal));
     });
   });
 

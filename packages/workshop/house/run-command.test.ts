@@ -54,6 +54,7 @@ describe('standing in front of a server', () => {
     expect(output).toContain('tidied up');
     expect(code).toBe(0);
     expect((await endWith('SIGINT')).code).toBe(7);
+    expect((await endWith('SIGHUP')).code).toBe(0);
   });
 });
 
