@@ -41,6 +41,28 @@ describe('formatCitation', () => {
     expect(doi).toEqual({ name: '10.1021/ie50293a010', href: 'https://doi.org/10.1021/ie50293a010' });
   });
 
+  it('sets the work apart from what stands before and after it', () => {
+    expect(formatCitation(GILLILAND)).toMatchObject({
+      before: 'Gilliland, E. R. and Sherwood, T. K. (1934). Diffusion of Vapors into Air Streams.',
+      work: 'Industrial & Engineering Chemistry',
+      after: ' 26 (5), 516–523',
+    });
+    const treybal = formatCitation({
+      type: 'book',
+      title: 'Mass-Transfer Operations',
+      author: [{ family: 'Treybal', given: 'R. E.' }],
+      edition: 3,
+      publisher: 'McGraw-Hill',
+    });
+    expect(treybal).toMatchObject({
+      before: 'Treybal, R. E.',
+      work: 'Mass-Transfer Operations',
+      after: ', ed. 3, McGraw-Hill',
+    });
+    const tables = formatCitation({ type: 'report', title: 'Tables', author: [{ literal: 'The Office' }] });
+    expect(tables).toMatchObject({ before: 'The Office.', work: 'Tables', after: '', doi: null });
+  });
+
   it('writes a book with its edition, the title being the work', () => {
     const { work, text } = formatCitation({
       type: 'book',
