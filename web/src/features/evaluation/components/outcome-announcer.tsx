@@ -1,7 +1,7 @@
 import { symbolText } from '../../../shared/format/symbol-parts';
 import { formatNumber } from '../../../shared/format/format-number';
 import { formatUnit } from '../../../shared/format/format-unit';
-import { useSettled } from '../hooks/use-settled';
+import { useSettled } from '../../../shared/hooks/use-settled';
 import type { Shown } from '../model/shown-outcome';
 
 const QUIET_MS = 900;

@@ -13,7 +13,7 @@ import { shownOutcome } from '../model/shown-outcome';
 import { useCompiledSheet } from './use-compiled-sheet';
 import { useDuty } from './use-duty';
 import { useKeeping } from './use-keeping';
-import { useSettled } from './use-settled';
+import { useSettled } from '../../../shared/hooks/use-settled';
 
 const SETTLE_MS = 150;
 
