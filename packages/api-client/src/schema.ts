@@ -394,6 +394,58 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/correlations/{slug}/revisions/{number}/attachments": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Documents attached to the sources of a revision */
+        get: operations["listAttachments"];
+        put?: never;
+        /** Attaches a PDF, PNG or JPEG of at most 15 MB to a source */
+        post: operations["addAttachment"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/correlations/{slug}/revisions/{number}/attachments/{id}/file": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** The document, always as a file to save */
+        get: operations["downloadAttachment"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/correlations/{slug}/revisions/{number}/attachments/{id}/licence": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Says anew whether a document may leave the office */
+        post: operations["setAttachmentLicence"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/candidates": {
         parameters: {
             query?: never;
@@ -405,6 +457,40 @@ export interface paths {
         put?: never;
         /** Every sheet of a geometry held against one duty */
         post: operations["findCandidates"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/citations/reading": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Reads BibTeX, RIS or CSL-JSON into citation items; keeps nothing */
+        post: operations["readCitations"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/correlations/{slug}/revisions/{number}/citations": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** The sources of a revision as a file */
+        get: operations["exportCitations"];
+        put?: never;
+        post?: never;
         delete?: never;
         options?: never;
         head?: never;
@@ -484,7 +570,7 @@ export interface components {
             at: string;
             actor: components["schemas"]["JournalActor"];
             /** @enum {string} */
-            act: "office.founded" | "person.added" | "session.started" | "session.refused" | "session.ended" | "correlation.drafted" | "revision.drafted" | "revision.submitted" | "revision.taken-back" | "revision.taken-over" | "revision.commented" | "revision.reviewed" | "revision.approved" | "revision.superseded" | "revision.declined" | "revision.suspended" | "revision.reinstated" | "revision.withdrawn" | "evaluation.deviated" | "property-equation.drafted" | "geometries.added";
+            act: "office.founded" | "office.first-link" | "settings.changed" | "person.added" | "person.invited" | "person.joined" | "person.changed" | "person.deactivated" | "person.reactivated" | "password.changed" | "password-reset.asked" | "password-reset.done" | "session.closed" | "appointment.proposed" | "appointment.confirmed" | "appointment.ended" | "appointment.lapsed" | "notice.read" | "notices.chosen" | "session.started" | "session.refused" | "session.ended" | "correlation.drafted" | "revision.drafted" | "revision.submitted" | "revision.taken-back" | "revision.taken-over" | "revision.commented" | "revision.reviewed" | "revision.approved" | "revision.superseded" | "revision.declined" | "revision.suspended" | "revision.reinstated" | "revision.withdrawn" | "evaluation.deviated" | "property-equation.drafted" | "attachment.added" | "attachment.relicensed" | "geometries.added";
             /** @description Path of what was acted on */
             subject: string;
             detail: {
@@ -568,7 +654,7 @@ export interface components {
         SessionResponse: {
             person: components["schemas"]["SignedInPerson"];
             /** @description What the roles allow, without regard to an object */
-            permissions: ("register.read" | "register.read-unapproved" | "correlation.evaluate" | "evaluation.read-all" | "correlation.draft" | "correlation.submit" | "correlation.comment" | "correlation.review" | "correlation.approve" | "correlation.suspend" | "correlation.withdraw" | "people.list" | "journal.read" | "journal.verify" | "mail.read")[];
+            permissions: ("register.read" | "register.read-unapproved" | "correlation.evaluate" | "evaluation.read-all" | "correlation.draft" | "correlation.submit" | "correlation.comment" | "attachment.add" | "correlation.review" | "correlation.approve" | "correlation.suspend" | "correlation.withdraw" | "people.list" | "people.manage" | "appointment.read" | "appointment.propose" | "appointment.end" | "settings.read" | "settings.change" | "journal.read" | "journal.verify" | "mail.read")[];
         };
         DemoPerson: {
             name: string;
@@ -898,6 +984,45 @@ export interface components {
             /** @enum {string} */
             class: "error-in-sheet" | "error-in-source" | "unsafe";
         };
+        AttachmentItem: {
+            id: string;
+            /** @description Index of the source that it was attached to, as the sources stand now; null when cited no more */
+            source: number | null;
+            /** @description That source as it was cited then */
+            citation: string | null;
+            name: string;
+            /**
+             * @description Told from the content
+             * @enum {string}
+             */
+            mediaType: "application/pdf" | "image/png" | "image/jpeg";
+            /** @description Bytes */
+            size: number;
+            /** @description SHA-256 of the bytes, hex */
+            sha256: string;
+            /**
+             * @description Whether it may leave the office, in an evidence pack for one
+             * @enum {string}
+             */
+            licence: "may-leave" | "office-only";
+            /** @description What of it would act when opened */
+            activeContent: ("script" | "launch" | "embedded-file" | "open-action" | "event-action" | "rich-media" | "form" | "not-inspected")[];
+            /** Format: date-time */
+            at: string;
+            by: components["schemas"]["NamedPerson"];
+        };
+        AttachmentAbilities: {
+            add: boolean;
+        };
+        AttachmentsResponse: {
+            /** @description The oldest first */
+            items: components["schemas"]["AttachmentItem"][];
+            abilities: components["schemas"]["AttachmentAbilities"];
+        };
+        LicenceBody: {
+            /** @enum {string} */
+            licence: "may-leave" | "office-only";
+        };
         CandidatesBody: {
             geometry: string;
             /** @enum {string} */
@@ -947,6 +1072,55 @@ export interface components {
             /** @description Ranked: within, near a bound, unchecked, refused, incomplete */
             items: components["schemas"]["Candidate"][];
             caution: string;
+        };
+        ReadingBody: {
+            /** @description References as pasted: 200 kB and 50 references at most */
+            text: string;
+            /**
+             * @description Told from the text when left out
+             * @enum {string}
+             */
+            format?: "bibtex" | "ris" | "csl-json";
+        };
+        ReadingProblem: {
+            /** @description `items.2.DOI` for what was read; `text` for what was not */
+            field: string;
+            message: string;
+        };
+        ReadingDuplicate: {
+            /** @description Index of the earlier item */
+            first: number;
+            /** @description Index of the later item */
+            second: number;
+            /**
+             * @description By the DOI, or by first author, year, container and first page
+             * @enum {string}
+             */
+            by: "doi" | "place";
+        };
+        ReadingCitedBy: {
+            /** @description Index of the item */
+            item: number;
+            /** @enum {string} */
+            kind: "correlation" | "property-equation";
+            slug: string;
+            title: string;
+            /** @enum {string} */
+            by: "doi" | "place";
+        };
+        ReadingResponse: {
+            /** @enum {string} */
+            format: "bibtex" | "ris" | "csl-json";
+            /** @description CSL-JSON items with the fields that a sheet keeps */
+            items: {
+                [key: string]: unknown;
+            }[];
+            /** @description What was changed or left out, to be looked at */
+            problems: components["schemas"]["ReadingProblem"][];
+            /** @description Items that name one work */
+            duplicates: components["schemas"]["ReadingDuplicate"][];
+            /** @description Sheets that cite an item already */
+            alreadyCitedBy: components["schemas"]["ReadingCitedBy"][];
         };
         DeviationDto: {
             /** @description Symbol of the finding it answers */
@@ -2930,6 +3104,247 @@ export interface operations {
             };
         };
     };
+    listAttachments: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                slug: string;
+                number: number;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["AttachmentsResponse"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission register.read */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description There is no such revision that the caller may see */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    addAttachment: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                slug: string;
+                number: number;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "multipart/form-data": {
+                    /** Format: binary */
+                    file: string;
+                    /** @description Index of the source that the document is of */
+                    source: string;
+                    /** @enum {string} */
+                    licence: "may-leave" | "office-only";
+                };
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["AttachmentItem"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission attachment.add */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description The document is attached already */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description The file is larger than 15 MB */
+            413: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description The file is no whole PDF, PNG or JPEG, or is more than that */
+            415: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    downloadAttachment: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                slug: string;
+                number: number;
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/pdf": string;
+                    "image/png": string;
+                    "image/jpeg": string;
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission register.read */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description There is no such document that the caller may see */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    setAttachmentLicence: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                slug: string;
+                number: number;
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["LicenceBody"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["AttachmentItem"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission attachment.add */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description There is no such document that the caller may see */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
     findCandidates: {
         parameters: {
             query?: never;
@@ -2967,6 +3382,115 @@ export interface operations {
             };
             /** @description Needs the permission correlation.evaluate */
             403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    readCitations: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ReadingBody"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ReadingResponse"];
+                };
+            };
+            /** @description The text cannot be taken as references; the reason with its line */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission correlation.submit */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    exportCitations: {
+        parameters: {
+            query?: {
+                format?: "bibtex" | "ris" | "csl-json";
+            };
+            header?: never;
+            path: {
+                slug: string;
+                number: number;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/x-bibtex": string;
+                    "application/x-research-info-systems": string;
+                    "application/vnd.citationstyles.csl+json": string;
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission register.read */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description There is no such revision that the caller may see */
+            404: {
                 headers: {
                     [name: string]: unknown;
                 };
