@@ -127,6 +127,10 @@ describe('sheets made to take long', () => {
         unit: '1',
         expression: line(i + 28),
       })),
+      bounds: [
+        ...aSheet().bounds,
+        ...['q_26', 'q_27'].map((on) => ({ on, basis: 'none' as const, stretches: [] })),
+      ],
       parts: [{ ...GAS_PART, result: { ...GAS_PART.result, expression: 'q_55*Re' } }],
     }),
   );

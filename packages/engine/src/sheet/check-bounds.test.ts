@@ -1,5 +1,5 @@
 import { describe, expect, test } from 'vitest';
-import { aSheet, definitionProblems, partWith } from '../testing/a-sheet.js';
+import { aSheet, definitionProblems, GAS_PART, partWith } from '../testing/a-sheet.js';
 import type { Bound, Piece } from './common-schema.js';
 import type { CorrelationDefinition } from './definition.js';
 
@@ -126,6 +126,64 @@ describe('bounds', () => {
     expect(
       definitionProblems({ bounds: [...bounds.slice(0, 1), { on: 'Sc', basis: 'none', stretches: [] }] }),
     ).toEqual([]);
+  });
+});
+
+describe('a group that the result stands on', () => {
+  const f = { symbol: 'f', name: 'Friction factor', unit: '1' };
+  const onlySc = bounds.filter(({ on }) => on === 'Sc');
+
+  test.each<[string, Partial<CorrelationDefinition>]>([
+    [
+      'through an intermediate',
+      { intermediates: [{ ...f, expression: '0.079*Re^-0.25' }], parts: [partWith({ expression: 'f*Sc' })] },
+    ],
+    [
+      'through a condition',
+      {
+        parts: [
+          partWith({
+            expression: undefined,
+            pieces: [
+              { when: [{ on: 'Re', hi: 5000 }], expression: 'Sc' },
+              { when: [{ on: 'Re', lo: 5000 }], expression: '2*Sc' },
+            ],
+          }),
+        ],
+      },
+    ],
+    [
+      'through the coefficient',
+      {
+        parts: [
+          {
+            ...partWith({ expression: '0.023*Sc^0.44' }),
+            coefficient: GAS_PART.coefficient
+              ? { ...GAS_PART.coefficient, expression: 'Sh*D/d*Re^0.8' }
+              : null,
+          },
+        ],
+      },
+    ],
+  ])('%s needs a bound too', (_how, changes) => {
+    expect(definitionProblems({ ...changes, bounds: onlySc })).toEqual([
+      {
+        code: 'definition',
+        field: 'bounds',
+        message: 'Re has no bound; where none is on record say so with the basis "none".',
+      },
+    ]);
+    expect(definitionProblems(changes)).toEqual([]);
+  });
+
+  test('as part of a bounded group, or of no result at all, it needs none', () => {
+    const Pe = { symbol: 'Pe', name: 'Péclet number', expression: 'Re*Sc' };
+    const parts = [partWith({ expression: '0.02*Pe^0.8' })];
+    const groups = [...aSheet().groups, Pe];
+    expect(
+      definitionProblems({ groups, parts, bounds: [{ on: 'Pe', basis: 'none', stretches: [] }] }),
+    ).toEqual([]);
+    expect(definitionProblems({ groups })).toEqual([]);
   });
 });
 

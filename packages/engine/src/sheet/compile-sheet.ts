@@ -17,7 +17,7 @@ import type {
 import type { CorrelationDefinition, PropertyEquationDefinition } from './definition.js';
 import { linesOfCorrelation, linesOfPropertyEquation, type Calculable } from './lines.js';
 import { intervalOf } from './piece-intervals.js';
-import { readFormulas, type ReadLine } from './read-formulas.js';
+import { needsOf, readFormulas, type ReadLine } from './read-formulas.js';
 
 export type Compilation<T> = { ok: true; compiled: T } | { ok: false; problems: Problem[] };
 
@@ -123,12 +123,21 @@ function unitAt(text: string): Unit {
   return reading.unit;
 }
 
-/** A group that an equation stands on says how far it goes, or that nobody says so. */
+/** A group that an equation stands on, itself or through intermediates and conditions, says how far it goes, or that nobody says so. */
 function missingBounds({ lines, bounds }: Calculable, read: readonly ReadLine[]): Problem[] {
   const bounded = new Set(bounds.map(({ on }) => on));
   const groups = new Set(lines.filter(({ kind }) => kind === 'group').map(({ symbol }) => symbol));
-  const results = read.filter(({ line }) => line.kind === 'result');
-  const used = new Set(results.flatMap(({ formulas }) => formulas.flatMap(({ needs }) => needs)));
+  const bySymbol = new Map(read.map((line) => [line.line.symbol, line]));
+  const used = new Set<string>();
+  const walk = (line: ReadLine | undefined): void => {
+    for (const need of line ? needsOf(line) : []) {
+      if (used.has(need)) continue;
+      used.add(need);
+      // A group's own bound stands for what it is made of; an intermediate has none and passes on.
+      if (!groups.has(need)) walk(bySymbol.get(need));
+    }
+  };
+  for (const line of read) if (line.line.kind === 'result' || line.line.kind === 'coefficient') walk(line);
   return [...used]
     .filter((symbol) => groups.has(symbol) && !bounded.has(symbol))
     .map((symbol) =>

@@ -102,6 +102,7 @@ function inOrder(lines: ReadLine[], problems: Problem[]): ReadLine[] {
   return order;
 }
 
-function needsOf({ formulas }: ReadLine): Set<string> {
+/** Everything a line stands on, in its expressions and in their conditions. */
+export function needsOf({ formulas }: ReadLine): Set<string> {
   return new Set(formulas.flatMap(({ needs, when }) => [...when.map(({ on }) => on), ...needs]));
 }
