@@ -1,6 +1,7 @@
 import { Module, type DynamicModule } from '@nestjs/common';
 import { APP_GUARD } from '@nestjs/core';
 import { AttachmentsModule } from './attachments/attachments.module.js';
+import { AppointmentsModule } from './appointments/appointments.module.js';
 import { CandidatesModule } from './candidates/candidates.module.js';
 import { CitationsModule } from './citations/citations.module.js';
 import { CorrelationsModule } from './correlations/correlations.module.js';
@@ -14,10 +15,15 @@ import type { Config } from './config/config.js';
 import { ConfigModule } from './config/config.module.js';
 import { DatabaseModule } from './database/database.module.js';
 import { HealthModule } from './health/health.module.js';
+import { InvitationsModule } from './invitations/invitations.module.js';
 import { JournalModule } from './journal/journal.module.js';
 import { MailModule } from './mail/mail.module.js';
+import { NoticesModule } from './notices/notices.module.js';
+import { PasswordResetsModule } from './password-resets/password-resets.module.js';
 import { PeopleModule } from './people/people.module.js';
+import { ScheduleModule } from './schedule/schedule.module.js';
 import { SessionModule } from './session/session.module.js';
+import { SettingsModule } from './settings/settings.module.js';
 
 /** The whole server. Each feature is a module of its own. */
 @Module({
@@ -28,6 +34,12 @@ import { SessionModule } from './session/session.module.js';
     MailModule,
     PeopleModule,
     SessionModule,
+    ScheduleModule,
+    SettingsModule,
+    InvitationsModule,
+    PasswordResetsModule,
+    NoticesModule,
+    AppointmentsModule,
     SeedModule,
     AttachmentsModule,
     CandidatesModule,

@@ -2,7 +2,7 @@ import type { AddressInfo } from 'node:net';
 import type { NestExpressApplication } from '@nestjs/platform-express';
 import { Config } from './config/config.js';
 import { DEMO_PASSWORD, demoPeople } from './people/demo-people.js';
-import { FirstAdministratorService } from './people/first-administrator.service.js';
+import { FirstAdministratorService } from './invitations/first-administrator.service.js';
 import { OfficeService } from './people/office.service.js';
 import { PeopleService } from './people/people.service.js';
 
@@ -22,13 +22,12 @@ export function greeting(app: NestExpressApplication): string {
       ...people.map(({ email, name, roles }) => `  ${email.padEnd(36)}${roles.join(', ').padEnd(24)}${name}`),
     );
   }
-  const token = app.get(FirstAdministratorService).newToken();
-  if (token !== undefined) {
-    // Behind the # it reaches no log.
+  const firstLink = app.get(FirstAdministratorService).open(address);
+  if (firstLink !== undefined) {
     lines.push(
       '',
-      'There is no administrator yet. This link lets the first one in, once, until the server ends:',
-      `  ${address}/first-administrator#${token}`,
+      'There is no administrator yet. This link lets the first one in, once and within seven days:',
+      `  ${firstLink}`,
     );
   }
   return `${lines.join('\n')}\n\n`;

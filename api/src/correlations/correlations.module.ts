@@ -1,4 +1,5 @@
 import { Module } from '@nestjs/common';
+import { AppointmentsModule } from '../appointments/appointments.module.js';
 import { GeometriesModule } from '../geometries/geometries.module.js';
 import { PeopleModule } from '../people/people.module.js';
 import { PropertyEquationsModule } from '../property-equations/property-equations.module.js';
@@ -12,7 +13,7 @@ import { SheetReadModel } from './sheet.read-model.js';
 import { SheetService } from './sheet.service.js';
 
 @Module({
-  imports: [RevisionsModule, GeometriesModule, PropertyEquationsModule, PeopleModule],
+  imports: [RevisionsModule, GeometriesModule, PropertyEquationsModule, PeopleModule, AppointmentsModule],
   controllers: [CorrelationsController],
   providers: [
     CorrelationListReadModel,

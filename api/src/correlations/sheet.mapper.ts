@@ -12,6 +12,7 @@ import {
   maySubmit,
   maySuspend,
   mayWithdraw,
+  type ApprovalGround,
 } from '../revisions/revision.policy.js';
 import type { Sheet, SheetAbilities } from './dto/sheet.dto.js';
 import type { RevisionFile } from './sheet.read-model.js';
@@ -19,6 +20,8 @@ import type { RevisionFile } from './sheet.read-model.js';
 /** All that a sheet is put together from. */
 export interface SheetParts {
   readonly actor: Actor;
+  /** What the office says on an approval by the caller. */
+  readonly ground: ApprovalGround;
   readonly record: RevisionRecord;
   readonly compiled: CompiledCorrelation;
   /** The revisions of the correlation that the caller may see. */
@@ -31,7 +34,7 @@ export interface SheetParts {
 }
 
 export function sheet(parts: SheetParts): Sheet {
-  const { actor, record, compiled, file } = parts;
+  const { record, compiled, file } = parts;
   const { definition } = compiled;
   return {
     slug: record.slug,
@@ -55,7 +58,7 @@ export function sheet(parts: SheetParts): Sheet {
     standingNote: record.standing === 'approved' ? null : record.standingNote,
     usage: { evaluations: file.evaluations, calculations: 0 },
     equations: parts.equations,
-    abilities: abilities(actor, record, file),
+    abilities: abilities(parts),
     caution: CAUTION,
   };
 }
@@ -98,14 +101,14 @@ function onRecord(
   };
 }
 
-function abilities(actor: Actor, record: RevisionRecord, { reviews }: RevisionFile): SheetAbilities {
+function abilities({ actor, record, file: { reviews }, ground }: SheetParts): SheetAbilities {
   return {
     evaluate: mayEvaluate(actor, record).allowed,
     edit: mayEdit(actor, record).allowed,
     submit: maySubmit(actor, record).allowed,
     comment: mayComment(actor).allowed,
     review: mayReview(actor, record).allowed,
-    approve: mayApprove(actor, record, reviews).allowed,
+    approve: mayApprove(actor, record, reviews, ground).allowed,
     suspend: maySuspend(actor, record).allowed,
     reinstate: mayReinstate(actor, record).allowed,
     withdraw: mayWithdraw(actor, record).allowed,

@@ -1,6 +1,8 @@
 import { Injectable } from '@nestjs/common';
 import { runChecks, type CompiledCorrelation, type Quantity } from '@merestone/engine';
+import { AppointmentsService } from '../appointments/appointments.service.js';
 import { SYSTEM_ACTOR, type Actor } from '../common/actor.js';
+import { Clock } from '../common/clock.js';
 import { GeometriesService } from '../geometries/geometries.service.js';
 import { PeopleService } from '../people/people.service.js';
 import {
@@ -24,6 +26,8 @@ export class SheetService {
     private readonly files: SheetReadModel,
     private readonly geometries: GeometriesService,
     private readonly people: PeopleService,
+    private readonly appointments: AppointmentsService,
+    private readonly clock: Clock,
   ) {}
 
   /** The approved revision, else the latest that the caller may see. */
@@ -39,8 +43,10 @@ export class SheetService {
     const compiled = this.definitions.correlation(record);
     const shelf = this.libraries.forStanding(record.standing);
     const { geometry } = compiled.definition;
+    const at = this.clock.now().toISOString();
     return sheet({
       actor,
+      ground: this.appointments.approvalGround(actor.id, record.geometry, at),
       record,
       compiled,
       revisions: this.revisions.visible(actor, 'correlation', record.slug),

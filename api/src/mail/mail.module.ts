@@ -1,4 +1,5 @@
 import { Module } from '@nestjs/common';
+import { ScheduleModule } from '../schedule/schedule.module.js';
 import { MailController } from './mail.controller.js';
 import { MailDelivery } from './mail-delivery.js';
 import { MailRepository } from './mail.repository.js';
@@ -7,6 +8,7 @@ import { MailTransport } from './mail-transport.js';
 import { OutboxService } from './outbox.service.js';
 
 @Module({
+  imports: [ScheduleModule],
   controllers: [MailController],
   providers: [MailRepository, MailTransport, MailService, MailDelivery, OutboxService],
   exports: [MailService],

@@ -16,18 +16,21 @@ export class SigningService {
     private readonly config: Config,
   ) {}
 
-  /** Throws `password-refused` at the field `password` unless it is the actor's own; after too many, `too-many-requests`. */
-  async confirm(actor: Actor, password: string): Promise<void> {
+  /**
+   * Throws `password-refused` at the field unless it is the actor's own; after too many, `too-many-requests`.
+   * `undone` says what therefore was not done.
+   */
+  async confirm(
+    actor: Actor,
+    password: string,
+    { field = 'password', undone = 'nothing was signed' } = {},
+  ): Promise<void> {
     const { windowSeconds, perPerson } = this.config.signInLimits;
     const attempt = this.limiter.begin([{ key: `signing:${actor.id}`, limit: perPerson, windowSeconds }]);
     const person = this.people.byId(actor.id);
     const fits = await this.passwords.fits(password, person?.passwordHash);
     if (!fits || person?.active !== true) {
-      throw ApiProblem.ofField(
-        'password-refused',
-        'password',
-        'This is not your password; nothing was signed.',
-      );
+      throw ApiProblem.ofField('password-refused', field, `This is not your password; ${undone}.`);
     }
     attempt.succeed();
   }

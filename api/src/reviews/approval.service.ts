@@ -1,4 +1,5 @@
 import { Injectable } from '@nestjs/common';
+import { AppointmentsService } from '../appointments/appointments.service.js';
 import type { Actor } from '../common/actor.js';
 import { authorize } from '../common/authorized.js';
 import { ApiProblem } from '../common/problem.js';
@@ -24,6 +25,7 @@ export class ApprovalService {
   constructor(
     private readonly revisions: RevisionsService,
     private readonly reviews: ReviewsRepository,
+    private readonly appointments: AppointmentsService,
     private readonly signing: SigningService,
     private readonly writer: Writer,
   ) {}
@@ -35,7 +37,9 @@ export class ApprovalService {
     const { meaning, hash, note } = signed;
     return this.writer.write(actor, 'revision.approved', (tx, at) => {
       const found = this.revisions.one(actor, key, tx);
-      const record = authorize(found, mayApprove(actor, found, this.reviews.verdicts(found.id, tx)));
+      const ground = this.appointments.approvalGround(actor.id, found.geometry, at, tx);
+      const verdicts = this.reviews.verdicts(found.id, tx);
+      const record = authorize(found, mayApprove(actor, found, verdicts, ground));
       assertCurrent(record, hash);
       const superseded = this.supersede(tx, at, actor, record);
       this.reviews.insertApproval(tx, record, actor, at, { meaning, note });

@@ -1,4 +1,5 @@
 import { Module } from '@nestjs/common';
+import { AppointmentsModule } from '../appointments/appointments.module.js';
 import { CorrelationsModule } from '../correlations/correlations.module.js';
 import { PeopleModule } from '../people/people.module.js';
 import { PropertyEquationsModule } from '../property-equations/property-equations.module.js';
@@ -13,7 +14,7 @@ import { StandingService } from './standing.service.js';
 import { SubmissionService } from './submission.service.js';
 
 @Module({
-  imports: [RevisionsModule, CorrelationsModule, PropertyEquationsModule, PeopleModule],
+  imports: [RevisionsModule, CorrelationsModule, PropertyEquationsModule, PeopleModule, AppointmentsModule],
   controllers: [ReviewsController],
   providers: [
     ApprovalService,

@@ -16,12 +16,14 @@ import {
   type SessionResponse,
 } from './dto/session-response.dto.js';
 import { sessionCookieName, sessionCookieOptions } from './session-cookie.js';
+import { SessionStore } from './session.store.js';
 import { SignInPassport } from './sign-in-passport.js';
 
 @Injectable()
 export class SessionService {
   constructor(
     private readonly passport: SignInPassport,
+    private readonly store: SessionStore,
     private readonly people: PeopleService,
     private readonly office: OfficeService,
     private readonly limiter: AttemptLimiter,
@@ -55,6 +57,7 @@ export class SessionService {
       result: undefined,
     }));
     await this.passport.admit(request, actor);
+    this.store.describe(request.sessionID, agentOf(request));
     return this.current(actor);
   }
 
@@ -84,4 +87,15 @@ export class SessionService {
     if (!this.office.isDemo()) throw new ApiProblem('not-found', 'This is not a demo office.');
     return demoPeopleResponse(demoPeople(this.people.list()), DEMO_PASSWORD);
   }
+}
+
+const LONGEST_AGENT = 200;
+
+function agentOf(request: Request): string {
+  return oneLine(request.headers['user-agent'] ?? '').slice(0, LONGEST_AGENT);
+}
+
+/** Nothing in it may look like a line of its own. */
+function oneLine(text: string): string {
+  return text.replaceAll(/[\s\p{C}]+/gu, ' ').trim();
 }

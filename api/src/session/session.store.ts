@@ -45,11 +45,12 @@ export class SessionStore extends expressSession.Store {
       const personId = data.passport?.user;
       this.writer.writeUnjournalled('session-touch', (tx, at) => {
         this.sessions.removeEnded(tx, at);
+        const { agent = null } = this.sessions.live(id, at) ?? {};
         this.sessions.end(tx, id);
         if (personId === undefined) return;
         const idleUntil = this.later(at, this.config.sessionSpans.idleMinutes);
         const endsAt = this.later(at, this.config.sessionSpans.absoluteHours * 60);
-        this.sessions.start(tx, id, { personId, startedAt: at, seenAt: at, idleUntil, endsAt });
+        this.sessions.start(tx, id, { personId, startedAt: at, seenAt: at, idleUntil, endsAt, agent });
       });
     });
   }
@@ -62,6 +63,13 @@ export class SessionStore extends expressSession.Store {
       this.writer.writeUnjournalled('session-touch', (tx, at) => {
         this.sessions.touch(tx, id, at, this.later(at, this.config.sessionSpans.idleMinutes));
       });
+    });
+  }
+
+  /** Keeps what the browser says of itself with the session. */
+  describe(id: string, agent: string): void {
+    this.writer.writeUnjournalled('session-touch', (tx) => {
+      this.sessions.setAgent(tx, id, agent);
     });
   }
 

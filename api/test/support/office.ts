@@ -6,6 +6,7 @@ import { ApprovalService } from '../../src/reviews/approval.service.js';
 import { ReviewingService } from '../../src/reviews/reviewing.service.js';
 import { SubmissionService } from '../../src/reviews/submission.service.js';
 import type { RevisionKey, RevisionRecord } from '../../src/revisions/revision-record.js';
+import { appointed, namePrincipal } from './appointments.js';
 import { createTestApp, type TestApp } from './create-test-app.js';
 import { signedInWith, TEST_PASSWORD, type SignedIn } from './people.js';
 import { addGeometries, gasDensity, tubeSheet } from './sheets.js';
@@ -48,11 +49,21 @@ export async function openOffice(): Promise<TestOffice> {
     administrator: await signedInWith(test, 'administrator'),
     close: () => test.close(),
   };
+  await appointAuthorities(office);
   const density = test.app
     .get(PropertyEquationsService)
     .draft(office.engineer.actor, 'test-gas-density', gasDensity());
   await approved(office, density);
   return office;
+}
+
+/** For all geometries, proposed by the administrator and confirmed by the office's principal. */
+async function appointAuthorities(office: TestOffice): Promise<void> {
+  const { test, administrator, otherEngineer: principal } = office;
+  namePrincipal(test, administrator, principal);
+  for (const authority of [office.authority, office.secondAuthority]) {
+    await appointed(test, { proposer: administrator, confirmer: principal }, authority.actor.id);
+  }
 }
 
 /** A correlation of its own, as a draft of the engineer. */

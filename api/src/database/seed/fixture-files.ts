@@ -50,6 +50,10 @@ export class FixtureFiles {
     return people.map(({ name, email, roles }) => ({ name, email, roles: roles.filter(isRole) }));
   }
 
+  office(): { name: string; principal: string } {
+    return this.read('demo/office.yaml') as { name: string; principal: string };
+  }
+
   exceptions(): { correlations: Exceptions; propertyEquations: Exceptions } {
     return this.read('demo/standings.yaml') as { correlations: Exceptions; propertyEquations: Exceptions };
   }

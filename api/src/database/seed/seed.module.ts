@@ -1,13 +1,24 @@
 import { Module } from '@nestjs/common';
+import { AppointmentsModule } from '../../appointments/appointments.module.js';
 import { CorrelationsModule } from '../../correlations/correlations.module.js';
 import { GeometriesModule } from '../../geometries/geometries.module.js';
 import { PeopleModule } from '../../people/people.module.js';
 import { PropertyEquationsModule } from '../../property-equations/property-equations.module.js';
 import { ReviewsModule } from '../../reviews/reviews.module.js';
+import { SettingsModule } from '../../settings/settings.module.js';
+import { DemoStaffService } from './demo-staff.service.js';
 import { SeedService } from './seed.service.js';
 
 @Module({
-  imports: [PeopleModule, GeometriesModule, PropertyEquationsModule, CorrelationsModule, ReviewsModule],
-  providers: [SeedService],
+  imports: [
+    AppointmentsModule,
+    PeopleModule,
+    SettingsModule,
+    GeometriesModule,
+    PropertyEquationsModule,
+    CorrelationsModule,
+    ReviewsModule,
+  ],
+  providers: [DemoStaffService, SeedService],
 })
 export class SeedModule {}

@@ -11,12 +11,11 @@ import {
   type Problem,
   type PropertyEquationDefinition,
 } from '@merestone/engine';
-import { SYSTEM_ACTOR, type Actor } from '../../common/actor.js';
+import { SYSTEM_ACTOR } from '../../common/actor.js';
 import { DraftingService } from '../../correlations/drafting.service.js';
 import { GeometriesService } from '../../geometries/geometries.service.js';
 import { DEMO_PASSWORD } from '../../people/demo-people.js';
 import { OfficeService } from '../../people/office.service.js';
-import { PeopleService } from '../../people/people.service.js';
 import { PropertyEquationsService } from '../../property-equations/property-equations.service.js';
 import { PropertyLibraryService } from '../../property-equations/property-library.service.js';
 import { ApprovalService } from '../../reviews/approval.service.js';
@@ -24,6 +23,7 @@ import { ReviewingService } from '../../reviews/reviewing.service.js';
 import { SubmissionService } from '../../reviews/submission.service.js';
 import type { RevisionKey, RevisionRecord } from '../../revisions/revision-record.js';
 import { DemoOffice } from './demo-office.js';
+import { DemoStaffService } from './demo-staff.service.js';
 import { FixtureFiles, type Exceptions, type Named } from './fixture-files.js';
 import { correlationStanding, propertyEquationStanding, type StartingStanding } from './standing-rule.js';
 
@@ -43,7 +43,7 @@ const EVERYTHING_CHECKED = {
 export class SeedService {
   constructor(
     private readonly office: OfficeService,
-    private readonly people: PeopleService,
+    private readonly staff: DemoStaffService,
     private readonly geometries: GeometriesService,
     private readonly equations: PropertyEquationsService,
     private readonly drafting: DraftingService,
@@ -75,11 +75,7 @@ export class SeedService {
   }
 
   private async fillDemo(files: FixtureFiles): Promise<void> {
-    const people: Actor[] = [];
-    for (const { name, email, roles } of files.people()) {
-      people.push(await this.people.add(SYSTEM_ACTOR, { name, email, password: DEMO_PASSWORD, roles }));
-    }
-    const office = new DemoOffice(people);
+    const office = new DemoOffice(await this.staff.bring(files));
     const exceptions = files.exceptions();
     for (const [n, named] of files.propertyEquations().entries()) {
       await this.bringEquation(office, n, named, exceptions.propertyEquations);

@@ -1,4 +1,5 @@
 import { ApiProperty } from '@nestjs/swagger';
+import { wholeText } from '../letter.js';
 import type { MailRow } from '../mail.repository.js';
 
 const STATES = ['local', 'waiting', 'sent', 'failed'] as const;
@@ -13,7 +14,10 @@ export class OutboxItem {
   @ApiProperty({ type: String })
   readonly subject!: string;
 
-  @ApiProperty({ type: String })
+  @ApiProperty({
+    type: String,
+    description: 'A link that lets somebody in is shown only where there is no mail server to send it',
+  })
   readonly body!: string;
 
   @ApiProperty({ type: String, format: 'date-time' })
@@ -36,15 +40,15 @@ export class OutboxResponse {
 
 export function outboxResponse(rows: readonly MailRow[]): OutboxResponse {
   return {
-    items: rows.map(({ id, to, subject, body, writtenAt, state, tries, lastError }) => ({
-      id,
-      to,
-      subject,
-      body,
-      at: writtenAt,
-      state,
-      tries,
-      lastError,
+    items: rows.map((row) => ({
+      id: row.id,
+      to: row.to,
+      subject: row.subject,
+      body: row.state === 'local' ? wholeText(row) : row.body,
+      at: row.writtenAt,
+      state: row.state,
+      tries: row.tries,
+      lastError: row.lastError,
     })),
   };
 }
