@@ -1,10 +1,10 @@
 import { InlineEquation } from '../../../shared/ui/equation';
 import { QuantityField } from '../../../shared/ui/quantity-field/quantity-field';
-import type { FormField } from '../model/duty-form';
+import type { FormField, FormItem } from '../model/duty-form';
 import { fieldId } from '../model/field-id';
 import type { DutyControls } from './duty-controls';
-import { DutyItem } from './duty-item';
 import { FilledQuantity } from './filled-quantity';
+import { RowChoice } from './row-choice';
 
 interface DutyFieldProps {
   field: FormField;
@@ -66,5 +66,14 @@ function SourceChoice({ field, controls }: DutyFieldProps) {
         ))}
       </select>
     </label>
+  );
+}
+
+/** One thing the form asks for: a field, or a row of a table. A filled field asks for more such things. */
+export function DutyItem({ item, controls }: { item: FormItem; controls: DutyControls }) {
+  return item.kind === 'row' ? (
+    <RowChoice picker={item} controls={controls} />
+  ) : (
+    <DutyField field={item} controls={controls} />
   );
 }

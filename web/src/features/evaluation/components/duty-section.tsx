@@ -1,6 +1,6 @@
 import { fieldsOf, type FormSection } from '../model/duty-form';
 import type { DutyControls } from './duty-controls';
-import { DutyItem } from './duty-item';
+import { DutyItem } from './duty-field';
 
 interface DutySectionProps {
   section: FormSection;
