@@ -13,7 +13,11 @@ export function useJournal() {
     (index: number, before: JournalPage | null) =>
       index > 0 && !before?.nextCursor ? null : ([JOURNAL, before?.nextCursor ?? null] as const),
     ([, cursor]: readonly [string, string | null]) =>
-      ask(api.GET(JOURNAL, { params: { query: { limit: PAGE_LENGTH, ...(cursor === null ? {} : { cursor }) } } })),
+      ask(
+        api.GET(JOURNAL, {
+          params: { query: { limit: PAGE_LENGTH, ...(cursor === null ? {} : { cursor }) } },
+        }),
+      ),
     { revalidateFirstPage: false },
   );
   return {

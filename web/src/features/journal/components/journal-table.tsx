@@ -1,7 +1,9 @@
+import { Link } from 'react-router-dom';
 import type { JournalEntry } from '../../../shared/api/types';
 import { formatMinute } from '../../../shared/format/format-date';
 import { SetTable } from '../../../shared/ui/set-table';
 import { actWords } from '../model/act-words';
+import { subjectOf } from '../model/subject-of';
 import './journal.css';
 
 /** Entries as sentences, with when and the start of each one's hash. */
@@ -26,8 +28,8 @@ export function JournalTable({ entries }: { entries: readonly JournalEntry[] }) 
               <time dateTime={entry.at}>{formatMinute(entry.at)}</time>
             </td>
             <td>
-              <strong>{entry.actor?.name ?? 'Nobody signed in'}</strong> {actWords(entry.act)}
-              {entry.subject ? <span className="journal-subject">{entry.subject}</span> : null}
+              <strong>{entry.actor.name}</strong> {actWords(entry.act)}
+              <Subject entry={entry} />
             </td>
             <td className="journal-leaf" title={entry.leaf}>
               {entry.leaf.slice(0, 8)}
@@ -36,5 +38,15 @@ export function JournalTable({ entries }: { entries: readonly JournalEntry[] }) 
         ))}
       </tbody>
     </SetTable>
+  );
+}
+
+function Subject({ entry }: { entry: JournalEntry }) {
+  const subject = subjectOf(entry);
+  if (!subject) return null;
+  return (
+    <span className="journal-subject">
+      {subject.to ? <Link to={subject.to}>{subject.words}</Link> : subject.words}
+    </span>
   );
 }

@@ -1,8 +1,8 @@
-import { Input } from 'antd';
 import { useEffect, useId, useState } from 'react';
 import type { CorrelationPage, FacetCount } from '../../../shared/api/types';
 import { ChoiceField, type Choice } from '../../../shared/ui/fields/choice-field';
 import { Field } from '../../../shared/ui/fields/field';
+import { TextInput } from '../../../shared/ui/fields/text-input';
 import { readFilters, type RegisterFilters } from '../model/register-filters';
 
 interface RegisterFiltersFormProps {
@@ -70,14 +70,16 @@ function SearchField({ q, onSearch }: { q: string; onSearch: (q: string) => void
 
   return (
     <Field id={id} label="Search words, authors, symbols">
-      <Input
+      <TextInput
         id={id}
         type="search"
         value={typed}
         maxLength={200}
         autoComplete="off"
-        onChange={(event) => setTyped(event.target.value)}
-        onPressEnter={() => onSearch(typed)}
+        onChange={setTyped}
+        onKeyDown={(event) => {
+          if (event.key === 'Enter') onSearch(typed);
+        }}
       />
     </Field>
   );

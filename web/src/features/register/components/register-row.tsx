@@ -5,6 +5,7 @@ import { authorWords } from '../../../shared/format/author-words';
 import { paths } from '../../../shared/paths';
 import { SmallBoundStrip } from '../../../shared/ui/bound-strip/bound-strip';
 import { rangeWords } from '../../../shared/ui/bound-strip/strip-words';
+import { MarkedText } from '../../../shared/ui/marked-text';
 import { StandingWord } from '../../../shared/ui/standing-word';
 import { SymbolMark } from '../../../shared/ui/symbol-mark';
 import { titleBesideAuthors } from '../model/title-beside-authors';
@@ -24,7 +25,9 @@ export function RegisterRow({ item, withGeometry }: { item: ListedCorrelation; w
           {authorWords(item.authors)}
           {item.year === null ? '' : ` (${item.year})`}
         </Link>
-        <span className="register-title">{titleBesideAuthors(item)}</span>
+        <span className="register-title">
+          <MarkedText text={titleBesideAuthors(item)} />
+        </span>
       </th>
       <td role="cell" className="register-strip">
         <RowBound item={item} />

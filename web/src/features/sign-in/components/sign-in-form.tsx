@@ -1,7 +1,8 @@
-import { Button, Input } from 'antd';
+import { Button } from 'antd';
 import { useState, type SyntheticEvent } from 'react';
 import { ErrorSummary, type SummaryError } from '../../../shared/ui/error-summary';
 import { Field, describedBy } from '../../../shared/ui/fields/field';
+import { TextInput } from '../../../shared/ui/fields/text-input';
 
 const EMAIL = 'sign-in-email';
 const PASSWORD = 'sign-in-password';
@@ -42,7 +43,7 @@ export function SignInForm({ onSignIn, wordsFor }: SignInFormProps) {
     <form className="sign-in-form" noValidate onSubmit={(event) => void send(event)}>
       <ErrorSummary title="You are not signed in yet" errors={errors} />
       <Field id={EMAIL} label="E-mail address" error={missing[EMAIL]}>
-        <Input
+        <TextInput
           id={EMAIL}
           type="email"
           name="email"
@@ -50,8 +51,7 @@ export function SignInForm({ onSignIn, wordsFor }: SignInFormProps) {
           autoCapitalize="none"
           spellCheck={false}
           value={email}
-          status={missing[EMAIL] ? 'error' : ''}
-          onChange={(event) => setEmail(event.target.value)}
+          onChange={setEmail}
           {...describedBy(EMAIL, { error: missing[EMAIL] })}
         />
       </Field>
@@ -74,7 +74,7 @@ function PasswordField({ password, onChange, error }: PasswordFieldProps) {
   return (
     <div className="sign-in-password">
       <Field id={PASSWORD} label="Password" error={error}>
-        <Input
+        <TextInput
           id={PASSWORD}
           type={shown ? 'text' : 'password'}
           name="password"
@@ -82,8 +82,7 @@ function PasswordField({ password, onChange, error }: PasswordFieldProps) {
           autoCapitalize="none"
           spellCheck={false}
           value={password}
-          status={error ? 'error' : ''}
-          onChange={(event) => onChange(event.target.value)}
+          onChange={onChange}
           {...describedBy(PASSWORD, { error })}
         />
       </Field>
