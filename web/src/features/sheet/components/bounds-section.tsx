@@ -1,20 +1,14 @@
-import {
-  QUANTITIES,
-  symbolTex,
-  type Bound,
-  type CorrelationDefinition,
-  type Finding,
-} from '@merestone/engine';
+import type { Bound, CorrelationDefinition } from '@merestone/engine';
 import { Fragment } from 'react';
 import type { Sheet } from '../../../shared/api/types';
-import { BoundStrip } from '../../../shared/ui/bound-strip/bound-strip';
+import { sentence } from '../../../shared/format/sentence';
+import { symbolOnSheet } from '../../../shared/format/symbol-on-sheet';
 import { InlineEquation } from '../../../shared/ui/equation';
 import { MarginNote } from '../../../shared/ui/margin-note';
 import { MarkedText } from '../../../shared/ui/marked-text';
+import { BoundOnSheet } from '../../../shared/ui/on-sheet/bound-on-sheet';
 import { MarginRow } from '../../../shared/ui/sheet-page';
 import type { LiveReadings } from '../model/live-readings';
-import { boundWords } from '../model/plain-words';
-import { sentence } from '../model/sentence';
 
 interface BoundsSectionProps {
   sheet: Sheet;
@@ -28,12 +22,13 @@ export function BoundsSection({ sheet, live }: BoundsSectionProps) {
     <MarginRow heading={<h2>Where it holds</h2>} notes={<BoundNotes definition={definition} />}>
       <ul className="bounds">
         {definition.bounds.map((bound) => (
-          <BoundLine
-            key={bound.on}
-            bound={bound}
-            definition={definition}
-            finding={live.findings.find((finding) => finding.symbol === bound.on)}
-          />
+          <li key={bound.on}>
+            <BoundOnSheet
+              bound={bound}
+              definition={definition}
+              finding={live.findings.find((finding) => finding.symbol === bound.on)}
+            />
+          </li>
         ))}
       </ul>
     </MarginRow>
@@ -52,7 +47,7 @@ function BoundNotes({ definition }: { definition: CorrelationDefinition }) {
               {symbols.map((on, i) => (
                 <Fragment key={on}>
                   {i > 0 ? ', ' : ''}
-                  <InlineEquation tex={symbolOf(definition, on).tex} />
+                  <InlineEquation tex={symbolOnSheet(definition, on).tex} />
                 </Fragment>
               ))}
               : <MarkedText text={text} />
@@ -86,43 +81,4 @@ function placesOf(bounds: readonly Bound[]): [string, string[]][] {
     if (text && basis !== 'none') told.set(text, [...(told.get(text) ?? []), on]);
   }
   return [...told];
-}
-
-interface BoundLineProps {
-  bound: Bound;
-  definition: CorrelationDefinition;
-  finding: Finding | undefined;
-}
-
-function BoundLine({ bound, definition, finding }: BoundLineProps) {
-  const { tex, name, unit } = symbolOf(definition, bound.on);
-  return (
-    <li>
-      <BoundStrip
-        symbol={<InlineEquation tex={tex} />}
-        label={`${name}, ${bound.on}`}
-        stretches={bound.stretches}
-        unit={unit}
-        reading={finding ?? null}
-        note={boundWords(bound)}
-      />
-    </li>
-  );
-}
-
-function symbolOf(
-  definition: CorrelationDefinition,
-  on: string,
-): { tex: string; name: string; unit: string } {
-  const quantity = definition.quantities.find(({ symbol }) => symbol === on);
-  if (quantity)
-    return {
-      tex: symbolTex(on, quantity.tex),
-      name: QUANTITIES[quantity.is]?.title ?? quantity.is.replaceAll('-', ' '),
-      unit: quantity.unit,
-    };
-  const group = definition.groups.find(({ symbol }) => symbol === on);
-  if (group) return { tex: symbolTex(on, group.tex), name: group.name, unit: '1' };
-  const line = definition.intermediates?.find(({ symbol }) => symbol === on);
-  return { tex: symbolTex(on, line?.tex), name: line?.name ?? on, unit: line?.unit ?? '1' };
 }

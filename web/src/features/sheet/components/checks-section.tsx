@@ -6,6 +6,7 @@ import { MarginNote } from '../../../shared/ui/margin-note';
 import { SetTable } from '../../../shared/ui/set-table';
 import { MarginRow } from '../../../shared/ui/sheet-page';
 import { SymbolMark } from '../../../shared/ui/symbol-mark';
+import '../../../shared/ui/on-sheet/symbol-note.css';
 
 /** The worked checks that every start of the machine recomputes. */
 export const ChecksSection = memo(function ChecksSection({ sheet }: { sheet: Pick<Sheet, 'checks'> }) {
@@ -15,29 +16,36 @@ export const ChecksSection = memo(function ChecksSection({ sheet }: { sheet: Pic
       heading={<h2>Worked checks</h2>}
       notes={<MarginNote title="Checks">{summaryOf(checks)}</MarginNote>}
     >
-      <SetTable label="Worked checks">
-        <thead>
-          <tr>
-            <th scope="col">Check</th>
-            <th scope="col" className="number">
-              Expected
-            </th>
-            <th scope="col" className="number">
-              Found
-            </th>
-            <th scope="col" className="number">
-              Deviation
-            </th>
-            <th scope="col">Outcome</th>
-          </tr>
-        </thead>
-        {checks.map((check) => (
-          <CheckRows key={check.title} check={check} />
-        ))}
-      </SetTable>
+      <CheckTable checks={checks} label="Worked checks" />
     </MarginRow>
   );
 });
+
+/** Worked checks with what each expects and what was found. */
+export function CheckTable({ checks, label }: { checks: readonly CheckReport[]; label: string }) {
+  return (
+    <SetTable label={label}>
+      <thead>
+        <tr>
+          <th scope="col">Check</th>
+          <th scope="col" className="number">
+            Expected
+          </th>
+          <th scope="col" className="number">
+            Found
+          </th>
+          <th scope="col" className="number">
+            Deviation
+          </th>
+          <th scope="col">Outcome</th>
+        </tr>
+      </thead>
+      {checks.map((check) => (
+        <CheckRows key={check.title} check={check} />
+      ))}
+    </SetTable>
+  );
+}
 
 function CheckRows({ check }: { check: CheckReport }) {
   return (

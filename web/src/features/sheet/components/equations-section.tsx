@@ -2,12 +2,12 @@ import type { DefinitionTex, LineTex } from '@merestone/engine';
 import { memo } from 'react';
 import type { Sheet } from '../../../shared/api/types';
 import { formatDay } from '../../../shared/format/format-date';
-import { Equation, InlineEquation } from '../../../shared/ui/equation';
 import { MarginNote } from '../../../shared/ui/margin-note';
 import { MarkedText } from '../../../shared/ui/marked-text';
+import { EquationLine } from '../../../shared/ui/on-sheet/equation-line';
 import { MarginRow } from '../../../shared/ui/sheet-page';
-import { numberedLines } from '../model/numbered-lines';
-import { VERIFICATION_WORDS } from '../model/plain-words';
+import { numberedLines } from '../../../shared/format/numbered-lines';
+import { VERIFICATION_WORDS } from '../../../shared/format/plain-words';
 import { SourceNotes } from './source-notes';
 
 interface EquationsSectionProps {
@@ -53,7 +53,9 @@ function EquationNotes({ sheet }: { sheet: Sheet }) {
 function NumberedEquations({ tex }: { tex: DefinitionTex }) {
   const numbers = new Map(numberedLines(tex).map((line, i) => [line, i + 1]));
   const several = tex.parts.length > 1;
-  const set = (line: LineTex) => <Line key={line.symbol} line={line} number={numbers.get(line) ?? 0} />;
+  const set = (line: LineTex) => (
+    <EquationLine key={line.symbol} line={line} number={numbers.get(line) ?? 0} />
+  );
   return (
     <>
       {tex.intermediates.map(set)}
@@ -66,24 +68,4 @@ function NumberedEquations({ tex }: { tex: DefinitionTex }) {
       ))}
     </>
   );
-}
-
-/** One equation; of pieces each with the conditions it holds under, all under one number. */
-function Line({ line, number }: { line: LineTex; number: number }) {
-  return line.formulas.map(({ tex, whenTex, title }, i) => (
-    <Equation
-      key={tex + (whenTex ?? '')}
-      tex={`${line.symbolTex} = ${tex}`}
-      {...(line.formulas.length === 1
-        ? { number }
-        : { number: `${number}${'abcdefghijklmnopqrstuvwxyz'[i] ?? ''}` })}
-    >
-      {whenTex ? (
-        <>
-          {title ? `${title}: ` : 'for '}
-          <InlineEquation tex={whenTex} />
-        </>
-      ) : null}
-    </Equation>
-  ));
 }

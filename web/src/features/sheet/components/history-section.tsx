@@ -8,6 +8,7 @@ import { shortHash } from '../../../shared/ui/running-head';
 import { SetTable } from '../../../shared/ui/set-table';
 import { MarginRow } from '../../../shared/ui/sheet-page';
 import { StandingWord } from '../../../shared/ui/standing-word';
+import '../../../shared/ui/on-sheet/symbol-note.css';
 
 const VERDICTS: Readonly<Record<Sheet['reviews'][number]['verdict'], string>> = {
   recommend: 'recommends it',

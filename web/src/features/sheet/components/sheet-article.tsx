@@ -7,7 +7,7 @@ import { RunningHead } from '../../../shared/ui/running-head';
 import { SheetPage } from '../../../shared/ui/sheet-page';
 import type { LiveReadings } from '../model/live-readings';
 import { inWords } from '../model/in-words';
-import { numberedLines } from '../model/numbered-lines';
+import { numberedLines } from '../../../shared/format/numbered-lines';
 import { BoundsSection } from './bounds-section';
 import { ChecksSection } from './checks-section';
 import { EquationsSection } from './equations-section';

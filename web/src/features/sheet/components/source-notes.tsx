@@ -1,7 +1,8 @@
-import { formatCitation, type Source } from '@merestone/engine';
+import type { Source } from '@merestone/engine';
 import { MarginNote } from '../../../shared/ui/margin-note';
-import { READ_WORDS } from '../model/plain-words';
-import { sentence } from '../model/sentence';
+import { Citation } from '../../../shared/ui/on-sheet/citation';
+import { READ_WORDS } from '../../../shared/format/plain-words';
+import { sentence } from '../../../shared/format/sentence';
 
 /** The first source with the place in it, what it gave, and whether anybody has read it; further ones folded under it. */
 export function SourceNotes({ sources }: { sources: readonly Source[] }) {
@@ -27,24 +28,5 @@ function SourceText({ source }: { source: Source }) {
     <p>
       <Citation source={source} /> {sentence(source.gives)} {READ_WORDS[source.read]}
     </p>
-  );
-}
-
-/** A citation as a reference list has it, the place in the source behind it. */
-export function Citation({ source }: { source: Source }) {
-  const { before, work, after, doi } = formatCitation(source.csl);
-  return (
-    <>
-      {before} <i>{work}</i>
-      {after}; {source.place.replace(/\.$/, '')}.
-      {doi ? (
-        <>
-          {' '}
-          <a href={doi.href} rel="noreferrer" target="_blank">
-            doi:{doi.name}
-          </a>
-        </>
-      ) : null}
-    </>
   );
 }

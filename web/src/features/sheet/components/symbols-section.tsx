@@ -1,20 +1,22 @@
-import {
-  QUANTITIES,
-  symbolTex,
-  type CorrelationDefinition,
-  type DefinitionTex,
-  type Quantity,
-} from '@merestone/engine';
+import { symbolTex, type CorrelationDefinition, type DefinitionTex } from '@merestone/engine';
 import { memo, type ReactNode } from 'react';
 import { formatUnit } from '../../../shared/format/format-unit';
 import { InlineEquation } from '../../../shared/ui/equation';
 import { Figure } from '../../../shared/ui/figure';
 import { MarginNote } from '../../../shared/ui/margin-note';
 import { MarkedText } from '../../../shared/ui/marked-text';
+import { QuantityMeaning } from '../../../shared/ui/on-sheet/quantity-meaning';
 import { SetTable } from '../../../shared/ui/set-table';
 import { MarginRow } from '../../../shared/ui/sheet-page';
 import type { LiveReadings } from '../model/live-readings';
-import { AVERAGING_WORDS, FORCE_WORDS, STATE_WORDS, WALL_WORDS, accuracyText } from '../model/plain-words';
+import {
+  AVERAGING_WORDS,
+  FORCE_WORDS,
+  STATE_WORDS,
+  WALL_WORDS,
+  accuracyText,
+} from '../../../shared/format/plain-words';
+import '../../../shared/ui/on-sheet/symbol-note.css';
 
 interface SymbolsSectionProps {
   definition: CorrelationDefinition;
@@ -121,24 +123,4 @@ function rowsOf(definition: CorrelationDefinition, tex: DefinitionTex | null): S
       : []),
   ]);
   return [...lines, ...results, ...quantities];
-}
-
-function QuantityMeaning({ quantity }: { quantity: Quantity }) {
-  const entry = QUANTITIES[quantity.is];
-  const notes = [quantity.meaning, quantity.meaning ? undefined : entry?.hint, roleWords(quantity)].filter(
-    Boolean,
-  );
-  return (
-    <>
-      {entry?.title ?? quantity.is.replaceAll('-', ' ')}
-      {quantity.at ? `, at ${quantity.at}` : ''}
-      {notes.length > 0 ? <span className="symbol-note">{notes.join(' ')}</span> : null}
-    </>
-  );
-}
-
-function roleWords({ role, table }: Quantity): string | undefined {
-  if (role === 'characteristic-length') return 'The characteristic length.';
-  if (role === 'state') return 'Serves property equations, bounds and other bases.';
-  return table ? `From the table of ${table.replaceAll('-', ' ')}s, or given.` : undefined;
 }
