@@ -23,7 +23,7 @@ export interface paths {
             path?: never;
             cookie?: never;
         };
-        /** Everybody active, with name and roles */
+        /** Everybody active, with name and roles; for administrators everybody, with all they look after */
         get: operations["listPeople"];
         put?: never;
         post?: never;
@@ -33,7 +33,7 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
-    "/api/people/first-administrator": {
+    "/api/people/{id}": {
         parameters: {
             query?: never;
             header?: never;
@@ -42,8 +42,42 @@ export interface paths {
         };
         get?: never;
         put?: never;
-        /** The first person of an office, with the token from the server's terminal */
-        post: operations["addFirstAdministrator"];
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        /** Change a person's name or roles */
+        patch: operations["changePerson"];
+        trace?: never;
+    };
+    "/api/people/{id}/deactivation": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Shut a person out at once; nothing is deleted */
+        post: operations["deactivatePerson"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/people/{id}/reactivation": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Let a person in again */
+        post: operations["reactivatePerson"];
         delete?: never;
         options?: never;
         head?: never;
@@ -148,6 +182,248 @@ export interface paths {
         get: operations["listDemoPeople"];
         put?: never;
         post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/session/sessions": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** The caller's own sessions */
+        get: operations["listSessions"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/session/sessions/{id}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post?: never;
+        /** End another of the caller's sessions */
+        delete: operations["endSession"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/session/password": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        /** Change the own password; all other sessions end */
+        put: operations["changePassword"];
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/settings": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** What the office has decided on */
+        get: operations["getSettings"];
+        /** Change what the office has decided on */
+        put: operations["changeSettings"];
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/people/invitations": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Invite somebody by mail; asked again, the former link is void */
+        post: operations["invitePerson"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/invitations/{token}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Whom an invitation is for */
+        get: operations["getInvitation"];
+        put?: never;
+        /** Join with a password; the link is used up */
+        post: operations["acceptInvitation"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/password-resets": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Ask for a link to choose a new password */
+        post: operations["askForPassword"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/password-resets/{token}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Choose a new password; the link is used up and all sessions end */
+        post: operations["resetPassword"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/notices": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** The caller's own notices */
+        get: operations["listNotices"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/notices/preferences": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Which notices come by mail, too */
+        get: operations["getNoticePreferences"];
+        /** Choose which notices come by mail */
+        put: operations["setNoticePreferences"];
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/notices/{id}/reading": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Say that a notice was read */
+        post: operations["readNotice"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/appointments": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Who was appointed technical authority, and how */
+        get: operations["listAppointments"];
+        put?: never;
+        /** Propose a technical authority */
+        post: operations["proposeAppointment"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/appointments/{id}/confirmation": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Confirm a proposal, as another technical authority or as the office's principal */
+        post: operations["confirmAppointment"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/appointments/{id}/end": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** End an appointment, or take a proposal back */
+        post: operations["endAppointment"];
         delete?: never;
         options?: never;
         head?: never;
@@ -547,18 +823,38 @@ export interface components {
             id: string;
             name: string;
             roles: ("engineer" | "reviewer" | "authority" | "auditor" | "administrator")[];
+            /** @description Only for administrators */
+            email?: string;
+            /** @description Only for administrators */
+            active?: boolean;
+            /** @description Only for administrators: was invited and has not joined yet */
+            invited?: boolean;
+            /**
+             * Format: date-time
+             * @description Only for administrators
+             */
+            lastSignIn?: string | null;
         };
         PeopleResponse: {
             items: components["schemas"]["PersonEntry"][];
         };
-        FirstAdministratorBody: {
-            /** @description The token of the link that the server's terminal shows */
-            token: string;
+        PersonChangeDto: {
+            name?: string;
+            roles?: ("engineer" | "reviewer" | "authority" | "auditor" | "administrator")[];
+        };
+        ManagedPerson: {
+            id: string;
             name: string;
-            /** Format: email */
             email: string;
-            /** Format: password */
-            password: string;
+            roles: ("engineer" | "reviewer" | "authority" | "auditor" | "administrator")[];
+            active: boolean;
+            /** @description Was invited and has not joined yet */
+            invited: boolean;
+            /** Format: date-time */
+            lastSignIn: string | null;
+        };
+        ReasonDto: {
+            reason: string;
         };
         JournalActor: {
             id: string;
@@ -624,6 +920,7 @@ export interface components {
             id: string;
             to: string;
             subject: string;
+            /** @description A link that lets somebody in is shown only where there is no mail server to send it */
             body: string;
             /** Format: date-time */
             at: string;
@@ -665,6 +962,203 @@ export interface components {
             items: components["schemas"]["DemoPerson"][];
             /** @description The password of all of them */
             password: string;
+        };
+        SessionItem: {
+            /** @description Names the session; opens nothing */
+            id: string;
+            /** Format: date-time */
+            createdAt: string;
+            /** Format: date-time */
+            lastSeenAt: string;
+            /** @description What the browser says of itself; anybody can say anything */
+            agent: string;
+            /** @description The one in use */
+            current: boolean;
+        };
+        SessionsResponse: {
+            /** @description The one used last first */
+            items: components["schemas"]["SessionItem"][];
+        };
+        PasswordChangeDto: {
+            /**
+             * Format: password
+             * @description The present password
+             */
+            current: string;
+            /**
+             * Format: password
+             * @description The new one: 8 to 128 characters, 15 or more are better
+             */
+            password: string;
+        };
+        Principal: {
+            id: string;
+            name: string;
+        };
+        SettingsResponse: {
+            officeName: string;
+            /** @description How many favourable reviews an approval rests on */
+            reviewsNeeded: number;
+            /** @description Who confirms appointments besides the technical authorities */
+            principal: components["schemas"]["Principal"] | null;
+            /** @description Months after which an approved revision is due for review */
+            reviewDueMonths: number;
+        };
+        SettingsDto: {
+            officeName: string;
+            reviewsNeeded: number;
+            /** @description A person's id; null for nobody */
+            principal: string | null;
+            reviewDueMonths: number;
+        };
+        InvitationDto: {
+            name: string;
+            /** Format: email */
+            email: string;
+            roles: ("engineer" | "reviewer" | "authority" | "auditor" | "administrator")[];
+        };
+        InvitationResponse: {
+            /** @description null: the first administrator says so */
+            name: string | null;
+            /** @description null: the first administrator says so */
+            email: string | null;
+        };
+        AcceptanceDto: {
+            /**
+             * Format: password
+             * @description 8 to 128 characters, 15 or more are better
+             */
+            password: string;
+            name?: string;
+            /** Format: email */
+            email?: string;
+        };
+        JoinedResponse: {
+            name: string;
+            /** @description The address to sign in with */
+            email: string;
+        };
+        ResetRequestDto: {
+            email: string;
+        };
+        ResetAskedResponse: {
+            /** @description The same for every address */
+            message: string;
+        };
+        ResetDto: {
+            /**
+             * Format: password
+             * @description 8 to 128 characters, 15 or more are better
+             */
+            password: string;
+        };
+        NoticeItem: {
+            id: number;
+            /** @enum {string} */
+            kind: "review-asked" | "comment" | "verdict" | "approval" | "withdrawal" | "reminder" | "appointment" | "report";
+            text: string;
+            /** @description A path in the screens */
+            href: string;
+            /** Format: date-time */
+            at: string;
+            read: boolean;
+        };
+        NoticesResponse: {
+            /** @description The latest first */
+            items: components["schemas"]["NoticeItem"][];
+            unread: number;
+            nextCursor: string | null;
+        };
+        NoticeChoices: {
+            /** @description Which kinds come by mail, too */
+            mail?: {
+                "review-asked": boolean;
+                comment: boolean;
+                verdict: boolean;
+                approval: boolean;
+                withdrawal: boolean;
+                reminder: boolean;
+                appointment: boolean;
+                report: boolean;
+            };
+        };
+        MailChoices: {
+            /** @description Left out, it stays as it is */
+            "review-asked"?: boolean;
+            /** @description Left out, it stays as it is */
+            comment?: boolean;
+            /** @description Left out, it stays as it is */
+            verdict?: boolean;
+            /** @description Left out, it stays as it is */
+            approval?: boolean;
+            /** @description Left out, it stays as it is */
+            withdrawal?: boolean;
+            /** @description Left out, it stays as it is */
+            reminder?: boolean;
+            /** @description Left out, it stays as it is */
+            appointment?: boolean;
+            /** @description Left out, it stays as it is */
+            report?: boolean;
+        };
+        NoticeChoicesDto: {
+            mail: components["schemas"]["MailChoices"];
+        };
+        AppointmentPerson: {
+            id: string;
+            name: string;
+        };
+        AppointmentStep: {
+            /** Format: date-time */
+            at: string;
+            by: components["schemas"]["AppointmentPerson"];
+        };
+        AppointmentAbilities: {
+            confirm: boolean;
+            end: boolean;
+        };
+        AppointmentItem: {
+            id: string;
+            person: components["schemas"]["AppointmentPerson"];
+            /** @description Slugs of geometries; all: every one, and property equations too */
+            geometries: "all" | string[];
+            /**
+             * Format: date
+             * @description Last day, UTC
+             */
+            until: string;
+            /** @enum {string} */
+            state: "proposed" | "current" | "ended";
+            proposed: components["schemas"]["AppointmentStep"];
+            confirmed: components["schemas"]["AppointmentStep"] | null;
+            ended: components["schemas"]["AppointmentStep"] | null;
+            endReason: string | null;
+            /** @description What the caller may do with it now */
+            abilities: components["schemas"]["AppointmentAbilities"];
+        };
+        AppointmentsResponse: {
+            /** @description The latest proposal first */
+            items: components["schemas"]["AppointmentItem"][];
+        };
+        ProposalDto: {
+            /** @description The person's id */
+            person: string;
+            /** @description Slugs of geometries; all: every one, and property equations too */
+            geometries: "all" | string[];
+            /**
+             * Format: date
+             * @description Last day, UTC
+             */
+            until: string;
+        };
+        ConfirmationDto: {
+            /**
+             * Format: password
+             * @description The caller's own password, once more
+             */
+            password: string;
+        };
+        EndDto: {
+            reason: string;
         };
         GeometryEntry: {
             slug: string;
@@ -1819,16 +2313,80 @@ export interface operations {
             };
         };
     };
-    addFirstAdministrator: {
+    changePerson: {
         parameters: {
             query?: never;
             header?: never;
-            path?: never;
+            path: {
+                id: string;
+            };
             cookie?: never;
         };
         requestBody: {
             content: {
-                "application/json": components["schemas"]["FirstAdministratorBody"];
+                "application/json": components["schemas"]["PersonChangeDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ManagedPerson"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission people.manage */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description There is no such person */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Roles that exclude each other, or no administrator left */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    deactivatePerson: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ReasonDto"];
             };
         };
         responses: {
@@ -1837,11 +2395,94 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content: {
-                    "application/json": components["schemas"]["PersonEntry"];
+                    "application/json": components["schemas"]["ManagedPerson"];
                 };
             };
-            /** @description The token does not hold, or there is an administrator */
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission people.manage */
             403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description There is no such person */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Inactive already, or the only administrator */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    reactivatePerson: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ReasonDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ManagedPerson"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission people.manage */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description There is no such person */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Active already */
+            409: {
                 headers: {
                     [name: string]: unknown;
                 };
@@ -2166,6 +2807,829 @@ export interface operations {
             };
             /** @description Not a demo office */
             404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    listSessions: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SessionsResponse"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    endSession: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description The caller has no such session */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description It is the one in use */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    changePassword: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["PasswordChangeDto"];
+            };
+        };
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description The new password cannot be taken */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description The present password is not right */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    getSettings: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SettingsResponse"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission settings.read */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    changeSettings: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["SettingsDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SettingsResponse"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission settings.change */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description The person named cannot be the principal */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    invitePerson: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["InvitationDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ManagedPerson"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission people.manage */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description The address is taken, or the roles cannot be given */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    getInvitation: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                token: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["InvitationResponse"];
+                };
+            };
+            /** @description The link does not hold, or not any more */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    acceptInvitation: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                token: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["AcceptanceDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["JoinedResponse"];
+                };
+            };
+            /** @description The password cannot be taken */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description The link does not hold, or not any more */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    askForPassword: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ResetRequestDto"];
+            };
+        };
+        responses: {
+            202: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ResetAskedResponse"];
+                };
+            };
+            /** @description Asked too often */
+            429: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    resetPassword: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                token: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ResetDto"];
+            };
+        };
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description The password cannot be taken */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description The link does not hold, or not any more */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    listNotices: {
+        parameters: {
+            query?: {
+                /** @description nextCursor of the page before */
+                cursor?: string;
+                /** @description 1 to 200; 50 when left out */
+                limit?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["NoticesResponse"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    getNoticePreferences: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["NoticeChoices"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    setNoticePreferences: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["NoticeChoicesDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["NoticeChoices"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    readNotice: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["NoticeItem"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description The caller has no such notice */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    listAppointments: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["AppointmentsResponse"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission appointment.read */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    proposeAppointment: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ProposalDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["AppointmentItem"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission appointment.propose */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description The person cannot be a technical authority */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    confirmAppointment: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ConfirmationDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["AppointmentItem"];
+                };
+            };
+            /** @description Neither of the two, not a second person, or the wrong password */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description There is no such appointment */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Confirmed or ended already */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    endAppointment: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["EndDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["AppointmentItem"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission appointment.end */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description There is no such appointment */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description It has ended */
+            409: {
                 headers: {
                     [name: string]: unknown;
                 };
