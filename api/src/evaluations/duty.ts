@@ -1,4 +1,9 @@
-import { serves, type CompiledCorrelation, type EvaluationRequest, type InputValue } from '@merestone/engine';
+import {
+  servingQuantity,
+  type CompiledCorrelation,
+  type EvaluationRequest,
+  type InputValue,
+} from '@merestone/engine';
 
 /** An operating point that no sheet is bound to: keyed by names of the quantity dictionary. */
 export interface Duty {
@@ -57,10 +62,8 @@ export function requestFor({ definition, sheet }: CompiledCorrelation, duty: Dut
 }
 
 function servingValue({ values }: Duty, wanted: string): InputValue | undefined {
-  const exact = values.get(wanted);
-  if (exact) return exact;
-  const [match] = [...values].filter(([given]) => serves(given, wanted));
-  return match?.[1];
+  const named = [...values].map(([is, value]) => ({ is, value }));
+  return servingQuantity(named, wanted)?.value;
 }
 
 function inputsOfEquation({ inputs }: EvaluationRequest, symbol: string): ReadonlyMap<string, InputValue> {

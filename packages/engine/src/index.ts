@@ -66,7 +66,8 @@ export { compareDefinitions, type Difference } from './comparison/compare-defini
 export { inspectCorrelation, type InspectionReport } from './inspection/inspect-correlation.js';
 export { INSPECTION_TOPICS, type InspectionTopic, type Remark } from './inspection/remark.js';
 
-export { holdAgainstBound, DEFAULT_REACH } from './bounds/hold-against-bound.js';
+export { holdAgainstBound } from './bounds/hold-against-bound.js';
+export { DEFAULT_REACH, TEMPERATURE_REACH } from './bounds/reach.js';
 export { stripGeometry } from './bounds/strip.js';
 export type { StripGeometry, StripInput, StripRun, StripRunKind, StripStone } from './bounds/strip.js';
 export type { StripAxis, StripScale } from './bounds/strip-axis.js';

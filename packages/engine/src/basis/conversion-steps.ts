@@ -35,7 +35,9 @@ export function conversionStep(
   const tree = simple ? formula(assumes && basis === 'F' ? LOW_FLUX_F : FORMULAS[basis]) : null;
   const symbolic =
     tree && treeTex(tree, (name) => ({ tex: symbolTex(name === 'k' ? own : name), compound: false }));
-  const numbers = tree && treeTex(tree, (name) => putInTex(valueFor(name, from, state)));
+  // The same number under another name needs no arithmetic written out.
+  const numbers =
+    tree && tree.kind !== 'symbol' && treeTex(tree, (name) => putInTex(valueFor(name, from, state)));
   const shown = valueTex(value, unit);
   const words = `${part}, ${BASES[basis].words}`;
   return {

@@ -1,6 +1,7 @@
 import { describe, expect, test } from 'vitest';
 import type { Bound, BoundEnd, BoundNature, Stretch } from '../sheet/common-schema.js';
-import { DEFAULT_REACH, holdAgainstBound } from './hold-against-bound.js';
+import { holdAgainstBound } from './hold-against-bound.js';
+import { DEFAULT_REACH } from './reach.js';
 
 const end = (value: number, nature: BoundNature = 'data', more: Partial<BoundEnd> = {}): BoundEnd => ({
   value,
@@ -201,7 +202,9 @@ test('units and labels stand in the message', () => {
   const finding = holdAgainstBound(subject, 500, 'K', 'rho.T');
   expect(finding.symbol).toBe('rho.T');
   expect(finding.unit).toBe('K');
-  expect(finding.message).toMatch(/^rho\.T = 500\u2009K is 1\.25 × the upper bound 400 \(from a handbook\)/);
+  expect(finding.message).toMatch(
+    /^rho\.T = 500\u2009K is 100 degrees above the upper bound 400 \(from a handbook\)/,
+  );
 });
 
 describe('where near says nothing', () => {
@@ -211,5 +214,28 @@ describe('where near says nothing', () => {
 
   test('a physical limit is never near: a fraction of 0.99 is just a fraction', () => {
     expect(hold(bound({ lo: end(0, 'physical'), hi: end(1, 'physical') }), 0.99).kind).toBe('within');
+  });
+});
+
+describe('temperatures', () => {
+  const warm = bound({ lo: end(0), hi: end(50) });
+
+  test('are compared in kelvin, whatever the sheet counts in', () => {
+    // 60 °C over 50 °C is 333.15 K over 323.15 K
+    expect(hold(warm, 60, 'degC')).toMatchObject({ kind: 'outside', deviable: true });
+    expect(hold(warm, 60, 'degC').ratio).toBeCloseTo(333.15 / 323.15, 12);
+  });
+
+  test('reach a tenth further in kelvin, not twice as far', () => {
+    // 323.15 K × 1.1 = 355.465 K = 82.315 °C
+    expect(hold(warm, 82.3, 'degC').kind).toBe('outside');
+    expect(hold(warm, 82.4, 'degC').kind).toBe('past-reach');
+    // 273.15 K / 1.1 = 248.32 K = −24.83 °C: zero degrees is a limit like any other
+    expect(hold(warm, -24, 'degC').kind).toBe('outside');
+    expect(hold(warm, -25, 'degC').kind).toBe('past-reach');
+  });
+
+  test('are told in degrees', () => {
+    expect(hold(warm, 60, 'degC').message).toContain('is 10 degrees above the upper bound 50');
   });
 });

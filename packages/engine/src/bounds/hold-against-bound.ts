@@ -2,12 +2,10 @@ import { formatNumber } from '../expression/number-text.js';
 import type { Finding } from '../evaluation/outcome.js';
 import type { Bound, BoundEnd, Stretch } from '../sheet/common-schema.js';
 import { compareWithLimit, holds } from './interval.js';
+import { isTemperature, isWithinReach, ratioTo, reachLimit, type Side } from './reach.js';
 
 /** A value this close to a limit (as a share of it) is told as near. */
 const NEAR = 0.05;
-/** How far past a limit of data a deviation may go, where the sheet says nothing else. */
-export const DEFAULT_REACH = 2;
-
 const BASIS_WORDS = {
   stated: 'stated in the source',
   handbook: 'from a handbook',
@@ -71,8 +69,8 @@ function limitsOf({ lo, hi }: Stretch): Pick<Finding, 'lo' | 'hi' | 'loClosed' |
 }
 
 function insideFinding(blank: Finding, { lo, hi }: Stretch, value: number): Finding {
-  const toHi = ratioTo(hi, value, 'hi');
-  const toLo = ratioTo(lo, value, 'lo');
+  const toHi = ratioTo(hi, value, 'hi', blank.unit);
+  const toLo = ratioTo(lo, value, 'lo', blank.unit);
   const upper = (toHi ?? 0) >= (toLo ?? 0);
   const ratio = upper ? toHi : toLo;
   const end = upper ? hi : lo;
@@ -92,12 +90,6 @@ function insideFinding(blank: Finding, { lo, hi }: Stretch, value: number): Find
 /** A stretch so short that all of it would be near: it stands for a single value. */
 function narrow(lo: BoundEnd | undefined, hi: BoundEnd | undefined): boolean {
   return lo !== undefined && hi !== undefined && lo.value > 0 && hi.value / lo.value < 1 + 2 * NEAR;
-}
-
-/** Value over upper limit, or lower limit over value; null where that says nothing. */
-function ratioTo(end: BoundEnd | undefined, value: number, side: 'lo' | 'hi'): number | null {
-  if (!end || end.value <= 0 || value <= 0) return null;
-  return side === 'hi' ? value / end.value : end.value / value;
 }
 
 function outsideFinding(blank: Finding, bound: Bound, value: number): Finding {
@@ -126,39 +118,33 @@ function betweenFinding(blank: Finding, below: Stretch, above: Stretch, value: n
   };
 }
 
-function beyondFinding(blank: Finding, end: BoundEnd | undefined, value: number, side: 'lo' | 'hi'): Finding {
+function beyondFinding(blank: Finding, end: BoundEnd | undefined, value: number, side: Side): Finding {
   if (!end) return blank;
-  const ratio = ratioTo(end, value, side);
-  const data = end.nature === 'data';
-  const reached = data && withinReach(end, value, side);
+  const { unit } = blank;
+  const reached = isWithinReach(end, value, side, unit);
   const sideWord = side === 'hi' ? 'upper' : 'lower';
-  const shown = `${blank.symbol} = ${formatNumber(value)}${unitText(blank.unit)}`;
-  const far =
-    ratio === null ? `is ${side === 'hi' ? 'above' : 'below'} the` : `is ${farText(ratio, side)} the`;
+  const shown = `${blank.symbol} = ${formatNumber(value)}${unitText(unit)}`;
   return {
     ...blank,
-    kind: data && !reached ? 'past-reach' : 'outside',
+    kind: end.nature === 'data' && !reached ? 'past-reach' : 'outside',
     nature: end.nature,
-    ratio,
+    ratio: ratioTo(end, value, side, unit),
     deviable: reached,
     beyond: end.beyond ?? [],
-    message: `${shown} ${far} ${sideWord} bound ${formatNumber(end.value)} (${BASIS_WORDS[blank.basis]}). ${consequence(end, reached, side)}`,
+    message: `${shown} is ${farText(end, value, side, unit)} the ${sideWord} bound ${formatNumber(end.value)} (${BASIS_WORDS[blank.basis]}). ${consequence(end, reached, side, unit)}`,
   };
 }
 
-function farText(ratio: number, side: 'lo' | 'hi'): string {
-  return side === 'hi' ? `${formatNumber(ratio, 3)} ×` : `${formatNumber(1 / ratio, 3)} ×`;
+/** How far out: as a multiple of the bound, in degrees for a temperature, else just on which side. */
+function farText(end: BoundEnd, value: number, side: Side, unit: string): string {
+  const aside = side === 'hi' ? 'above' : 'below';
+  if (isTemperature(unit)) return `${formatNumber(Math.abs(value - end.value), 3)} degrees ${aside}`;
+  const ratio = ratioTo(end, value, side, unit);
+  if (ratio === null) return aside;
+  return `${formatNumber(side === 'hi' ? ratio : 1 / ratio, 3)} ×`;
 }
 
-function withinReach(end: BoundEnd, value: number, side: 'lo' | 'hi'): boolean {
-  if (end.value <= 0) return false;
-  const reach = end.reach ?? DEFAULT_REACH;
-  return side === 'hi'
-    ? compareWithLimit(value, end.value * reach) <= 0
-    : compareWithLimit(value, end.value / reach) >= 0;
-}
-
-function consequence(end: BoundEnd, reached: boolean, side: 'lo' | 'hi'): string {
+function consequence(end: BoundEnd, reached: boolean, side: Side, unit: string): string {
   switch (end.nature) {
     case 'regime':
       return 'The limit is a change of regime: no deviation is possible; choose a correlation for the other side.';
@@ -166,16 +152,13 @@ function consequence(end: BoundEnd, reached: boolean, side: 'lo' | 'hi'): string
       return 'Beyond it the formula has no meaning: no deviation is possible.';
     case 'physical':
       return 'Such a value cannot be.';
-    case 'data':
+    case 'data': {
       if (reached) return 'The data end there: choose another correlation, or record a deviation.';
-      if (end.value <= 0) return 'The data end there, and a deviation has no reach from such a limit.';
-      return `The data end there, and a deviation reaches to ${formatNumber(reachLimit(end, side))} at most: no number is given.`;
+      const furthest = reachLimit(end, side, unit);
+      if (furthest === null) return 'The data end there, and a deviation has no reach from such a limit.';
+      return `The data end there, and a deviation reaches to ${formatNumber(furthest)} at most: no number is given.`;
+    }
   }
-}
-
-function reachLimit(end: BoundEnd, side: 'lo' | 'hi'): number {
-  const reach = end.reach ?? DEFAULT_REACH;
-  return side === 'hi' ? end.value * reach : end.value / reach;
 }
 
 function unitText(unit: string): string {

@@ -46,6 +46,7 @@ export interface Finding {
   kind: FindingKind;
   value: number | null;
   unit: string;
+  /** Limits of the stretch concerned; of a gap, the ends of the stretches on its two sides. */
   lo: number | null;
   hi: number | null;
   loClosed: boolean;
@@ -137,7 +138,7 @@ export interface UsedEquation {
 export const PROVISIONAL = 'provisional, not for design';
 
 export interface Numbers {
-  /** Every group that has a value, computed or given. */
+  /** The groups that the result, the coefficient or a bound needed, computed or given. */
   groups: Record<string, number>;
   intermediates: Record<string, { value: number; unit: string }>;
   /** Of the principal (last) part. */

@@ -197,7 +197,7 @@ describe('the bounds of a property equation', () => {
     });
     const outcome = outcomeOf(
       aSheet(),
-      byEquation({ ...STATE, T: { value: 450 } }),
+      byEquation({ ...STATE, T: { value: 430 } }),
       libraryOf({ 'ideal-density': pieces }),
     );
     expect(outcome).toMatchObject({ outcome: 'refused', code: 'between-pieces' });

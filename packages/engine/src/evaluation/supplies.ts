@@ -174,6 +174,14 @@ function checkEquations(
           message: `${symbol} is given and also asked from a property equation: choose one.`,
         },
       ];
+    if (rowValue(sheet, quantity, request.rows, ''))
+      return [
+        {
+          code: 'over-determined',
+          field,
+          message: `${symbol} is filled by the chosen row and also asked from a property equation: choose one.`,
+        },
+      ];
     return [];
   });
 }

@@ -33,9 +33,14 @@ const GREEK = new Set([
 /** Dimensionless numbers are set upright (ISO 80000-11 sets them in italics; two-letter names read better upright, as handbooks do). */
 const UPRIGHT = /^(Re|Sc|Sh|Pe|Gr|Ra|Ga|We|Fr|Gz|Le|St|Nu|Pr|Bo|Eo|Ca|Mo|Bi|Fo|Da|Ar|Ta)$/;
 
+/** A coefficient times interfacial area, written `k_La` in expressions, is a product in print. */
+const VOLUMETRIC = /^(k_[cGyLx])a$/;
+
 /** TeX of a symbol: Greek by name (`eps` for short), what follows `_` as subscript, numbers such as Re upright. */
 export function symbolTex(symbol: string, override?: string): string {
   if (override) return override;
+  const volumetric = VOLUMETRIC.exec(symbol)?.[1];
+  if (volumetric) return `${symbolTex(volumetric)}\\,a`;
   const [head = symbol, sub] = symbol.split('_');
   const { letter, tail } = split(head);
   const subscript = [tail, sub]

@@ -47,8 +47,10 @@ describe('how units are written', () => {
     expect(sameDimension(a.dimension, b.dimension)).toBe(true);
   });
 
-  test('two units side by side under a solidus both divide, as in the grammar of GNU units', () => {
-    expect(dimensionText(unit('kg/m s').dimension)).toBe('kg/(m s)');
+  // ISO 80000-1, 7.2.2: a product under a solidus stands in brackets (from memory).
+  test.each(['kg/m s', 'kg/m*s', 'W/m·K'])('%s can be read in two ways and is refused', (text) => {
+    const reading = readUnit(text);
+    expect(reading.ok ? '' : reading.reason).toContain('in brackets');
   });
 
   test.each([

@@ -150,6 +150,11 @@ function readProduct(plain: string, text: string): UnitReading {
   let factor = 1;
   let dimension: Dimension = DIMENSIONLESS;
   const factors = factorsOf(plain);
+  if (factors === 'ambiguous')
+    return {
+      ok: false,
+      reason: `"${text}" can be read in two ways; put what stands under the stroke in brackets`,
+    };
   if (!factors) return unknownUnit(text);
   for (const { name, exponent } of factors) {
     const read = name === '1' ? { factor: 1, dimension: DIMENSIONLESS } : atom(name);
@@ -167,12 +172,16 @@ function unknownUnit(text: string): UnitReading {
   return { ok: false, reason: `"${text}" is not a unit we know` };
 }
 
-/** Splits `a b/(c d)/e` into names with exponents; null where brackets or slashes are misused. */
-function factorsOf(plain: string): { name: string; exponent: number }[] | null {
+/**
+ * Splits `a b/(c d)/e` into names with exponents; null where brackets or slashes are misused. A product under a stroke
+ * stands in brackets (ISO 80000-1): `kg/m s` means different things to different people.
+ */
+function factorsOf(plain: string): { name: string; exponent: number }[] | 'ambiguous' | null {
   const found: { name: string; exponent: number }[] = [];
   for (const [i, side] of splitAtSlashes(plain).entries()) {
     const inside = side.trim().replace(/^\((.*)\)$/, '$1');
     if (/[()]/.test(inside) || inside.trim() === '') return null;
+    if (i > 0 && inside === side.trim() && inside.includes(' ')) return 'ambiguous';
     for (const word of inside.trim().split(' ')) {
       const match = word === '1' ? ['', '1', undefined] : FACTOR.exec(word);
       if (!match?.[1]) return null;
