@@ -208,7 +208,7 @@ describe('the bounds of a property equation', () => {
       expect.objectContaining({
         symbol: 'rho.T',
         kind: 'between',
-        message: 'No piece of the equation for rho covers T = 450: the last one ends at 400.',
+        message: 'No piece of the equation for rho covers T = 430: the last one ends at 400.',
       }),
     );
   });
