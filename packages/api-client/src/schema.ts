@@ -4634,7 +4634,7 @@ export interface operations {
             content: {
                 "multipart/form-data": {
                     /** Format: binary */
-                    file: string;
+                    file: Blob;
                     /** @description Index of the source that the document is of */
                     source: string;
                     /** @enum {string} */
@@ -4715,9 +4715,9 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content: {
-                    "application/pdf": string;
-                    "image/png": string;
-                    "image/jpeg": string;
+                    "application/pdf": Blob;
+                    "image/png": Blob;
+                    "image/jpeg": Blob;
                 };
             };
             /** @description Not signed in */
@@ -4934,9 +4934,9 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content: {
-                    "application/x-bibtex": string;
-                    "application/x-research-info-systems": string;
-                    "application/vnd.citationstyles.csl+json": string;
+                    "application/x-bibtex": Blob;
+                    "application/x-research-info-systems": Blob;
+                    "application/vnd.citationstyles.csl+json": Blob;
                 };
             };
             /** @description Not signed in */
