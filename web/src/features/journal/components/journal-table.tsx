@@ -28,7 +28,7 @@ export function JournalTable({ entries }: { entries: readonly JournalEntry[] }) 
               <time dateTime={entry.at}>{formatMinute(entry.at)}</time>
             </td>
             <td>
-              <strong>{entry.actor.name}</strong> {actWords(entry.act)}
+              <Sentence entry={entry} />
               <Subject entry={entry} />
             </td>
             <td className="journal-leaf" title={entry.leaf}>
@@ -48,5 +48,15 @@ function Subject({ entry }: { entry: JournalEntry }) {
     <span className="journal-subject">
       {subject.to ? <Link to={subject.to}>{subject.words}</Link> : subject.words}
     </span>
+  );
+}
+
+function Sentence({ entry }: { entry: JournalEntry }) {
+  // Whoever was refused has no name here: only an address was given.
+  if (entry.act === 'session.refused') return <>A sign-in was refused</>;
+  return (
+    <>
+      <strong>{entry.actor.name}</strong> {actWords(entry.act)}
+    </>
   );
 }

@@ -3,7 +3,6 @@ const WORDS: Readonly<Record<string, string>> = {
   'office.founded': 'set up the office',
   'person.added': 'added a person',
   'session.started': 'signed in',
-  'session.refused': 'was refused at sign-in',
   'session.ended': 'signed out',
   'correlation.drafted': 'drafted a correlation',
   'revision.drafted': 'drafted a next revision',

@@ -1,6 +1,8 @@
 import { Button } from 'antd';
 import { useState } from 'react';
 import type { DemoPeople } from '../../../shared/api/types';
+import { inWords } from '../../../shared/format/in-words';
+import { roleWords } from '../../../shared/format/role-words';
 
 interface DemoPeopleListProps {
   demo: DemoPeople;
@@ -40,7 +42,7 @@ export function DemoPeopleList({ demo, onSignIn, wordsFor }: DemoPeopleListProps
         {demo.items.map(({ name, email, roles }) => (
           <li key={email}>
             <span className="demo-person">
-              <span className="demo-person-name">{name}</span>, {roles.map(roleWords).join(' and ')}
+              <span className="demo-person-name">{name}</span>, {inWords(roles.map(roleWords))}
               <span className="demo-person-email">{email}</span>
             </span>
             <Button
@@ -57,8 +59,4 @@ export function DemoPeopleList({ demo, onSignIn, wordsFor }: DemoPeopleListProps
       </ul>
     </section>
   );
-}
-
-function roleWords(role: string): string {
-  return role === 'authority' ? 'technical authority' : role;
 }

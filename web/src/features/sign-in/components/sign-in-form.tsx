@@ -2,6 +2,7 @@ import { Button } from 'antd';
 import { useState, type SyntheticEvent } from 'react';
 import { ErrorSummary, type SummaryError } from '../../../shared/ui/error-summary';
 import { Field, describedBy } from '../../../shared/ui/fields/field';
+import { PasswordField } from '../../../shared/ui/fields/password-field';
 import { TextInput } from '../../../shared/ui/fields/text-input';
 
 const EMAIL = 'sign-in-email';
@@ -55,42 +56,18 @@ export function SignInForm({ onSignIn, wordsFor }: SignInFormProps) {
           {...describedBy(EMAIL, { error: missing[EMAIL] })}
         />
       </Field>
-      <PasswordField password={password} onChange={setPassword} error={missing[PASSWORD]} />
+      <PasswordField
+        id={PASSWORD}
+        label="Password"
+        autoComplete="current-password"
+        value={password}
+        onChange={setPassword}
+        error={missing[PASSWORD]}
+      />
       <Button type="primary" htmlType="submit" loading={sending}>
         Sign in
       </Button>
     </form>
-  );
-}
-
-interface PasswordFieldProps {
-  password: string;
-  onChange: (password: string) => void;
-  error: string | undefined;
-}
-
-function PasswordField({ password, onChange, error }: PasswordFieldProps) {
-  const [shown, setShown] = useState(false);
-  return (
-    <div className="sign-in-password">
-      <Field id={PASSWORD} label="Password" error={error}>
-        <TextInput
-          id={PASSWORD}
-          type={shown ? 'text' : 'password'}
-          name="password"
-          autoComplete="current-password"
-          autoCapitalize="none"
-          spellCheck={false}
-          value={password}
-          onChange={onChange}
-          {...describedBy(PASSWORD, { error })}
-        />
-      </Field>
-      <label className="sign-in-show">
-        <input type="checkbox" checked={shown} onChange={(event) => setShown(event.target.checked)} />
-        Show the password
-      </label>
-    </div>
   );
 }
 

@@ -21,7 +21,7 @@ interface BoundStripProps {
 /** A bound on a sheet: symbol, strip, and what it says in words. */
 export function BoundStrip({ symbol, label, stretches, unit = '1', reading = null, note }: BoundStripProps) {
   const [box, width] = useElementWidth<HTMLDivElement>(400);
-  const state = reading?.kind ?? 'none';
+  const words = reading ? stateWords(reading) : stretches.length === 0 ? rangeWords(stretches, unit) : null;
   return (
     <div className="bound-strip">
       <div className="bound-strip-symbol">{symbol}</div>
@@ -29,9 +29,7 @@ export function BoundStrip({ symbol, label, stretches, unit = '1', reading = nul
         <StripView size="large" {...{ stretches, label, unit, reading, width }} />
       </div>
       <div className="bound-strip-words">
-        <span className={`bound-state bound-state-${state}`}>
-          {reading ? stateWords(reading) : stretches.length === 0 ? rangeWords(stretches, unit) : null}
-        </span>
+        {words ? <span className={`bound-state bound-state-${reading?.kind ?? 'none'}`}>{words}</span> : null}
         {note ? <span className="bound-strip-note">{note}</span> : null}
       </div>
     </div>

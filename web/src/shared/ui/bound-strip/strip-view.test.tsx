@@ -76,7 +76,9 @@ describe('a strip with a value', () => {
   });
 
   test('sets its figure left of the line where the right has no room', () => {
-    const strip = draw({ reading: { kind: 'past-reach', value: 1.234e9, lo: 2000, hi: 35000, ratio: 28571 } });
+    const strip = draw({
+      reading: { kind: 'past-reach', value: 1.234e9, lo: 2000, hi: 35000, ratio: 28571 },
+    });
     expect(strip.one('.strip-plumb text')?.getAttribute('text-anchor')).toBe('end');
   });
 });
