@@ -1,3 +1,4 @@
+import { inWords } from '../../../shared/format/in-words';
 import { symbolText } from '../../../shared/format/symbol-parts';
 import type { CorrelationDefinition } from '@merestone/engine';
 import { useMemo } from 'react';
@@ -36,9 +37,4 @@ export function ModeSwitch({ definition, duty, change }: ModeSwitchProps) {
       {choice('groups', names.length > MANY ? 'I have the groups' : `I have ${inWords(names)}`)}
     </fieldset>
   );
-}
-
-function inWords(names: string[]): string {
-  const last = names.at(-1) ?? '';
-  return names.length < 2 ? last : `${names.slice(0, -1).join(', ')} and ${last}`;
 }
