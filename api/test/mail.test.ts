@@ -1,11 +1,15 @@
-import { createServer, type AddressInfo, type Server, type Socket } from 'node:net';
+import { createServer, type AddressInfo } from 'node:net';
 import { afterEach, describe, expect, it } from 'vitest';
 import { Writer } from '../src/database/write.js';
 import { backOffMinutes } from '../src/mail/back-off.js';
 import { MailDelivery } from '../src/mail/mail-delivery.js';
 import { MailService } from '../src/mail/mail.service.js';
+import type { Letter } from '../src/mail/letter.js';
 import type { OutboxResponse } from '../src/mail/dto/outbox-response.dto.js';
+import { ScheduleService } from '../src/schedule/schedule.service.js';
 import { createTestApp, type TestApp } from './support/create-test-app.js';
+import { openMailServer, type MailServer } from './support/mail-server.js';
+import { lettersIn } from './support/outbox.js';
 import { signedInWith } from './support/people.js';
 
 let closing: (() => Promise<unknown>)[] = [];
@@ -20,108 +24,210 @@ async function office(settings: Parameters<typeof createTestApp>[0] = {}): Promi
   return app;
 }
 
-function post({ app }: TestApp): void {
+async function mailServer(port?: number): Promise<MailServer> {
+  const server = await openMailServer(port);
+  closing.push(() => server.close());
+  return server;
+}
+
+function post({ app }: TestApp, overrides: Partial<Letter> = {}): void {
   app.get(Writer).writeUnjournalled('mail-delivery', (tx, at) => {
-    app
-      .get(MailService)
-      .post(tx, at, { to: 'anna@office.example', subject: 'Two\r\nlines', body: 'Good morning' });
+    app.get(MailService).post(tx, at, {
+      to: 'anna@office.example',
+      subject: 'Two\r\nlines',
+      body: 'Good morning',
+      ...overrides,
+    });
   });
 }
+
+const deliver = ({ app }: TestApp): Promise<void> => app.get(MailDelivery).deliverDue();
 
 async function outbox(app: TestApp): Promise<OutboxResponse['items']> {
   const { agent } = await signedInWith(app, 'administrator');
   return ((await agent.get('/api/mail/outbox').expect(200)).body as OutboxResponse).items;
 }
 
-/** A mail server that says just enough of SMTP (RFC 5321) to take a letter, or refuses every one. */
-async function mailServer(taking: boolean): Promise<{ url: string; letters: string[]; server: Server }> {
-  const letters: string[] = [];
-  const server = createServer((socket) => converse(socket, taking, letters));
-  await new Promise<void>((resolve) => server.listen(0, '127.0.0.1', resolve));
-  closing.push(() => new Promise((resolve) => server.close(resolve)));
-  return {
-    url: `smtp://127.0.0.1:${(server.address() as AddressInfo).port}/?ignoreTLS=true`,
-    letters,
-    server,
-  };
-}
-
-function converse(socket: Socket, taking: boolean, letters: string[]): void {
-  let inLetter = false;
-  let letter = '';
-  socket.write('220 test\r\n');
-  socket.on('data', (data) => {
-    if (inLetter) letter += data.toString();
-    if (inLetter && letter.endsWith('\r\n.\r\n')) {
-      letters.push(letter);
-      inLetter = false;
-      socket.write('250 taken\r\n');
-      return;
-    }
-    if (inLetter) return;
-    const command = data.toString().slice(0, 4).toUpperCase();
-    if (command === 'DATA') inLetter = true;
-    if (command === 'QUIT') socket.end('221 bye\r\n');
-    else if (command === 'MAIL' && !taking) socket.write('451 not now\r\n');
-    else socket.write(command === 'DATA' ? '354 go on\r\n' : '250 ok\r\n');
-  });
-}
+const LINK = `http://register.office.example/invitation/${'x'.repeat(43)}`;
 
 describe('without a mail server', () => {
-  it('letters are kept where an administrator reads them', async () => {
+  it('letters are kept where an administrator reads them, links too', async () => {
     const app = await office();
-    post(app);
-    await app.app.get(MailDelivery).deliverDue();
+    post(app, { link: LINK });
+    await deliver(app);
 
     expect(await outbox(app)).toMatchObject([
-      { to: 'anna@office.example', subject: 'Two lines', body: 'Good morning', state: 'local', tries: 0 },
+      {
+        to: 'anna@office.example',
+        subject: 'Two lines',
+        body: `Good morning\n\n${LINK}\n`,
+        state: 'local',
+        tries: 0,
+      },
     ]);
   });
 });
 
 describe('with a mail server', () => {
-  it('letters are sent once', async () => {
-    const { url, letters } = await mailServer(true);
-    const app = await office({ settings: { smtpUrl: url } });
-    post(app);
-    await app.app.get(MailDelivery).deliverDue();
-    await app.app.get(MailDelivery).deliverDue();
+  it('letters are sent soon after the act they tell of, once', async () => {
+    const server = await mailServer();
+    const app = await office({ settings: { smtpUrl: server.url, origin: 'http://register.office.example' } });
+    post(app, { body: 'Grüße aus Lübeck, µ = 1.8e-5' });
+    await expect.poll(() => server.letters.length).toBe(1);
+    await deliver(app);
+    await app.app.get(ScheduleService).tick();
 
-    expect(letters).toHaveLength(1);
-    expect(letters[0]).toMatch(/To: anna@office\.example[\s\S]*Subject: Two lines[\s\S]*Good morning/);
+    expect(server.letters).toHaveLength(1);
+    const [letter] = server.letters;
+    expect(letter).toMatchObject({ from: 'no-reply@register.office.example', to: ['anna@office.example'] });
+    expect(letter?.raw).toMatch(/^Subject: Two lines\r$/m);
+    expect(letter?.raw).toMatch(/^Auto-Submitted: auto-generated\r$/m);
+    expect(letter?.raw).toMatch(/^Content-Type: text\/plain; charset=utf-8/m);
+    expect(letter?.text.trim()).toBe('Grüße aus Lübeck, µ = 1.8e-5');
     expect(await outbox(app)).toMatchObject([{ state: 'sent', tries: 1, lastError: null }]);
   });
 
-  it('a refused letter is tried again later, after a restart too', async () => {
-    const refusing = await mailServer(false);
-    const first = await createTestApp({ settings: { smtpUrl: refusing.url } });
+  it('a link goes out whole, and is nowhere afterwards', async () => {
+    const server = await mailServer();
+    const app = await office({ settings: { smtpUrl: server.url } });
+    server.refusal = { code: 451 };
+    post(app, { link: LINK });
+    await deliver(app);
+    expect((await outbox(app))[0]).toMatchObject({ state: 'waiting', body: 'Good morning' });
+    server.refusal = undefined;
+    app.clock.forward(backOffMinutes(1) + 0.1);
+    await deliver(app);
+
+    expect(server.letters[0]?.text).toContain(`\n${LINK}`);
+    expect((await outbox(app))[0]).toMatchObject({ state: 'sent', body: 'Good morning' });
+    expect(JSON.stringify(lettersIn(app))).not.toContain('invitation');
+  });
+
+  it('nothing of an act that failed is sent', async () => {
+    const server = await mailServer();
+    const app = await office({ settings: { smtpUrl: server.url } });
+    expect(() =>
+      app.app.get(Writer).writeUnjournalled('mail-delivery', (tx, at) => {
+        app.app.get(MailService).post(tx, at, { to: 'anna@office.example', subject: 'No', body: 'No' });
+        throw new Error('in the middle of the act');
+      }),
+    ).toThrow('in the middle');
+    await new Promise((resolve) => setTimeout(resolve, 50));
+    await deliver(app);
+    expect([server.letters, lettersIn(app)]).toEqual([[], []]);
+  });
+
+  it('a letter not taken for now is tried again later, after a restart too', async () => {
+    const server = await mailServer();
+    server.refusal = { code: 451 };
+    const first = await createTestApp({ settings: { smtpUrl: server.url } });
     post(first);
-    await first.app.get(MailDelivery).deliverDue();
-    await first.app.get(MailDelivery).deliverDue();
+    await deliver(first);
+    await deliver(first);
     const [refused] = await outbox(first);
     expect(refused).toMatchObject({ state: 'waiting', tries: 1 });
-    expect(refused?.lastError).toContain('451');
+    expect(refused?.lastError).toContain('not taken');
     await first.stop();
 
-    const { url, letters } = await mailServer(true);
-    const second = await office({ settings: { smtpUrl: url, dataFolder: first.config.dataFolder } });
+    server.refusal = undefined;
+    const second = await office({ settings: { smtpUrl: server.url, dataFolder: first.config.dataFolder } });
+    await deliver(second);
+    expect(server.letters).toHaveLength(0);
     second.clock.forward(backOffMinutes(1) + 0.1);
-    await second.app.get(MailDelivery).deliverDue();
+    await second.app.get(ScheduleService).tick();
 
-    expect(letters).toHaveLength(1);
+    expect(server.letters).toHaveLength(1);
     expect(await outbox(second)).toMatchObject([{ state: 'sent', tries: 2 }]);
   });
 
-  it('a letter that nobody takes is given up in the end', async () => {
-    const { url } = await mailServer(false);
+  it('a server that is away holds everything up and loses nothing', async () => {
+    const gone = await openMailServer();
+    await gone.close();
+    const app = await office({ settings: { smtpUrl: gone.url } });
+    for (const to of ['anna@office.example', 'berta@office.example']) post(app, { to });
+    await deliver(app);
+    // The second one is not even tried while nobody answers.
+    expect((await outbox(app)).map(({ tries }) => tries).sort()).toEqual([0, 1]);
+
+    const back = await mailServer(gone.port);
+    app.clock.forward(backOffMinutes(1) + 0.1);
+    await deliver(app);
+    expect(back.letters.flatMap(({ to }) => to).sort()).toEqual([
+      'anna@office.example',
+      'berta@office.example',
+    ]);
+  });
+
+  it('a server that hangs up in the middle is one that is away', async () => {
+    const rude = createServer((socket) => socket.end());
+    await new Promise<void>((resolve) => rude.listen(0, '127.0.0.1', resolve));
+    closing.push(() => new Promise((resolve) => rude.close(resolve)));
+    const url = `smtp://127.0.0.1:${(rude.address() as AddressInfo).port}`;
     const app = await office({ settings: { smtpUrl: url } });
     post(app);
+    await deliver(app);
+    expect(await outbox(app)).toMatchObject([{ state: 'waiting', tries: 1 }]);
+  });
+
+  it('an address refused for good is given up at once and holds up nobody else', async () => {
+    const server = await mailServer();
+    server.refusal = { code: 550, to: 'gone@office.example' };
+    const app = await office({ settings: { smtpUrl: server.url } });
+    post(app, { to: 'gone@office.example', link: LINK });
+    post(app, { to: 'anna@office.example' });
+    await deliver(app);
+
+    const states = Object.fromEntries((await outbox(app)).map(({ to, state }) => [to, state]));
+    expect(states).toEqual({ 'gone@office.example': 'failed', 'anna@office.example': 'sent' });
+    expect(lettersIn(app, 'gone@office.example')[0]?.link).toBeNull();
+  });
+
+  it('a letter that nobody takes is given up in the end', async () => {
+    const server = await mailServer();
+    server.refusal = { code: 451 };
+    const app = await office({ settings: { smtpUrl: server.url } });
+    post(app);
     for (let tries = 0; tries < 25; tries += 1) {
-      await app.app.get(MailDelivery).deliverDue();
+      await deliver(app);
       app.clock.forward(6 * 60 + 1);
     }
 
     expect(await outbox(app)).toMatchObject([{ state: 'failed', tries: 20 }]);
+    await deliver(app);
+    expect(await outbox(app)).toMatchObject([{ tries: 20 }]);
+  });
+});
+
+describe('a letter', () => {
+  it.each([
+    'anna@office.example\r\nBcc: all@office.example',
+    'anna@office.example\nX: y',
+    'anna@office.example, all@office.example',
+    'Anna <anna@office.example>',
+    'anna@office.example\u2028',
+    'anna office.example',
+    '',
+  ])('is not written to %j', async (to) => {
+    const app = await office();
+    expect(() => post(app, { to })).toThrow(/Mail cannot be sent/);
+    expect(lettersIn(app)).toEqual([]);
+  });
+
+  it('has a subject of one line, and no header of somebody else', async () => {
+    const server = await mailServer();
+    const app = await office({ settings: { smtpUrl: server.url } });
+    post(app, {
+      subject: 'A\r\nBcc: all@office.example\u0000\u2028B',
+      body: 'Text\r\n.\r\nMAIL FROM:<x@y.example>',
+    });
+    await deliver(app);
+
+    expect(server.letters).toHaveLength(1);
+    const head = server.letters[0]?.raw.split('\r\n\r\n')[0] ?? '';
+    expect(head).toMatch(/^Subject: A Bcc: all@office\.example B\r$/m);
+    expect(head).not.toMatch(/^Bcc:/m);
+    expect(server.letters[0]?.to).toEqual(['anna@office.example']);
+    expect(server.letters[0]?.text).toContain('MAIL FROM:<x@y.example>');
   });
 });
 
