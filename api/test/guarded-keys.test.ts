@@ -15,12 +15,24 @@ const ROWS = `
   INSERT INTO revision VALUES (1, 1, NULL, 1, 'p', ''), (2, NULL, 1, 1, 'p', '');
   INSERT INTO revision_content (id, revision_id, iteration, format, canonical_text, hash, at, by_id)
     VALUES (1, 1, 1, 'f', '{"title":"a"}', 'h', '', 'p'), (2, 2, 1, 'f', '{"title":"b"}', 'h', '', 'p');
-  INSERT INTO standing_event VALUES (1, 1, 'draft', 'h', '', 'p', 'P', NULL, NULL), (2, 2, 'draft', 'h', '', 'p', 'P', NULL, NULL);
-  INSERT INTO submission VALUES (1, 1, 'h', '', 'p', 'P', 'e', '[]'), (2, 2, 'h', '', 'p', 'P', 'e', '[]');
+  INSERT INTO standing_event (id, revision_id, standing, hash, at, by_id, by_name)
+    VALUES (1, 1, 'draft', 'h', '', 'p', 'P'), (2, 2, 'draft', 'h', '', 'p', 'P');
+  INSERT INTO submission (id, revision_id, hash, at, by_id, by_name, engine, report)
+    VALUES (1, 1, 'h', '', 'p', 'P', 'e', '[]'), (2, 2, 'h', '', 'p', 'P', 'e', '[]');
   INSERT INTO review_assignment VALUES (1, 1, 'r', '', 'p'), (2, 2, 'r', '', 'p');
-  INSERT INTO review VALUES (1, 1, 'h', 'r', 'R', 'recommend', '{}', NULL, ''), (2, 2, 'h', 'r', 'R', 'recommend', '{}', NULL, '');
-  INSERT INTO comment VALUES (1, 1, 'h', '', 't', 'p', 'P', ''), (2, 2, 'h', '', 't', 'p', 'P', '');
-  INSERT INTO approval VALUES (1, 1, 'h', 'a', 'A', 'm', NULL, ''), (2, 2, 'h', 'a', 'A', 'm', NULL, '');
+  INSERT INTO review (id, revision_id, hash, reviewer_id, reviewer_name, verdict, checklist, at)
+    VALUES (1, 1, 'h', 'r', 'R', 'recommend', '{}', ''), (2, 2, 'h', 'r', 'R', 'recommend', '{}', '');
+  INSERT INTO comment (id, revision_id, hash, field, text, by_id, by_name, at)
+    VALUES (1, 1, 'h', '', 't', 'p', 'P', ''), (2, 2, 'h', '', 't', 'p', 'P', '');
+  INSERT INTO comment_answer VALUES (1, 1, 't', 'p', 'P', ''), (2, 1, 't', 'p', 'P', '');
+  INSERT INTO comment_resolution VALUES (1, 1, 'p', 'P', ''), (2, 2, 'p', 'P', '');
+  INSERT INTO approval (id, revision_id, hash, by_id, by_name, meaning, at)
+    VALUES (1, 1, 'h', 'a', 'A', 'm', ''), (2, 2, 'h', 'a', 'A', 'm', '');
+  INSERT INTO problem_report VALUES (1, 1, 'h', 'error', 't', 'p', 'P', ''), (2, 1, 'h', 'error', 't', 'p', 'P', '');
+  INSERT INTO problem_report_answer VALUES (1, 1, 'no-fault', 't', 'p', 'P', ''), (2, 2, 'no-fault', 't', 'p', 'P', '');
+  INSERT INTO former_person VALUES ('x', 'X'), ('y', 'Y');
+  INSERT INTO former_journal VALUES (1, '[]', '[]'), (2, '[]', '[]');
+  INSERT INTO former_journal_entry VALUES (1, 0, '{}'), (2, 0, '{}');
   INSERT INTO evaluation VALUES ('x', 1, 'draft', 'p', 'P', '', 'within', '{}', '{}', '{}'),
     ('y', 1, 'draft', 'p', 'P', '', 'within', '{}', '{}', '{}');`;
 
@@ -37,7 +49,14 @@ const FROZEN = [
   'review_assignment',
   'review',
   'comment',
+  'comment_answer',
+  'comment_resolution',
   'approval',
+  'problem_report',
+  'problem_report_answer',
+  'former_person',
+  'former_journal',
+  'former_journal_entry',
   'evaluation',
 ];
 

@@ -9,6 +9,7 @@ type Caller = Role | 'nobody';
 type Method = 'get' | 'post' | 'put';
 
 const EVERYBODY: readonly Role[] = ['engineer', 'reviewer', 'authority', 'auditor', 'administrator'];
+const DRAFTERS: readonly Role[] = ['engineer', 'reviewer'];
 const EVALUATORS: readonly Role[] = ['engineer', 'reviewer', 'authority'];
 const REVISION = '/api/correlations/public/revisions/1';
 const FAR_REVISION = '/api/correlations/no-such/revisions/1';
@@ -35,11 +36,27 @@ const ROUTES: readonly [Method, string, object | undefined, readonly Role[], num
   ['get', '/api/evaluations/no-such', undefined, EVERYBODY, 404],
   ['post', '/api/correlations/no-such/evaluations', { inputs: TUBE_INPUTS }, EVALUATORS, 404],
   ['post', '/api/candidates', { geometry: 'tube', inputs: {} }, EVALUATORS, 200],
-  ['post', '/api/correlations', { slug: 'public', definition }, ['engineer'], 409],
-  ['post', '/api/correlations/no-such/revisions', { definition }, ['engineer'], 404],
-  ['put', FAR_REVISION, { definition }, ['engineer'], 428],
-  ['post', `${FAR_REVISION}/submission`, {}, ['engineer'], 404],
+  ['post', '/api/correlations', { slug: 'public', definition }, DRAFTERS, 409],
+  ['post', '/api/correlations/no-such/revisions', { definition }, DRAFTERS, 404],
+  ['put', FAR_REVISION, { definition }, DRAFTERS, 428],
+  ['post', `${FAR_REVISION}/submission`, {}, DRAFTERS, 404],
+  ['post', `${FAR_REVISION}/iterations`, {}, DRAFTERS, 404],
+  ['get', `${REVISION}/review`, undefined, EVERYBODY, 200],
+  ['get', '/api/correlations/public/differences?from=1&to=1', undefined, EVERYBODY, 200],
+  ['post', `${FAR_REVISION}/assignments`, {}, ['reviewer'], 404],
   ['post', `${FAR_REVISION}/comments`, { field: '', text: 'x' }, EVALUATORS, 404],
+  ['post', `${FAR_REVISION}/comments/1/answers`, { text: 'x' }, EVALUATORS, 404],
+  ['post', `${FAR_REVISION}/comments/1/resolution`, {}, EVALUATORS, 404],
+  ['post', `${FAR_REVISION}/decline`, { reason }, ['authority'], 404],
+  ['get', '/api/correlations/public/problem-reports', undefined, EVERYBODY, 200],
+  [
+    'post',
+    '/api/correlations/no-such/problem-reports',
+    { revision: 1, severity: 'error', text: reason },
+    EVERYBODY,
+    404,
+  ],
+  ['post', '/api/problem-reports/999/answer', { outcome: 'no-fault', text: reason }, ['authority'], 404],
   ['post', `${FAR_REVISION}/reviews`, { verdict: 'recommend', checklist: CHECKLIST }, ['reviewer'], 404],
   [
     'post',

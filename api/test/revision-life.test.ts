@@ -161,7 +161,7 @@ describe('editing', () => {
     expect(problemOf(moved).fields?.map(({ field }) => field)).toEqual(['definition.geometry']);
   });
 
-  test('in review makes a draft of it again and voids the verdicts', async () => {
+  test('in review is the next iteration, voids the verdicts and gives the turn to the originator', async () => {
     const key = draft(office, 'edited-in-review');
     const { hash } = recommended(office, key);
     const response = await put(
@@ -171,15 +171,42 @@ describe('editing', () => {
       hash,
     );
     const sheet = response.body as Sheet;
-    expect(sheet).toMatchObject({ standing: 'draft', iteration: 2 });
+    expect(sheet).toMatchObject({ standing: 'in review', iteration: 2 });
     expect(sheet.reviews.map(({ current }) => current)).toEqual([false, false]);
-    await post(office.engineer, 'edited-in-review/revisions/1/submission', {}).expect(201);
+    const early = await post(office.reviewer, 'edited-in-review/revisions/1/reviews', {
+      verdict: 'recommend',
+      checklist: CHECKED,
+    });
+    expect([early.status, codeOf(early)]).toEqual([409, 'conflict']);
+    await post(office.engineer, 'edited-in-review/revisions/1/iterations', {}).expect(201);
     const approval = await post(
       office.authority,
       'edited-in-review/revisions/1/approval',
       signature(sheet.hash),
     );
     expect([approval.status, codeOf(approval)]).toEqual([409, 'conflict']);
+  });
+
+  test('back to what was recommended does not bring the verdicts back', async () => {
+    const key = draft(office, 'edited-to-and-fro');
+    const { hash } = recommended(office, key);
+    const there = await put(
+      office.engineer,
+      'edited-to-and-fro/revisions/1',
+      tubeSheet({ year: 2002 }),
+      hash,
+    );
+    const back = await put(
+      office.engineer,
+      'edited-to-and-fro/revisions/1',
+      tubeSheet(),
+      (there.body as Sheet).hash,
+    );
+    expect(back.body).toMatchObject({ hash, iteration: 3 });
+    await post(office.engineer, 'edited-to-and-fro/revisions/1/iterations', {}).expect(201);
+    const approval = await post(office.authority, 'edited-to-and-fro/revisions/1/approval', signature(hash));
+    expect([approval.status, codeOf(approval)]).toEqual([409, 'conflict']);
+    expect(problemOf(approval).detail).toContain('there are 0');
   });
 });
 
@@ -198,9 +225,10 @@ describe('submission', () => {
     });
     const before = rowCounts(office);
     const response = await post(office.engineer, 'slip/revisions/1/submission', {});
-    expect([response.status, codeOf(response)]).toEqual([422, 'checks-failed']);
+    expect([response.status, codeOf(response)]).toEqual([422, 'machine-check']);
     expect(problemOf(response).fields).toMatchObject([{ field: 'definition.checks[0]' }]);
     expect(problemOf(response).detail).toContain('Wrong on purpose');
+    expect(problemOf(response).inspection).toMatchObject({ passed: false });
     expect(rowCounts(office)).toEqual(before);
   });
 
@@ -210,7 +238,7 @@ describe('submission', () => {
     );
     draft(office, 'dangling', { quantities });
     const response = await post(office.engineer, 'dangling/revisions/1/submission', {}).expect(422);
-    expect(problemOf(response).fields).toMatchObject([{ field: 'definition.quantities[3].equations[0]' }]);
+    expect(problemOf(response).fields).toMatchObject([{ field: 'definition.quantities[3].equations' }]);
   });
 
   test('asks people who can review, and tells why it was put forward', async () => {
@@ -258,7 +286,7 @@ describe('review', () => {
     expect([response.status, codeOf(response)]).toEqual([409, 'stale']);
   });
 
-  test('that asks for changes gives the draft back', async () => {
+  test('that asks for changes gives it back to the originator', async () => {
     submitted(office, draft(office, 'changes'), office.engineer.actor);
     const note = 'The upper limit is 9 000 in the source.';
     const { body } = await post(office.reviewer, 'changes/revisions/1/reviews', {
@@ -266,7 +294,8 @@ describe('review', () => {
       checklist: CHECKED,
       note,
     }).expect(201);
-    expect(body).toMatchObject({ standing: 'draft', standingNote: note });
+    expect(body).toMatchObject({ standing: 'in review', abilities: { review: false } });
+    expect((body as Sheet).reviews).toMatchObject([{ verdict: 'ask-for-changes', note, current: true }]);
   });
 
   test('by comments goes field by field', async () => {

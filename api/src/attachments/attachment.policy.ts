@@ -1,7 +1,8 @@
 import type { Actor } from '../common/actor.js';
 import { ALLOWED, denied, type Decision } from '../common/authorized.js';
 import { hasPermission } from '../common/permissions.js';
-import { mayEdit, type RevisionFacts } from '../revisions/revision.policy.js';
+import type { RevisionFacts } from '../revisions/revision-facts.js';
+import { mayEdit } from '../revisions/revision.policy.js';
 
 /**
  * Documents are added to a revision by its originator while it can be edited, and by reviewers and authorities at any

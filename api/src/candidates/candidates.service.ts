@@ -61,7 +61,7 @@ export class CandidatesService {
     const shown = new Map<string, RevisionRecord>();
     for (const record of this.revisions.ofGeometry(geometry)) {
       if (!maySee(actor, record)) continue;
-      if (shown.get(record.slug)?.standing !== 'approved') shown.set(record.slug, record);
+      if (shown.get(record.slug)?.inForce !== true) shown.set(record.slug, record);
     }
     return [...shown.values()];
   }

@@ -30,7 +30,7 @@ export const PROBLEM_CODES = {
   'past-reach': { status: 422, title: 'A value is too far outside a bound' },
   'between-pieces': { status: 422, title: 'A value falls between the stated ranges' },
   domain: { status: 422, title: 'The formula has no value here' },
-  'checks-failed': { status: 422, title: 'The sheet does not pass its own checks' },
+  'machine-check': { status: 422, title: 'The machine check found errors' },
   'if-match-needed': { status: 428, title: 'The version being edited must be named' },
   'too-many-requests': { status: 429, title: 'Too many attempts' },
   internal: { status: 500, title: 'Something went wrong here' },

@@ -1,4 +1,4 @@
-import type { Finding } from '@merestone/engine';
+import type { Finding, InspectionReport } from '@merestone/engine';
 import { PROBLEM_CODES, type ProblemCode } from './problem-codes.js';
 
 /** What is wrong with one field: its path in the request, a code, and a sentence a person can act on. */
@@ -19,6 +19,8 @@ export interface ProblemExtras {
   readonly fields?: readonly FieldProblem[] | undefined;
   readonly findings?: readonly Finding[] | undefined;
   readonly alternatives?: readonly Alternative[] | undefined;
+  /** What the machine found on a submitted sheet. */
+  readonly inspection?: InspectionReport | undefined;
   /** Sent as Retry-After. */
   readonly retryAfterSeconds?: number | undefined;
   /** For the log alone: never leaves the server. */
@@ -35,6 +37,7 @@ export interface ProblemBody {
   readonly fields?: readonly FieldProblem[];
   readonly findings?: readonly Finding[];
   readonly alternatives?: readonly Alternative[];
+  readonly inspection?: InspectionReport;
 }
 
 /**
@@ -62,7 +65,7 @@ export class ApiProblem extends Error {
   }
 
   toBody(instance?: string): ProblemBody {
-    const { fields, findings, alternatives } = this.extras;
+    const { fields, findings, alternatives, inspection } = this.extras;
     return {
       type: `urn:merestone:problem:${this.code}`,
       title: PROBLEM_CODES[this.code].title,
@@ -72,6 +75,7 @@ export class ApiProblem extends Error {
       ...(fields === undefined ? {} : { fields }),
       ...(findings === undefined ? {} : { findings }),
       ...(alternatives === undefined ? {} : { alternatives }),
+      ...(inspection === undefined ? {} : { inspection }),
     };
   }
 }

@@ -57,8 +57,8 @@ export class DraftingService {
   }
 
   /**
-   * Puts other content into a draft. Of a revision in review it makes a draft again: the verdicts speak of the content
-   * they were given on. `ifMatch` is the hash of the content that the caller has edited.
+   * Puts other content into a draft, or into a revision in review, where it is the next iteration: verdicts speak of
+   * the iteration they were given on. `ifMatch` is the hash of the content that the caller has edited.
    */
   edit(
     actor: Actor,
@@ -72,7 +72,8 @@ export class DraftingService {
         'Send the hash of the content you edited in the If-Match header.',
       );
     }
-    const act = actOfEdit(actor, this.revisions.one(actor, key));
+    const seen = this.revisions.one(actor, key);
+    const act = contentOf(definition).hash === seen.hash ? undefined : actOfEdit(actor, seen);
     const work = (tx: Tx, at: string) => this.put(tx, at, actor, key, definition, ifMatch);
     if (act === undefined) return this.writer.writeUnjournalled('draft-autosave', work);
     return this.writer.write(actor, act, (tx, at) => written(work(tx, at)));
@@ -100,15 +101,7 @@ export class DraftingService {
     this.revisions.takeOver(tx, subject, actor);
     const edited = this.revisions.addContent(tx, subject, content, actor, at);
     this.index(tx, edited, definition);
-    if (record.standing === 'draft') return edited;
-    const note = 'Edited by its originator.';
-    return this.revisions.setStanding(
-      tx,
-      authorize(edited, mayEdit(actor, edited)),
-      { standing: 'draft', note },
-      actor,
-      at,
-    );
+    return edited;
   }
 
   private index(tx: Tx, record: RevisionRecord, definition: CorrelationDefinition): void {
@@ -128,7 +121,7 @@ export class DraftingService {
 
 /** An edit of a draft is not journalled; what else it may amount to is. */
 function actOfEdit(actor: Actor, record: RevisionRecord): Act | undefined {
-  if (record.standing === 'in review') return 'revision.taken-back';
+  if (record.standing === 'in review') return 'revision.edited';
   const ofLibrary = record.originatorId === SYSTEM_ACTOR.id && actor.id !== SYSTEM_ACTOR.id;
   return ofLibrary ? 'revision.taken-over' : undefined;
 }

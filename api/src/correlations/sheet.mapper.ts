@@ -1,14 +1,15 @@
 import type { CheckReport, CompiledCorrelation } from '@merestone/engine';
 import type { Actor } from '../common/actor.js';
 import { CAUTION } from '../revisions/caution.js';
+import { countRemarks, keptInspection } from '../revisions/kept-inspection.js';
+import { handsOf, isCurrent, mayComment, mayReview } from '../revisions/reviewing.policy.js';
 import type { RevisionRecord } from '../revisions/revision-record.js';
 import {
   mayApprove,
-  mayComment,
+  mayDecline,
   mayEdit,
   mayEvaluate,
   mayReinstate,
-  mayReview,
   maySubmit,
   maySuspend,
   mayWithdraw,
@@ -30,6 +31,7 @@ export interface SheetParts {
   readonly checks: readonly CheckReport[];
   readonly equations: Sheet['equations'];
   readonly originatorName: string;
+  readonly successor: Sheet['successor'];
   readonly geometryName: string;
 }
 
@@ -59,8 +61,39 @@ export function sheet(parts: SheetParts): Sheet {
     usage: { evaluations: file.evaluations, calculations: 0 },
     equations: parts.equations,
     abilities: abilities(parts),
+    effectiveFrom: record.effectiveFrom,
+    reviewDue: record.reviewDue,
+    inForce: record.inForce,
+    successor: parts.successor,
+    ...outOfUse(record, file),
+    openReports: file.openReports,
+    inspection: inspectionSummary(file),
     caution: CAUTION,
   };
+}
+
+/** Why it may not be used, from the standing event that says so. */
+function outOfUse(
+  { standing }: RevisionRecord,
+  { history }: RevisionFile,
+): Pick<Sheet, 'withdrawal' | 'suspension'> {
+  const last = history.at(-1);
+  if (last === undefined || last.standing !== standing) return { withdrawal: null, suspension: null };
+  const said = { reason: last.note ?? '', by: { id: last.byId, name: last.byName }, at: last.at };
+  return {
+    withdrawal:
+      standing === 'withdrawn' && last.withdrawalClass !== null
+        ? { ...said, class: last.withdrawalClass }
+        : null,
+    suspension: standing === 'suspended' ? { ...said, problemReport: last.problemReportId } : null,
+  };
+}
+
+function inspectionSummary({ submission }: RevisionFile): Sheet['inspection'] {
+  if (submission === undefined) return null;
+  const report = keptInspection(submission.report);
+  const { warnings, errors } = countRemarks(report);
+  return { passed: report.passed, warnings, errors };
 }
 
 function onRecord(
@@ -75,15 +108,16 @@ function onRecord(
       note,
       class: withdrawalClass,
     })),
-    reviews: reviews.map(({ reviewerId, reviewerName, verdict, at, note, hash }) => ({
-      reviewer: { id: reviewerId, name: reviewerName },
-      verdict,
-      at,
-      note,
-      hash,
-      current: hash === record.hash,
+    reviews: reviews.map((row) => ({
+      reviewer: { id: row.reviewerId, name: row.reviewerName },
+      verdict: row.verdict,
+      at: row.at,
+      note: row.note,
+      hash: row.hash,
+      current: isCurrent(row, record.iteration, reviews),
     })),
-    comments: comments.map(({ field, text, byId, byName, at, hash }) => ({
+    comments: comments.map(({ id, field, text, byId, byName, at, hash }) => ({
+      id,
       field,
       text,
       by: { id: byId, name: byName },
@@ -101,14 +135,15 @@ function onRecord(
   };
 }
 
-function abilities({ actor, record, file: { reviews }, ground }: SheetParts): SheetAbilities {
+function abilities({ actor, record, file: { reviews, submission }, ground }: SheetParts): SheetAbilities {
   return {
     evaluate: mayEvaluate(actor, record).allowed,
     edit: mayEdit(actor, record).allowed,
     submit: maySubmit(actor, record).allowed,
     comment: mayComment(actor).allowed,
-    review: mayReview(actor, record).allowed,
+    review: mayReview(actor, record, handsOf(record, submission, reviews)).allowed,
     approve: mayApprove(actor, record, reviews, ground).allowed,
+    decline: mayDecline(actor, record, ground).allowed,
     suspend: maySuspend(actor, record).allowed,
     reinstate: mayReinstate(actor, record).allowed,
     withdraw: mayWithdraw(actor, record).allowed,

@@ -1,14 +1,16 @@
 import { Injectable } from '@nestjs/common';
-import { asc, count, eq } from 'drizzle-orm';
+import { and, asc, count, desc, eq, isNull } from 'drizzle-orm';
 import { Connection, type Reader } from '../database/connection.js';
 import { evaluation } from '../database/schema/evaluation.js';
-import { approval, comment, review } from '../database/schema/review.js';
+import { problemReport, problemReportAnswer } from '../database/schema/problem-report.js';
+import { approval, comment, review, submission } from '../database/schema/review.js';
 import { standingEvent } from '../database/schema/revision.js';
 
 export type HistoryRow = typeof standingEvent.$inferSelect;
 export type ReviewRow = typeof review.$inferSelect;
 export type CommentRow = typeof comment.$inferSelect;
 export type ApprovalRow = typeof approval.$inferSelect;
+export type SubmissionRow = typeof submission.$inferSelect;
 
 /** What stands on record about one revision. */
 export interface RevisionFile {
@@ -16,6 +18,9 @@ export interface RevisionFile {
   readonly reviews: readonly ReviewRow[];
   readonly comments: readonly CommentRow[];
   readonly approval: ApprovalRow | undefined;
+  /** The last time it was put forward. */
+  readonly submission: SubmissionRow | undefined;
+  readonly openReports: number;
   readonly evaluations: number;
 }
 
@@ -44,8 +49,25 @@ export class SheetReadModel {
         .orderBy(asc(comment.id))
         .all(),
       approval: reader.select().from(approval).where(eq(approval.revisionId, revisionId)).get(),
+      submission: reader
+        .select()
+        .from(submission)
+        .where(eq(submission.revisionId, revisionId))
+        .orderBy(desc(submission.id))
+        .get(),
+      openReports: this.openReports(revisionId, reader),
       evaluations: this.evaluations(revisionId, reader),
     };
+  }
+
+  private openReports(revisionId: number, reader: Reader): number {
+    const row = reader
+      .select({ open: count() })
+      .from(problemReport)
+      .leftJoin(problemReportAnswer, eq(problemReportAnswer.reportId, problemReport.id))
+      .where(and(eq(problemReport.revisionId, revisionId), isNull(problemReportAnswer.id)))
+      .get();
+    return row?.open ?? 0;
   }
 
   private evaluations(revisionId: number, reader: Reader): number {

@@ -1,10 +1,9 @@
 import { Injectable } from '@nestjs/common';
 import { runChecks, type CompiledCorrelation, type Quantity } from '@merestone/engine';
 import { AppointmentsService } from '../appointments/appointments.service.js';
-import { SYSTEM_ACTOR, type Actor } from '../common/actor.js';
+import type { Actor } from '../common/actor.js';
 import { Clock } from '../common/clock.js';
 import { GeometriesService } from '../geometries/geometries.service.js';
-import { PeopleService } from '../people/people.service.js';
 import {
   PropertyLibraryService,
   type ShelvedLibrary,
@@ -25,7 +24,6 @@ export class SheetService {
     private readonly libraries: PropertyLibraryService,
     private readonly files: SheetReadModel,
     private readonly geometries: GeometriesService,
-    private readonly people: PeopleService,
     private readonly appointments: AppointmentsService,
     private readonly clock: Clock,
   ) {}
@@ -44,18 +42,34 @@ export class SheetService {
     const shelf = this.libraries.forStanding(record.standing);
     const { geometry } = compiled.definition;
     const at = this.clock.now().toISOString();
+    const revisions = this.revisions.visible(actor, 'correlation', record.slug);
+    const file = this.files.file(record.id);
     return sheet({
       actor,
       ground: this.appointments.approvalGround(actor.id, record.geometry, at),
       record,
       compiled,
-      revisions: this.revisions.visible(actor, 'correlation', record.slug),
-      file: this.files.file(record.id),
+      revisions,
+      file,
+      successor: this.successor(actor, record, revisions, file.history.at(-1)?.successor ?? null),
       checks: runChecks(compiled, this.libraries.approvedOrLatest().library),
       equations: equationsOf(compiled, shelf),
-      originatorName: this.people.byId(record.originatorId)?.name ?? SYSTEM_ACTOR.name,
+      originatorName: this.revisions.nameOf(record.originatorId),
       geometryName: this.geometries.find(geometry)?.name ?? geometry,
     });
+  }
+
+  /** The correlation named at the withdrawal, or else the later revision in force. */
+  private successor(
+    actor: Actor,
+    { standing, number }: RevisionRecord,
+    revisions: readonly RevisionRecord[],
+    named: string | null,
+  ): Sheet['successor'] {
+    if (standing !== 'superseded' && standing !== 'withdrawn') return null;
+    const candidates = named === null ? revisions : this.revisions.visible(actor, 'correlation', named);
+    const found = candidates.find((one) => one.inForce && (named !== null || one.number > number));
+    return found === undefined ? null : { slug: found.slug, revision: found.number, title: found.title };
   }
 }
 

@@ -228,6 +228,120 @@ BEGIN
   SELECT RAISE(ABORT, 'approvals cannot be replaced');
 END;
 
+CREATE TRIGGER comment_answer_keeps_rows BEFORE UPDATE ON comment_answer
+BEGIN
+  SELECT RAISE(ABORT, 'answers to comments cannot be changed');
+END;
+
+CREATE TRIGGER comment_answer_keeps_all BEFORE DELETE ON comment_answer
+BEGIN
+  SELECT RAISE(ABORT, 'answers to comments cannot be removed');
+END;
+
+CREATE TRIGGER comment_answer_keeps_places BEFORE INSERT ON comment_answer
+WHEN EXISTS (SELECT 1 FROM comment_answer WHERE id = NEW.id)
+BEGIN
+  SELECT RAISE(ABORT, 'answers to comments cannot be replaced');
+END;
+
+CREATE TRIGGER comment_resolution_keeps_rows BEFORE UPDATE ON comment_resolution
+BEGIN
+  SELECT RAISE(ABORT, 'resolutions of comments cannot be changed');
+END;
+
+CREATE TRIGGER comment_resolution_keeps_all BEFORE DELETE ON comment_resolution
+BEGIN
+  SELECT RAISE(ABORT, 'resolutions of comments cannot be removed');
+END;
+
+CREATE TRIGGER comment_resolution_keeps_places BEFORE INSERT ON comment_resolution
+WHEN EXISTS (SELECT 1 FROM comment_resolution WHERE id = NEW.id OR comment_id = NEW.comment_id)
+BEGIN
+  SELECT RAISE(ABORT, 'resolutions of comments cannot be replaced');
+END;
+
+CREATE TRIGGER problem_report_keeps_rows BEFORE UPDATE ON problem_report
+BEGIN
+  SELECT RAISE(ABORT, 'problem reports cannot be changed');
+END;
+
+CREATE TRIGGER problem_report_keeps_all BEFORE DELETE ON problem_report
+BEGIN
+  SELECT RAISE(ABORT, 'problem reports cannot be removed');
+END;
+
+CREATE TRIGGER problem_report_keeps_places BEFORE INSERT ON problem_report
+WHEN EXISTS (SELECT 1 FROM problem_report WHERE id = NEW.id)
+BEGIN
+  SELECT RAISE(ABORT, 'problem reports cannot be replaced');
+END;
+
+CREATE TRIGGER problem_report_answer_keeps_rows BEFORE UPDATE ON problem_report_answer
+BEGIN
+  SELECT RAISE(ABORT, 'answers to problem reports cannot be changed');
+END;
+
+CREATE TRIGGER problem_report_answer_keeps_all BEFORE DELETE ON problem_report_answer
+BEGIN
+  SELECT RAISE(ABORT, 'answers to problem reports cannot be removed');
+END;
+
+CREATE TRIGGER problem_report_answer_keeps_places BEFORE INSERT ON problem_report_answer
+WHEN EXISTS (SELECT 1 FROM problem_report_answer WHERE id = NEW.id OR report_id = NEW.report_id)
+BEGIN
+  SELECT RAISE(ABORT, 'answers to problem reports cannot be replaced');
+END;
+
+-- What another office handed over with its register stays as it came.
+
+CREATE TRIGGER former_person_keeps_rows BEFORE UPDATE ON former_person
+BEGIN
+  SELECT RAISE(ABORT, 'people of a former office cannot be changed');
+END;
+
+CREATE TRIGGER former_person_keeps_all BEFORE DELETE ON former_person
+BEGIN
+  SELECT RAISE(ABORT, 'people of a former office cannot be removed');
+END;
+
+CREATE TRIGGER former_person_keeps_places BEFORE INSERT ON former_person
+WHEN EXISTS (SELECT 1 FROM former_person WHERE id = NEW.id OR rowid = NEW.rowid)
+BEGIN
+  SELECT RAISE(ABORT, 'people of a former office cannot be replaced');
+END;
+
+CREATE TRIGGER former_journal_keeps_rows BEFORE UPDATE ON former_journal
+BEGIN
+  SELECT RAISE(ABORT, 'journals of a former office cannot be changed');
+END;
+
+CREATE TRIGGER former_journal_keeps_all BEFORE DELETE ON former_journal
+BEGIN
+  SELECT RAISE(ABORT, 'journals of a former office cannot be removed');
+END;
+
+CREATE TRIGGER former_journal_keeps_places BEFORE INSERT ON former_journal
+WHEN EXISTS (SELECT 1 FROM former_journal WHERE place = NEW.place)
+BEGIN
+  SELECT RAISE(ABORT, 'journals of a former office cannot be replaced');
+END;
+
+CREATE TRIGGER former_journal_entry_keeps_rows BEFORE UPDATE ON former_journal_entry
+BEGIN
+  SELECT RAISE(ABORT, 'journals of a former office cannot be changed');
+END;
+
+CREATE TRIGGER former_journal_entry_keeps_all BEFORE DELETE ON former_journal_entry
+BEGIN
+  SELECT RAISE(ABORT, 'journals of a former office cannot be removed');
+END;
+
+CREATE TRIGGER former_journal_entry_keeps_places BEFORE INSERT ON former_journal_entry
+WHEN EXISTS (SELECT 1 FROM former_journal_entry WHERE (place = NEW.place AND "index" = NEW."index") OR rowid = NEW.rowid)
+BEGIN
+  SELECT RAISE(ABORT, 'journals of a former office cannot be replaced');
+END;
+
 CREATE TRIGGER evaluation_keeps_rows BEFORE UPDATE ON evaluation
 BEGIN
   SELECT RAISE(ABORT, 'kept evaluations cannot be changed');

@@ -30,7 +30,7 @@ export class AlternativesService {
     const duty = dutyOf(refused, request);
     return this.revisions
       .ofGeometry(refused.definition.geometry)
-      .filter((record) => record.standing === 'approved' && record.slug !== slug)
+      .filter((record) => record.inForce && record.slug !== slug)
       .flatMap((record) => {
         const compiled = this.definitions.correlation(record);
         const evaluation = evaluate(compiled, requestFor(compiled, duty), library);

@@ -1,8 +1,10 @@
 import { Injectable } from '@nestjs/common';
 import { and, asc, countDistinct, eq, isNotNull, sql } from 'drizzle-orm';
+import { Clock } from '../common/clock.js';
 import { Connection, type Reader } from '../database/connection.js';
 import { geometry } from '../database/schema/geometry.js';
 import { revisionNow } from '../database/schema/revision.js';
+import { inForceAt } from '../database/standing-at.js';
 import { visibleTo, type VisibleTo } from '../database/visible-to.js';
 
 export interface Geometry {
@@ -21,7 +23,10 @@ export interface CountedGeometry extends Geometry {
 
 @Injectable()
 export class GeometriesReadModel {
-  constructor(private readonly connection: Connection) {}
+  constructor(
+    private readonly connection: Connection,
+    private readonly clock: Clock,
+  ) {}
 
   all(reader: Reader = this.connection.reader): Geometry[] {
     return reader.select().from(geometry).orderBy(asc(geometry.name)).all();
@@ -29,11 +34,12 @@ export class GeometriesReadModel {
 
   /** Every geometry with the number of its correlations that somebody sees. */
   counted(sight: VisibleTo): CountedGeometry[] {
+    const now = this.clock.now().toISOString();
     const counts = this.connection.reader
       .select({
         geometry: revisionNow.geometry,
         total: countDistinct(revisionNow.slug),
-        approved: sql<number>`count(DISTINCT CASE WHEN ${revisionNow.standing} = 'approved' THEN ${revisionNow.slug} END)`,
+        approved: sql<number>`count(DISTINCT CASE WHEN ${inForceAt(now)} THEN ${revisionNow.slug} END)`,
       })
       .from(revisionNow)
       .where(and(isNotNull(revisionNow.geometry), visibleTo(sight)))

@@ -1,4 +1,5 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
+import { InspectionReportDto } from '../revisions/dto/inspection.dto.js';
 
 export class FieldProblemResponse {
   @ApiProperty({ type: String, description: 'Path in the request, such as inputs.u.value' })
@@ -47,4 +48,7 @@ export class ProblemResponse {
 
   @ApiPropertyOptional({ type: [AlternativeResponse] })
   readonly alternatives?: AlternativeResponse[];
+
+  @ApiPropertyOptional({ type: InspectionReportDto, description: 'Of a submission that the machine stopped' })
+  readonly inspection?: InspectionReportDto;
 }

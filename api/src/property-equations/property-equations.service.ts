@@ -28,7 +28,7 @@ export class PropertyEquationsService {
     const shown = new Map<string, RevisionRecord>();
     for (const record of this.revisions.ofPropertyEquations()) {
       if (!maySee(actor, record)) continue;
-      if (shown.get(record.slug)?.standing !== 'approved') shown.set(record.slug, record);
+      if (shown.get(record.slug)?.inForce !== true) shown.set(record.slug, record);
     }
     return { items: [...shown.values()].map((record) => this.entry(record)) };
   }

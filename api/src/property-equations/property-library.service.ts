@@ -24,13 +24,13 @@ export class PropertyLibraryService {
   ) {}
 
   approved(): ShelvedLibrary {
-    return this.shelve((all) => all.find(({ standing }) => standing === 'approved'));
+    return this.shelve((all) => all.find(({ inForce }) => inForce));
   }
 
   approvedOrLatest(): ShelvedLibrary {
     return this.shelve(
       (all) =>
-        all.find(({ standing }) => standing === 'approved') ??
+        all.find(({ inForce }) => inForce) ??
         all.filter(({ standing }) => standing === 'draft' || standing === 'in review').at(-1),
     );
   }

@@ -1,11 +1,11 @@
 import { Injectable } from '@nestjs/common';
-import { runChecks, runPropertyChecks, type CheckReport, type Quantity } from '@merestone/engine';
+import { inspectCorrelation, runPropertyChecks, type InspectionReport, type Remark } from '@merestone/engine';
 import { ApiProblem, type FieldProblem } from '../common/problem.js';
 import { PropertyLibraryService } from '../property-equations/property-library.service.js';
 import { DefinitionsService } from '../revisions/definitions.service.js';
 import type { RevisionRecord } from '../revisions/revision-record.js';
 
-/** The check that comes before any reviewer's: the sheet compiles and reproduces its own worked checks. */
+/** The check that comes before any reviewer's. Its errors stop a submission; its warnings travel along. */
 @Injectable()
 export class MachineCheckService {
   constructor(
@@ -13,52 +13,37 @@ export class MachineCheckService {
     private readonly libraries: PropertyLibraryService,
   ) {}
 
-  /** The report on each worked check. Throws `checks-failed`, naming each that does not reproduce. */
-  pass(record: RevisionRecord): CheckReport[] {
-    const { reports, fields } =
-      record.kind === 'correlation' ? this.ofCorrelation(record) : this.ofEquation(record);
-    fields.push(...reports.flatMap((report, i) => (report.passed ? [] : [failure(report, i)])));
-    if (fields.length === 0) return reports;
+  /** The report, to be kept with the iteration. Throws `machine-check` with every error at its field. */
+  pass(record: RevisionRecord): InspectionReport {
+    const report = this.inspect(record);
+    if (report.passed) return report;
+    const fields = report.remarks.filter(({ verdict }) => verdict === 'error').map(fieldProblem);
     const detail = fields.map(({ message }) => message).join(' ');
-    throw new ApiProblem('checks-failed', detail, { fields });
+    throw new ApiProblem('machine-check', detail, { fields, inspection: report });
   }
 
-  private ofCorrelation(record: RevisionRecord): { reports: CheckReport[]; fields: FieldProblem[] } {
-    const compiled = this.definitions.correlation(record);
-    const { library } = this.libraries.approvedOrLatest();
-    const fields = unknownEquations(compiled.definition.quantities, (slug) => library(slug) !== undefined);
-    return { reports: runChecks(compiled, library), fields };
-  }
-
-  private ofEquation(record: RevisionRecord): { reports: CheckReport[]; fields: FieldProblem[] } {
-    return { reports: runPropertyChecks(this.definitions.equation(record)), fields: [] };
-  }
-}
-
-function unknownEquations(
-  quantities: readonly Quantity[],
-  isKnown: (slug: string) => boolean,
-): FieldProblem[] {
-  return quantities.flatMap(({ equations = [] }, i) =>
-    equations.flatMap((slug, j) =>
-      isKnown(slug)
+  private inspect(record: RevisionRecord): InspectionReport {
+    if (record.kind === 'correlation') {
+      const { library } = this.libraries.approvedOrLatest();
+      return inspectCorrelation(this.definitions.definition(record), library);
+    }
+    const checks = runPropertyChecks(this.definitions.equation(record));
+    const remarks = checks.flatMap(({ title, passed }, i): Remark[] =>
+      passed
         ? []
         : [
             {
-              field: `definition.quantities[${i}].equations[${j}]`,
-              code: 'unknown-equation',
-              message: `There is no property equation "${slug}" in the register.`,
+              verdict: 'error',
+              topic: 'checks',
+              field: `checks[${i}]`,
+              message: `"${title}" does not reproduce.`,
             },
           ],
-    ),
-  );
+    );
+    return { passed: remarks.length === 0, remarks, checks };
+  }
 }
 
-function failure({ title, values, problems }: CheckReport, place: number): FieldProblem {
-  const off = values
-    .filter(({ passed }) => !passed)
-    .map(({ symbol, expected, found }) => `${symbol} is ${found ?? 'nothing'} and should be ${expected}`);
-  const why = [...problems.map(({ message }) => message), ...off].join('; ');
-  const message = `The worked check "${title}" does not reproduce: ${why}.`;
-  return { field: `definition.checks[${place}]`, code: 'check-failed', message };
+function fieldProblem({ field, message, topic }: Remark): FieldProblem {
+  return { field: field === '' ? 'definition' : `definition.${field}`, code: topic, message };
 }

@@ -4,14 +4,14 @@ import { authorize } from '../common/authorized.js';
 import { ApiProblem } from '../common/problem.js';
 import { CHECKLIST_POINTS, type Checklist, type Verdict } from '../common/verdict.js';
 import { Writer } from '../database/write.js';
-import { DefinitionsService } from '../revisions/definitions.service.js';
 import { subjectOf, type RevisionKey, type RevisionRecord } from '../revisions/revision-record.js';
-import { mayComment, mayReview, standingAfter } from '../revisions/revision.policy.js';
+import { handsOf, mayReview, mayTakeReview, standingAfter } from '../revisions/reviewing.policy.js';
 import { RevisionsService } from '../revisions/revisions.service.js';
 import { assertCurrent } from './assert-current.js';
-import { leadsSomewhere } from './field-path.js';
-import { ReviewsRepository } from './reviews.repository.js';
+import { LifeNoticesService } from './life-notices.service.js';
+import { reviewLetters } from './review-letters.js';
 import { reviewFaults } from './review.policy.js';
+import { ReviewsRepository } from './reviews.repository.js';
 
 export interface Review {
   readonly verdict: Verdict;
@@ -23,14 +23,29 @@ export interface Review {
 export class ReviewingService {
   constructor(
     private readonly revisions: RevisionsService,
-    private readonly definitions: DefinitionsService,
     private readonly reviews: ReviewsRepository,
+    private readonly notices: LifeNoticesService,
     private readonly writer: Writer,
   ) {}
 
+  /** Takes a review from the desk, without having been asked. */
+  take(actor: Actor, key: RevisionKey): RevisionRecord {
+    return this.writer.write(actor, 'review.taken', (tx, at) => {
+      const found = this.revisions.one(actor, key, tx);
+      const record = authorize(found, mayTakeReview(actor, found));
+      if (this.reviews.reviewerIds(record.id, tx).includes(actor.id)) {
+        throw new ApiProblem('duplicate', 'This review is yours already.');
+      }
+      this.reviews.insertAssignments(tx, record, [actor.id], actor, at);
+      const { hash, iteration } = record;
+      return { subject: subjectOf(record), detail: { hash, iteration }, result: record };
+    });
+  }
+
   /**
-   * A verdict on the present content. Asking for changes makes a draft of it again, declining ends it. `ifMatch`, when
-   * given, is the hash of the content that the reviewer has read.
+   * A verdict on the present content. Asking for changes gives the turn back to the originator, declining ends it. Who
+   * was not asked takes the review by giving a verdict. `ifMatch`, when given, is the hash of the content that the
+   * reviewer has read.
    */
   review(actor: Actor, key: RevisionKey, given: Review, ifMatch?: string): RevisionRecord {
     const faults = reviewFaults(given);
@@ -40,31 +55,24 @@ export class ReviewingService {
     const act = standing === 'declined' ? 'revision.declined' : 'revision.reviewed';
     return this.writer.write(actor, act, (tx, at) => {
       const found = this.revisions.one(actor, key, tx);
-      const record = authorize(found, mayReview(actor, found));
+      const last = this.reviews.lastRound(found.id, tx);
+      const hands = handsOf(found, last, this.reviews.verdicts(found.id, tx));
+      const record = authorize(found, mayReview(actor, found, hands));
       assertCurrent(record, ifMatch);
       const { verdict, note } = given;
       const checklist = checklistOf(given.checklist);
-      this.reviews.insertReview(tx, record, actor, at, { verdict, checklist, note });
+      const round = last?.round ?? 1;
+      this.reviews.insertAssignments(tx, record, [actor.id], actor, at);
+      this.reviews.insertReview(tx, record, actor, at, { round, verdict, checklist, note });
       const result =
         standing === undefined
           ? record
           : this.revisions.setStanding(tx, record, { standing, note }, actor, at);
-      const detail = { hash: record.hash, verdict, checklist, ...(note === undefined ? {} : { note }) };
+      const letter = reviewLetters.verdict(actor, record, verdict);
+      this.notices.tell(tx, at, actor, record, [record.originatorId], letter);
+      const { hash, iteration } = record;
+      const detail = { hash, iteration, verdict, checklist, ...(note === undefined ? {} : { note }) };
       return { subject: subjectOf(record), detail, result };
-    });
-  }
-
-  /** A remark on one field of the present content, or on the whole of it. */
-  comment(actor: Actor, key: RevisionKey, field: string, text: string): RevisionRecord {
-    return this.writer.write(actor, 'revision.commented', (tx, at) => {
-      const found = this.revisions.one(actor, key, tx);
-      const record = authorize(found, mayComment(actor));
-      if (!leadsSomewhere(this.definitions.definition(record), field)) {
-        throw ApiProblem.ofField('malformed', 'field', 'There is no such field on this sheet.');
-      }
-      this.reviews.insertComment(tx, record, actor, at, { field, text });
-      const detail = { hash: record.hash, field, text };
-      return { subject: subjectOf(record), detail, result: record };
     });
   }
 }

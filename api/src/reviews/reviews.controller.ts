@@ -1,13 +1,5 @@
-import { applyDecorators, Body, Controller, Param, Post, UseInterceptors } from '@nestjs/common';
-import {
-  ApiConflictResponse,
-  ApiCreatedResponse,
-  ApiHeader,
-  ApiNotFoundResponse,
-  ApiOperation,
-  ApiTags,
-  ApiUnprocessableEntityResponse,
-} from '@nestjs/swagger';
+import { Body, Controller, Param, Post, UseInterceptors } from '@nestjs/common';
+import { ApiHeader, ApiTags, ApiUnprocessableEntityResponse } from '@nestjs/swagger';
 import { CurrentActor } from '../common/access/current-actor.decorator.js';
 import { Permission } from '../common/access/permission.decorator.js';
 import type { Actor } from '../common/actor.js';
@@ -17,21 +9,16 @@ import { SheetEtag } from '../correlations/sheet-etag.interceptor.js';
 import { RevisionParams } from '../revisions/dto/revision-params.dto.js';
 import {
   ApprovalBody,
-  CommentBody,
+  NoteBody,
+  NothingBody,
   ReasonBody,
   ReviewBody,
   SubmissionBody,
+  SuspensionBody,
   WithdrawalBody,
 } from './dto/review-bodies.dto.js';
+import { Life } from './life.decorator.js';
 import { ReviewsService } from './reviews.service.js';
-
-const Life = (operationId: string, summary: string) =>
-  applyDecorators(
-    ApiOperation({ operationId, summary }),
-    ApiCreatedResponse({ type: Sheet, description: 'The sheet as it stands now' }),
-    ApiNotFoundResponse({ description: 'There is no such revision that the caller may see' }),
-    ApiConflictResponse({ description: "The revision's standing or content does not allow it" }),
-  );
 
 @ApiTags('Review and approval')
 @Controller('correlations/:slug/revisions/:number')
@@ -42,9 +29,26 @@ export class ReviewsController {
   @Post('submission')
   @Permission('correlation.submit')
   @Life('submitRevision', 'Puts a draft into review, once the machine check passes')
-  @ApiUnprocessableEntityResponse({ description: 'The sheet does not reproduce its own worked checks' })
+  @ApiUnprocessableEntityResponse({
+    description: 'The machine found errors: named in `fields`, whole in `inspection`',
+  })
   submit(@CurrentActor() actor: Actor, @Param() path: RevisionParams, @Body() body: SubmissionBody): Sheet {
     return this.reviews.submit(actor, path, body);
+  }
+
+  @Post('iterations')
+  @Permission('correlation.submit')
+  @Life('putRevisionForward', 'Says that a revision in review is ready again, after changes or answers')
+  @ApiUnprocessableEntityResponse({ description: 'The machine found errors' })
+  putForward(@CurrentActor() actor: Actor, @Param() path: RevisionParams, @Body() body: NoteBody): Sheet {
+    return this.reviews.putForward(actor, path, body.note);
+  }
+
+  @Post('assignments')
+  @Permission('correlation.review')
+  @Life('takeReview', 'Takes a review from the desk')
+  take(@CurrentActor() actor: Actor, @Param() path: RevisionParams, @Body() _body: NothingBody): Sheet {
+    return this.reviews.take(actor, path);
   }
 
   @Post('reviews')
@@ -64,13 +68,6 @@ export class ReviewsController {
     return this.reviews.review(actor, path, body, ifMatch);
   }
 
-  @Post('comments')
-  @Permission('correlation.comment')
-  @Life('commentOnRevision', 'A remark on one field, or on the whole')
-  comment(@CurrentActor() actor: Actor, @Param() path: RevisionParams, @Body() body: CommentBody): Sheet {
-    return this.reviews.comment(actor, path, body.field, body.text);
-  }
-
   @Post('approval')
   @Permission('correlation.approve')
   @Life('approveRevision', "An authority's signature on the present content, with the password once more")
@@ -82,11 +79,18 @@ export class ReviewsController {
     return this.reviews.approve(actor, path, body);
   }
 
+  @Post('decline')
+  @Permission('correlation.approve')
+  @Life('declineRevision', "An authority's no to a revision in review")
+  decline(@CurrentActor() actor: Actor, @Param() path: RevisionParams, @Body() body: ReasonBody): Sheet {
+    return this.reviews.decline(actor, path, body.reason);
+  }
+
   @Post('suspension')
   @Permission('correlation.suspend')
   @Life('suspendRevision', 'Takes a revision out of use while a problem is looked into')
-  suspend(@CurrentActor() actor: Actor, @Param() path: RevisionParams, @Body() body: ReasonBody): Sheet {
-    return this.reviews.suspend(actor, path, body.reason);
+  suspend(@CurrentActor() actor: Actor, @Param() path: RevisionParams, @Body() body: SuspensionBody): Sheet {
+    return this.reviews.suspend(actor, path, body);
   }
 
   @Post('reinstatement')
@@ -100,6 +104,6 @@ export class ReviewsController {
   @Permission('correlation.withdraw')
   @Life('withdrawRevision', 'Takes a revision out of use for good')
   withdraw(@CurrentActor() actor: Actor, @Param() path: RevisionParams, @Body() body: WithdrawalBody): Sheet {
-    return this.reviews.withdraw(actor, path, body.reason, body.class);
+    return this.reviews.withdraw(actor, path, body);
   }
 }

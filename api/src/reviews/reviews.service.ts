@@ -1,18 +1,13 @@
 import { Injectable } from '@nestjs/common';
 import type { Actor } from '../common/actor.js';
-import type { WithdrawalClass } from '../common/standing.js';
 import type { Sheet } from '../correlations/dto/sheet.dto.js';
 import { SheetService } from '../correlations/sheet.service.js';
+import type { RevisionPath } from '../revisions/revision-record.js';
 import { ApprovalService, type Approval } from './approval.service.js';
+import { CommentsService } from './comments.service.js';
 import { ReviewingService, type Review } from './reviewing.service.js';
-import { StandingService } from './standing.service.js';
+import { StandingService, type Suspension, type Withdrawal } from './standing.service.js';
 import { SubmissionService, type Submission } from './submission.service.js';
-
-/** Names a revision of a correlation, as the path does. */
-export interface RevisionPath {
-  readonly slug: string;
-  readonly number: number;
-}
 
 /** The life of a correlation's revision; each act is answered with the sheet as it stands after it. */
 @Injectable()
@@ -20,6 +15,7 @@ export class ReviewsService {
   constructor(
     private readonly submissions: SubmissionService,
     private readonly reviewing: ReviewingService,
+    private readonly comments: CommentsService,
     private readonly approvals: ApprovalService,
     private readonly standings: StandingService,
     private readonly sheets: SheetService,
@@ -30,13 +26,33 @@ export class ReviewsService {
     return this.sheet(actor, path);
   }
 
+  putForward(actor: Actor, path: RevisionPath, note: string | undefined): Sheet {
+    this.submissions.putForward(actor, keyOf(path), note);
+    return this.sheet(actor, path);
+  }
+
+  take(actor: Actor, path: RevisionPath): Sheet {
+    this.reviewing.take(actor, keyOf(path));
+    return this.sheet(actor, path);
+  }
+
   review(actor: Actor, path: RevisionPath, given: Review, ifMatch: string | undefined): Sheet {
     this.reviewing.review(actor, keyOf(path), given, ifMatch);
     return this.sheet(actor, path);
   }
 
   comment(actor: Actor, path: RevisionPath, field: string, text: string): Sheet {
-    this.reviewing.comment(actor, keyOf(path), field, text);
+    this.comments.comment(actor, keyOf(path), field, text);
+    return this.sheet(actor, path);
+  }
+
+  answer(actor: Actor, path: RevisionPath, id: number, text: string): Sheet {
+    this.comments.answer(actor, keyOf(path), id, text);
+    return this.sheet(actor, path);
+  }
+
+  resolve(actor: Actor, path: RevisionPath, id: number): Sheet {
+    this.comments.resolve(actor, keyOf(path), id);
     return this.sheet(actor, path);
   }
 
@@ -45,8 +61,13 @@ export class ReviewsService {
     return this.sheet(actor, path);
   }
 
-  suspend(actor: Actor, path: RevisionPath, reason: string): Sheet {
-    this.standings.suspend(actor, keyOf(path), reason);
+  decline(actor: Actor, path: RevisionPath, reason: string): Sheet {
+    this.approvals.decline(actor, keyOf(path), reason);
+    return this.sheet(actor, path);
+  }
+
+  suspend(actor: Actor, path: RevisionPath, given: Suspension): Sheet {
+    this.standings.suspend(actor, keyOf(path), given);
     return this.sheet(actor, path);
   }
 
@@ -55,8 +76,8 @@ export class ReviewsService {
     return this.sheet(actor, path);
   }
 
-  withdraw(actor: Actor, path: RevisionPath, reason: string, withdrawalClass: WithdrawalClass): Sheet {
-    this.standings.withdraw(actor, keyOf(path), reason, withdrawalClass);
+  withdraw(actor: Actor, path: RevisionPath, given: Withdrawal): Sheet {
+    this.standings.withdraw(actor, keyOf(path), given);
     return this.sheet(actor, path);
   }
 

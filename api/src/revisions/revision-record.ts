@@ -9,7 +9,13 @@ export interface RevisionKey {
   readonly number: number;
 }
 
-/** A revision as it stands now: identity, last standing and latest content. */
+/** Names a revision of a correlation, as the path does. */
+export interface RevisionPath {
+  readonly slug: string;
+  readonly number: number;
+}
+
+/** A revision as it stands now: identity, standing at this moment and latest content. */
 export interface RevisionRecord extends RevisionKey {
   readonly id: number;
   /** Null for a property equation. */
@@ -25,6 +31,12 @@ export interface RevisionRecord extends RevisionKey {
   readonly title: string;
   /** Null for a property equation. */
   readonly phase: string | null;
+  /** The moment from which on its approval holds; null before any approval. */
+  readonly effectiveFrom: string | null;
+  /** When the office wants to look at it again. */
+  readonly reviewDue: string | null;
+  /** Approved, its effective date has come, and no later revision is in force. */
+  readonly inForce: boolean;
 }
 
 const PATHS: Record<SubjectKind, string> = {

@@ -5,19 +5,17 @@ import { STANDINGS, type Standing } from '../common/standing.js';
 import type { Verdict } from '../common/verdict.js';
 import {
   mayApprove,
+  mayDecline,
   mayEdit,
   mayEvaluate,
   mayReinstate,
-  mayReview,
   maySee,
   maySubmit,
   maySuspend,
-  maySupersede,
   mayWithdraw,
-  tally,
-  type RevisionFacts,
-  type VerdictFact,
 } from './revision.policy.js';
+import { mayReview as mayReviewIn, tally } from './reviewing.policy.js';
+import type { RevisionFacts, VerdictFact } from './revision-facts.js';
 
 const actor = (id: string, ...roles: Role[]): Actor => ({ id, name: id, roles });
 const originator = actor('originator', 'engineer', 'reviewer', 'authority');
@@ -27,17 +25,23 @@ const authority = actor('authority', 'authority');
 const auditor = actor('auditor', 'auditor');
 const administrator = actor('administrator', 'administrator');
 
-const revision = (standing: Standing, hash = 'now'): RevisionFacts => ({
+const NOW = 3;
+const BEFORE = 2;
+const revision = (standing: Standing): RevisionFacts => ({
   standing,
   originatorId: originator.id,
-  hash,
+  iteration: NOW,
+  inForce: standing === 'approved',
 });
-const verdict = (reviewerId: string, word: Verdict = 'recommend', hash = 'now'): VerdictFact => ({
+const verdict = (reviewerId: string, word: Verdict = 'recommend', iteration = NOW): VerdictFact => ({
   reviewerId,
   verdict: word,
-  hash,
+  iteration,
+  round: iteration,
 });
+const mayReview = (who: Actor, facts: RevisionFacts) => mayReviewIn(who, facts, 'reviewers');
 const TWO = [verdict('r1'), verdict('r2')];
+const GROUND = { appointed: true, reviewsNeeded: 2 };
 const standingsWhere = (rule: (standing: Standing) => { allowed: boolean }): Standing[] =>
   STANDINGS.filter((standing) => rule(standing).allowed);
 
@@ -71,8 +75,12 @@ describe('the standings in which an act is possible', () => {
     ['edit', (standing: Standing) => mayEdit(originator, revision(standing)), ['draft', 'in review']],
     ['submit', (standing: Standing) => maySubmit(originator, revision(standing)), ['draft']],
     ['review', (standing: Standing) => mayReview(reviewer, revision(standing)), ['in review']],
-    ['approve', (standing: Standing) => mayApprove(authority, revision(standing), TWO), ['in review']],
-    ['supersede', (standing: Standing) => maySupersede(authority, revision(standing)), ['approved']],
+    [
+      'approve',
+      (standing: Standing) => mayApprove(authority, revision(standing), TWO, GROUND),
+      ['in review'],
+    ],
+    ['decline', (standing: Standing) => mayDecline(authority, revision(standing), GROUND), ['in review']],
     [
       'suspend',
       (standing: Standing) => maySuspend(authority, revision(standing)),
@@ -102,7 +110,7 @@ describe('the standings in which an act is possible', () => {
 describe('four eyes', () => {
   test('an originator neither reviews nor approves, whatever the roles', () => {
     expect(mayReview(originator, revision('in review'))).toMatchObject({ allowed: false, code: 'forbidden' });
-    expect(mayApprove(originator, revision('in review'), TWO)).toMatchObject({
+    expect(mayApprove(originator, revision('in review'), TWO, GROUND)).toMatchObject({
       allowed: false,
       code: 'forbidden',
     });
@@ -110,17 +118,17 @@ describe('four eyes', () => {
 
   test('a reviewer does not approve, on whatever content and with whatever verdict', () => {
     const both = actor('r3', 'reviewer', 'authority');
-    const before = [verdict('r3', 'ask-for-changes', 'before'), ...TWO];
-    expect(mayApprove(both, revision('in review'), before)).toMatchObject({
+    const before = [verdict('r3', 'ask-for-changes', BEFORE), ...TWO];
+    expect(mayApprove(both, revision('in review'), before, GROUND)).toMatchObject({
       allowed: false,
       code: 'forbidden',
     });
-    expect(mayApprove(both, revision('in review'), TWO)).toMatchObject({ allowed: true });
+    expect(mayApprove(both, revision('in review'), TWO, GROUND)).toMatchObject({ allowed: true });
   });
 
   test('who lacks the permission is refused first', () => {
     for (const who of [engineer, reviewer, auditor, administrator]) {
-      expect(mayApprove(who, revision('in review'), TWO)).toMatchObject({
+      expect(mayApprove(who, revision('in review'), TWO, GROUND)).toMatchObject({
         allowed: false,
         code: 'forbidden',
       });
@@ -134,13 +142,14 @@ describe('four eyes', () => {
 });
 
 describe('what an approval rests on', () => {
-  const outcome = (...verdicts: VerdictFact[]) => mayApprove(authority, revision('in review'), verdicts);
+  const outcome = (...verdicts: VerdictFact[]) =>
+    mayApprove(authority, revision('in review'), verdicts, GROUND);
 
   test.each<[string, VerdictFact[]]>([
     ['no review', []],
     ['one', [verdict('r1')]],
     ['one, given twice', [verdict('r1'), verdict('r1')]],
-    ['two, one on former content', [verdict('r1'), verdict('r2', 'recommend', 'before')]],
+    ['two, one on former content', [verdict('r1'), verdict('r2', 'recommend', BEFORE)]],
     ['two and a third that asks for changes', [...TWO, verdict('r3', 'ask-for-changes')]],
     ['two, of which one was taken back', [...TWO, verdict('r2', 'ask-for-changes')]],
   ])('%s is not enough', (_name, verdicts) => {
@@ -153,6 +162,6 @@ describe('what an approval rests on', () => {
 
   test('a reviewer who asked for changes and then recommends the present content counts', () => {
     expect(outcome(verdict('r1', 'ask-for-changes'), ...TWO)).toEqual({ allowed: true });
-    expect(tally('now', [verdict('r1', 'ask-for-changes'), ...TWO])).toEqual({ favourable: 2, open: 0 });
+    expect(tally(NOW, [verdict('r1', 'ask-for-changes'), ...TWO])).toEqual({ favourable: 2, open: 0 });
   });
 });

@@ -1,24 +1,17 @@
-import { SYSTEM_ACTOR, type Actor } from '../common/actor.js';
+import type { Actor } from '../common/actor.js';
 import { ALLOWED, denied, type Decision } from '../common/authorized.js';
-import { hasPermission, type Permission } from '../common/permissions.js';
-import type { Verdict } from '../common/verdict.js';
-import { UNAPPROVED, type Standing } from '../common/standing.js';
+import { hasPermission } from '../common/permissions.js';
+import { UNAPPROVED } from '../common/standing.js';
+import { tally } from './reviewing.policy.js';
+import type { RevisionFacts, VerdictFact } from './revision-facts.js';
+import { asOriginator, first, holds, inStanding, isOriginator, originatorsOf, unless } from './rule-terms.js';
 
-/** How many favourable reviews an approval rests on. */
-export const REVIEWS_NEEDED = 2;
-
-/** What the rules of a revision's life look at. */
-export interface RevisionFacts {
-  readonly standing: Standing;
-  readonly originatorId: string;
-  readonly hash: string;
-}
-
-/** One verdict, in the order in which they were given. */
-export interface VerdictFact {
-  readonly reviewerId: string;
-  readonly verdict: Verdict;
-  readonly hash: string;
+/** What the office says on an approval besides the revision itself. */
+export interface ApprovalGround {
+  /** How many favourable reviews an approval rests on. */
+  readonly reviewsNeeded: number;
+  /** Whether an appointment as technical authority holds now for the one who signs, and for the geometry. */
+  readonly appointed: boolean;
 }
 
 /** What somebody sees of the register. */
@@ -27,11 +20,6 @@ export interface Sight {
   readonly everything: boolean;
   /** Else those of these people. */
   readonly originators: readonly string[];
-}
-
-/** Whose drafts somebody sees and may take up: their own and, for whoever may draft, those the library came with. */
-export function originatorsOf(actor: Actor): string[] {
-  return hasPermission(actor.roles, 'correlation.draft') ? [actor.id, SYSTEM_ACTOR.id] : [actor.id];
 }
 
 /** Whether somebody sees drafts, reviews in progress and declined revisions of others. */
@@ -69,19 +57,12 @@ export function maySubmit(actor: Actor, revision: RevisionFacts): Decision {
   );
 }
 
-export function mayReview(actor: Actor, revision: RevisionFacts): Decision {
-  return first(
-    holds(actor, 'correlation.review'),
-    unless(isOriginator(actor, revision), 'Nobody reviews a revision that they originated.'),
-    inStanding(revision, ['in review'], 'Only a revision in review takes a verdict.'),
-  );
-}
-
 /** Whether somebody may sign, whoever else did: the approval's rules on the person and on what must be there. */
 export function mayApprove(
   actor: Actor,
   revision: RevisionFacts,
   verdicts: readonly VerdictFact[],
+  { appointed, reviewsNeeded }: ApprovalGround,
 ): Decision {
   return first(
     holds(actor, 'correlation.approve'),
@@ -90,16 +71,23 @@ export function mayApprove(
       verdicts.some(({ reviewerId }) => reviewerId === actor.id),
       'Nobody approves a revision that they reviewed.',
     ),
+    unless(!appointed, 'No appointment as technical authority holds for this now.'),
     inStanding(revision, ['in review'], 'Only a revision in review can be approved.'),
-    reviewed(revision, verdicts),
+    reviewed(revision, verdicts, reviewsNeeded),
   );
 }
 
-/** What an approval does to the revision approved before. */
-export function maySupersede(actor: Actor, revision: RevisionFacts): Decision {
+/** The authority's no. Whoever may not sign for it may not turn it down either, but no review has to be waited for. */
+export function mayDecline(
+  actor: Actor,
+  revision: RevisionFacts,
+  { appointed }: Pick<ApprovalGround, 'appointed'>,
+): Decision {
   return first(
     holds(actor, 'correlation.approve'),
-    inStanding(revision, ['approved'], 'Only an approved revision can be superseded.'),
+    unless(isOriginator(actor, revision), 'Nobody decides on a revision that they originated.'),
+    unless(!appointed, 'No appointment as technical authority holds for this now.'),
+    inStanding(revision, ['in review'], 'Only a revision in review can be declined.'),
   );
 }
 
@@ -132,21 +120,21 @@ export function mayWithdraw(actor: Actor, revision: RevisionFacts): Decision {
   );
 }
 
-export function mayComment(actor: Actor): Decision {
-  return holds(actor, 'correlation.comment');
-}
-
 /** Drafts and revisions in review serve those who work on them; what was taken out of use serves comparison only. */
 export function mayEvaluate(actor: Actor, revision: RevisionFacts): Decision {
   const permitted = holds(actor, 'correlation.evaluate');
   if (!permitted.allowed) return permitted;
+  const concerned = isOriginator(actor, revision) || seesUnapproved(actor);
   switch (revision.standing) {
-    case 'approved':
     case 'superseded':
       return ALLOWED;
+    case 'approved':
+      return revision.inForce || concerned
+        ? ALLOWED
+        : denied('This revision is approved from a later date on and not in use until then.', 'not-in-use');
     case 'draft':
     case 'in review':
-      return isOriginator(actor, revision) || seesUnapproved(actor)
+      return concerned
         ? ALLOWED
         : denied(
             'This revision is not approved yet: it evaluates for its originator, reviewers and authorities only.',
@@ -162,65 +150,16 @@ export function mayEvaluate(actor: Actor, revision: RevisionFacts): Decision {
   }
 }
 
-/** Distinct reviewers whose last word on this very content is favourable, and those whose last word is not. */
-export function tally(hash: string, verdicts: readonly VerdictFact[]): { favourable: number; open: number } {
-  const last = new Map<string, Verdict>();
-  for (const fact of verdicts) if (fact.hash === hash) last.set(fact.reviewerId, fact.verdict);
-  const words = [...last.values()];
-  const favourable = words.filter((verdict) => verdict === 'recommend').length;
-  return { favourable, open: words.length - favourable };
-}
-
-/** What a verdict does to the standing; undefined leaves it. */
-export function standingAfter(verdict: Verdict): Standing | undefined {
-  switch (verdict) {
-    case 'recommend':
-      return undefined;
-    case 'ask-for-changes':
-      return 'draft';
-    case 'decline':
-      return 'declined';
-  }
-}
-
-function isOriginator(actor: Actor, revision: RevisionFacts): boolean {
-  return originatorsOf(actor).includes(revision.originatorId);
-}
-
-function reviewed(revision: RevisionFacts, verdicts: readonly VerdictFact[]): Decision {
-  const { favourable, open } = tally(revision.hash, verdicts);
+function reviewed(revision: RevisionFacts, verdicts: readonly VerdictFact[], needed: number): Decision {
+  const { favourable, open } = tally(revision.iteration, verdicts);
   if (open > 0)
     return denied(
       'A reviewer has not recommended this content; the matter must be settled first.',
       'conflict',
     );
-  if (favourable >= REVIEWS_NEEDED) return ALLOWED;
+  if (favourable >= needed) return ALLOWED;
   return denied(
-    `An approval rests on ${REVIEWS_NEEDED} favourable reviews of the present content; there ${favourable === 1 ? 'is 1' : `are ${favourable}`}.`,
+    `An approval rests on ${needed} favourable ${needed === 1 ? 'review' : 'reviews'} of the present content; there ${favourable === 1 ? 'is 1' : `are ${favourable}`}.`,
     'conflict',
   );
-}
-
-function holds(actor: Actor, permission: Permission): Decision {
-  return hasPermission(actor.roles, permission)
-    ? ALLOWED
-    : denied(`This needs the permission ${permission}.`);
-}
-
-function asOriginator(actor: Actor, revision: RevisionFacts, does: string): Decision {
-  return isOriginator(actor, revision) ? ALLOWED : denied(`Only the originator of a revision ${does}.`);
-}
-
-function unless(condition: boolean, reason: string): Decision {
-  return condition ? denied(reason) : ALLOWED;
-}
-
-function inStanding(revision: RevisionFacts, standings: readonly Standing[], reason: string): Decision {
-  return standings.includes(revision.standing)
-    ? ALLOWED
-    : denied(`${reason} This one is ${revision.standing}.`, 'conflict');
-}
-
-function first(...decisions: Decision[]): Decision {
-  return decisions.find(({ allowed }) => !allowed) ?? ALLOWED;
 }

@@ -1,10 +1,12 @@
 import { Injectable } from '@nestjs/common';
 import { and, asc, desc, eq, sql, type SQL } from 'drizzle-orm';
 import type { Actor } from '../common/actor.js';
+import { Clock } from '../common/clock.js';
 import type { Authorized } from '../common/authorized.js';
 import { Connection, type Reader, type Tx } from '../database/connection.js';
 import { correlation, propertyEquation } from '../database/schema/register-entry.js';
 import { revision, revisionContent, revisionNow, standingEvent } from '../database/schema/revision.js';
+import { inForceAt, standingAt, standingNoteAt, standingSince, superseded } from '../database/standing-at.js';
 import { visibleTo } from '../database/visible-to.js';
 import type { Content } from './content.js';
 import type { NewStanding } from './new-standing.js';
@@ -14,7 +16,10 @@ import type { SearchText } from './search-text.js';
 
 @Injectable()
 export class RevisionRepository {
-  constructor(private readonly connection: Connection) {}
+  constructor(
+    private readonly connection: Connection,
+    private readonly clock: Clock,
+  ) {}
 
   /** All revisions of a subject, the first number first. */
   of(kind: SubjectKind, slug: string, reader: Reader = this.connection.reader): RevisionRecord[] {
@@ -49,6 +54,22 @@ export class RevisionRepository {
   /** Revisions of the correlations of one geometry. */
   ofGeometry(geometry: string, reader: Reader = this.connection.reader): RevisionRecord[] {
     return this.select(reader, eq(revisionNow.geometry, geometry));
+  }
+
+  /**
+   * Revisions whose place a later one has taken at a moment, while that is not written down yet; each with the number
+   * of the later one.
+   */
+  toSupersede(at: string, reader: Reader = this.connection.reader): { record: RevisionRecord; by: number }[] {
+    const due = reader
+      .select({ id: revisionNow.id, by: revisionNow.supersededBy })
+      .from(revisionNow)
+      .where(superseded(at))
+      .orderBy(asc(revisionNow.id))
+      .all();
+    return due.flatMap(({ id, by }) =>
+      this.select(reader, eq(revisionNow.id, id), at).map((record) => ({ record, by: by ?? 0 })),
+    );
   }
 
   exists(kind: SubjectKind, slug: string, reader: Reader = this.connection.reader): boolean {
@@ -139,7 +160,11 @@ export class RevisionRepository {
     `);
   }
 
-  private select(reader: Reader, where: SQL | undefined): RevisionRecord[] {
+  private select(
+    reader: Reader,
+    where: SQL | undefined,
+    now: string = this.clock.now().toISOString(),
+  ): RevisionRecord[] {
     return reader
       .select({
         id: revisionNow.id,
@@ -149,13 +174,16 @@ export class RevisionRepository {
         geometry: revisionNow.geometry,
         originatorId: revisionNow.originatorId,
         createdAt: revisionNow.createdAt,
-        standing: revisionNow.standing,
-        standingAt: revisionNow.standingAt,
-        standingNote: revisionNow.standingNote,
+        standing: standingAt(now),
+        standingAt: standingSince(now),
+        standingNote: standingNoteAt(now),
         iteration: revisionNow.iteration,
         hash: revisionNow.hash,
         title: revisionNow.title,
         phase: revisionNow.phase,
+        effectiveFrom: revisionNow.effectiveFrom,
+        reviewDue: revisionNow.reviewDue,
+        inForce: inForceAt(now).mapWith(Boolean),
       })
       .from(revisionNow)
       .where(where)
@@ -199,12 +227,12 @@ export class RevisionRepository {
     tx: Tx,
     revisionId: number,
     hash: string,
-    { standing, note, withdrawalClass }: NewStanding,
+    standing: NewStanding,
     by: Actor,
     at: string,
   ): void {
     tx.insert(standingEvent)
-      .values({ revisionId, standing, hash, at, byId: by.id, byName: by.name, note, withdrawalClass })
+      .values({ revisionId, hash, at, byId: by.id, byName: by.name, ...standing })
       .run();
   }
 }

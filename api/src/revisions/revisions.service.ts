@@ -5,6 +5,7 @@ import type { Authorized } from '../common/authorized.js';
 import { ApiProblem } from '../common/problem.js';
 import type { Reader, Tx } from '../database/connection.js';
 import type { Content } from './content.js';
+import { NamesReadModel } from './names.read-model.js';
 import type { NewStanding } from './new-standing.js';
 import type { RevisionKey, RevisionRecord, SubjectKind } from './revision-record.js';
 import { RevisionRepository } from './revision.repository.js';
@@ -18,7 +19,15 @@ const NOUN: Record<SubjectKind, string> = {
 /** What the other features do with revisions. Reads answer with what the caller may see, and nothing else. */
 @Injectable()
 export class RevisionsService {
-  constructor(private readonly revisions: RevisionRepository) {}
+  constructor(
+    private readonly revisions: RevisionRepository,
+    private readonly names: NamesReadModel,
+  ) {}
+
+  /** The name of somebody whom a record names by id: of this office, of a former one, or the program itself. */
+  nameOf(personId: string): string {
+    return this.names.name(personId) ?? SYSTEM_ACTOR.name;
+  }
 
   /** One revision, as the caller may see it; else `not-found`. */
   one(actor: Actor, key: RevisionKey, reader?: Reader): RevisionRecord {
@@ -32,10 +41,10 @@ export class RevisionsService {
     return found;
   }
 
-  /** The approved revision, else the latest that the caller may see; else `not-found`. */
+  /** The revision in force, else the latest that the caller may see; else `not-found`. */
   shown(actor: Actor, kind: SubjectKind, slug: string): RevisionRecord {
     const seen = this.visible(actor, kind, slug);
-    const found = seen.find(({ standing }) => standing === 'approved') ?? seen.at(-1);
+    const found = seen.find(({ inForce }) => inForce) ?? seen.at(-1);
     if (found === undefined) throw new ApiProblem('not-found', `There is no ${NOUN[kind]} "${slug}".`);
     return found;
   }
@@ -57,6 +66,11 @@ export class RevisionsService {
   /** All revisions of property equations, whoever asks. */
   ofPropertyEquations(): RevisionRecord[] {
     return this.revisions.every('property-equation');
+  }
+
+  /** Revisions that a later one has superseded by a moment, while no standing event says so yet. */
+  toSupersede(at: string, reader?: Reader) {
+    return this.revisions.toSupersede(at, reader);
   }
 
   exists(kind: SubjectKind, slug: string, reader?: Reader): boolean {

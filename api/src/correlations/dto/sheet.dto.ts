@@ -7,6 +7,7 @@ import {
   CORRELATION_DEFINITION,
   PROPERTY_EQUATION_DEFINITION,
 } from '../../revisions/dto/definition-schema.js';
+import { InspectionSummary } from '../../revisions/dto/inspection.dto.js';
 import { NamedPerson } from '../../revisions/dto/named-person.dto.js';
 
 class SheetRevision {
@@ -61,6 +62,9 @@ class SheetReview {
 }
 
 class SheetComment {
+  @ApiProperty({ type: Number })
+  readonly id!: number;
+
   @ApiProperty({ type: String, description: 'Path in the definition; empty for the whole' })
   readonly field!: string;
 
@@ -89,6 +93,45 @@ class SheetApproval {
 
   @ApiProperty({ type: String, description: 'The content that was signed' })
   readonly hash!: string;
+}
+
+class SheetSuccessor {
+  @ApiProperty({ type: String })
+  readonly slug!: string;
+
+  @ApiProperty({ type: Number })
+  readonly revision!: number;
+
+  @ApiProperty({ type: String })
+  readonly title!: string;
+}
+
+class SheetWithdrawal {
+  @ApiProperty({ type: String })
+  readonly reason!: string;
+
+  @ApiProperty({ enum: WITHDRAWAL_CLASSES })
+  readonly class!: WithdrawalClass;
+
+  @ApiProperty({ type: NamedPerson })
+  readonly by!: NamedPerson;
+
+  @ApiProperty({ type: String, format: 'date-time' })
+  readonly at!: string;
+}
+
+class SheetSuspension {
+  @ApiProperty({ type: String })
+  readonly reason!: string;
+
+  @ApiProperty({ type: NamedPerson })
+  readonly by!: NamedPerson;
+
+  @ApiProperty({ type: String, format: 'date-time' })
+  readonly at!: string;
+
+  @ApiProperty({ type: Number, nullable: true, description: 'The problem report that is being looked into' })
+  readonly problemReport!: number | null;
 }
 
 class SheetUsage {
@@ -131,6 +174,9 @@ export class SheetAbilities {
 
   @ApiProperty({ type: Boolean })
   readonly approve!: boolean;
+
+  @ApiProperty({ type: Boolean })
+  readonly decline!: boolean;
 
   @ApiProperty({ type: Boolean })
   readonly suspend!: boolean;
@@ -206,6 +252,43 @@ export class Sheet {
 
   @ApiProperty({ type: SheetAbilities, description: 'What the caller may do with this revision now' })
   readonly abilities!: SheetAbilities;
+
+  @ApiProperty({
+    type: String,
+    format: 'date-time',
+    nullable: true,
+    description: 'From when on its approval holds',
+  })
+  readonly effectiveFrom!: string | null;
+
+  @ApiProperty({
+    type: String,
+    format: 'date-time',
+    nullable: true,
+    description: 'When it is to be looked at again',
+  })
+  readonly reviewDue!: string | null;
+
+  @ApiProperty({
+    type: Boolean,
+    description: 'Approved, and neither before its effective date nor superseded',
+  })
+  readonly inForce!: boolean;
+
+  @ApiProperty({ type: SheetSuccessor, nullable: true, description: 'What to turn to instead' })
+  readonly successor!: SheetSuccessor | null;
+
+  @ApiProperty({ type: SheetWithdrawal, nullable: true })
+  readonly withdrawal!: SheetWithdrawal | null;
+
+  @ApiProperty({ type: SheetSuspension, nullable: true })
+  readonly suspension!: SheetSuspension | null;
+
+  @ApiProperty({ type: Number, description: 'Problem reports on this revision that nobody answered yet' })
+  readonly openReports!: number;
+
+  @ApiProperty({ type: InspectionSummary, nullable: true, description: 'Of the last machine check' })
+  readonly inspection!: InspectionSummary | null;
 
   @ApiProperty({ type: String })
   readonly caution!: string;

@@ -61,13 +61,18 @@ export const standingEvent = sqliteTable(
     byName: text('by_name').notNull(),
     note: text('note'),
     withdrawalClass: text('withdrawal_class', { enum: WITHDRAWAL_CLASSES }),
+    /** Of a withdrawal: slug of the correlation to turn to instead. */
+    successor: text('successor'),
+    /** Of a suspension: the report that is being looked into. */
+    problemReportId: integer('problem_report_id'),
   },
   (table) => [index('standing_event_by_revision').on(table.revisionId, table.id)],
 );
 
 /**
  * Each revision with its last standing and its latest content: a view of the tables above, so that it cannot say
- * anything else. Made in the migrations.
+ * anything else. Made in the migrations. An approved revision whose `supersededFrom` has come is superseded by then,
+ * whether or not that was written down: ask `standingAt`, which knows the time, and not `standing`.
  */
 export const revisionNow = sqliteView('revision_now', {
   id: integer('id').notNull(),
@@ -86,4 +91,9 @@ export const revisionNow = sqliteView('revision_now', {
   hash: text('hash').notNull(),
   title: text('title').notNull(),
   phase: text('phase'),
+  effectiveFrom: text('effective_from'),
+  reviewDue: text('review_due'),
+  /** When a later approved revision takes its place, and the number of that one. */
+  supersededFrom: text('superseded_from'),
+  supersededBy: integer('superseded_by'),
 }).existing();

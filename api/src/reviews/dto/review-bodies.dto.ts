@@ -6,16 +6,20 @@ import {
   IsArray,
   IsBoolean,
   IsIn,
+  IsInt,
   IsObject,
   IsOptional,
   IsString,
   Matches,
+  Max,
   MaxLength,
+  Min,
   MinLength,
   ValidateNested,
 } from 'class-validator';
 import { WITHDRAWAL_CLASSES, type WithdrawalClass } from '../../common/standing.js';
 import { VERDICTS, type Checklist, type Verdict } from '../../common/verdict.js';
+import { IsDayOrMoment } from './is-day-or-moment.js';
 
 const SHORTEST_REASON = 10;
 const LONGEST_TEXT = 4000;
@@ -113,6 +117,27 @@ export class CommentBody {
   readonly text!: string;
 }
 
+export class TextBody {
+  @ApiProperty({ type: String, minLength: 1, maxLength: LONGEST_TEXT })
+  @Transform(trimmed)
+  @IsString()
+  @MinLength(1)
+  @MaxLength(LONGEST_TEXT)
+  readonly text!: string;
+}
+
+export class NoteBody {
+  @ApiPropertyOptional({ type: String, maxLength: LONGEST_TEXT, description: 'What was done about it' })
+  @IsOptional()
+  @Transform(trimmed)
+  @IsString()
+  @MaxLength(LONGEST_TEXT)
+  readonly note?: string;
+}
+
+/** An act that needs no words. */
+export class NothingBody {}
+
 export class ApprovalBody {
   @ApiProperty({ type: String, description: "The caller's own password, once more", format: 'password' })
   @IsString()
@@ -138,6 +163,24 @@ export class ApprovalBody {
   @IsString()
   @MaxLength(LONGEST_TEXT)
   readonly note?: string;
+
+  @ApiPropertyOptional({
+    type: String,
+    description: 'From when on it holds: a day (from midnight UTC) or a moment; at once without it',
+    example: '2027-01-31',
+  })
+  @IsOptional()
+  @IsDayOrMoment()
+  readonly effectiveFrom?: string;
+
+  @ApiPropertyOptional({
+    type: String,
+    description: "When it is to be looked at again; after the office's number of months without it",
+    example: '2030-01-31',
+  })
+  @IsOptional()
+  @IsDayOrMoment()
+  readonly reviewDue?: string;
 }
 
 export class ReasonBody {
@@ -149,8 +192,23 @@ export class ReasonBody {
   readonly reason!: string;
 }
 
+export class SuspensionBody extends ReasonBody {
+  @ApiPropertyOptional({ type: Number, description: 'The open problem report that is being looked into' })
+  @IsOptional()
+  @IsInt()
+  @Min(1)
+  @Max(Number.MAX_SAFE_INTEGER)
+  readonly problemReport?: number;
+}
+
 export class WithdrawalBody extends ReasonBody {
   @ApiProperty({ enum: WITHDRAWAL_CLASSES })
   @IsIn(WITHDRAWAL_CLASSES)
   readonly class!: WithdrawalClass;
+
+  @ApiPropertyOptional({ type: String, maxLength: 80, description: 'Slug of the correlation to turn to' })
+  @IsOptional()
+  @IsString()
+  @MaxLength(80)
+  readonly successor?: string;
 }
