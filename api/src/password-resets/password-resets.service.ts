@@ -1,4 +1,4 @@
-import { Injectable } from '@nestjs/common';
+import { Injectable, Logger } from '@nestjs/common';
 import { ANONYMOUS_ACTOR } from '../common/actor.js';
 import { AttemptLimiter } from '../common/attempt-limiter.js';
 import { ApiProblem } from '../common/problem.js';
@@ -18,6 +18,8 @@ import { SettingsService } from '../settings/settings.service.js';
 /** A new password for whoever reads the mail of an address of the office. */
 @Injectable()
 export class PasswordResetsService {
+  private readonly logger = new Logger('PasswordResets');
+
   constructor(
     private readonly people: PeopleService,
     private readonly links: OneTimeLinkService,
@@ -31,8 +33,9 @@ export class PasswordResetsService {
   ) {}
 
   /**
-   * Sends a link if the address is of somebody here. The answer is the same for every address, and so is the work up
-   * to a row or two in the one transaction: nobody learns from it who is here. Counted, so that nobody is flooded.
+   * Sends a link if the address is of somebody here. The answer is the same for every address and does not wait for the
+   * work, which is the same too but for the letter's row: nobody learns from either who is here. Counted, so that
+   * nobody is flooded.
    */
   ask(email: string, address: string): void {
     const { windowSeconds, perAddress, perPerson } = this.config.signInLimits;
@@ -40,16 +43,8 @@ export class PasswordResetsService {
       { key: `reset-from:${address}`, limit: perAddress, windowSeconds },
       { key: `reset-for:${normalEmail(email)}`, limit: perPerson, windowSeconds },
     ]);
-    this.writer.write(ANONYMOUS_ACTOR, 'password-reset.asked', (tx, at) => {
-      const person = this.people.byEmail(email, tx);
-      const known = person?.active === true && hasJoined(person);
-      if (known) this.send(tx, at, person);
-      // Not what was typed: people type their password into the wrong field, and the journal keeps everything.
-      return {
-        subject: known ? `people/${person.id}` : 'password-resets',
-        detail: { address },
-        result: undefined,
-      };
+    setImmediate(() => {
+      this.follow(email, address);
     });
   }
 
@@ -65,8 +60,30 @@ export class PasswordResetsService {
     });
   }
 
-  private send(tx: Tx, at: string, { id, name, email }: Person): void {
-    const token = this.links.make(tx, at, 'password-reset', id);
+  private follow(email: string, address: string): void {
+    try {
+      this.record(email, address);
+    } catch (error) {
+      this.logger.error(error instanceof Error ? (error.stack ?? error.message) : String(error));
+    }
+  }
+
+  private record(email: string, address: string): void {
+    this.writer.write(ANONYMOUS_ACTOR, 'password-reset.asked', (tx, at) => {
+      const person = this.people.byEmail(email, tx);
+      const known = person?.active === true && hasJoined(person);
+      const token = this.links.make(tx, at, 'password-reset', known ? person.id : null);
+      if (known) this.send(tx, at, person, token);
+      // Not what was typed: people type their password into the wrong field, and the journal keeps everything.
+      return {
+        subject: known ? `people/${person.id}` : 'password-resets',
+        detail: { address },
+        result: undefined,
+      };
+    });
+  }
+
+  private send(tx: Tx, at: string, { name, email }: Person, token: string): void {
     const link = officeAddress(this.config, `/password-reset/${token}`);
     const { officeName } = this.settings.current(tx);
     this.mail.post(tx, at, { to: email, ...passwordResetLetter({ officeName, name, link }) });

@@ -7,7 +7,7 @@ export const oneTimeLink = sqliteTable(
   {
     tokenHash: text('token_hash').primaryKey(),
     purpose: text('purpose', { enum: ['first-administrator', 'invitation', 'password-reset'] }).notNull(),
-    /** Whom it lets in; null for the first administrator, who is nobody yet. */
+    /** Whom it lets in; null for the first administrator, who is nobody yet, and where nobody was found to let in. */
     personId: text('person_id').references(() => person.id),
     madeAt: text('made_at').notNull(),
     expiresAt: text('expires_at').notNull(),
