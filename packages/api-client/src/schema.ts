@@ -481,6 +481,23 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/correlations/{slug}/differences": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** What changed between two revisions, field by field */
+        get: operations["compareRevisions"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/correlations": {
         parameters: {
             query?: never;
@@ -568,6 +585,40 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/correlations/{slug}/revisions/{number}/iterations": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Says that a revision in review is ready again, after changes or answers */
+        post: operations["putRevisionForward"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/correlations/{slug}/revisions/{number}/assignments": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Takes a review from the desk */
+        post: operations["takeReview"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/correlations/{slug}/revisions/{number}/reviews": {
         parameters: {
             query?: never;
@@ -585,23 +636,6 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
-    "/api/correlations/{slug}/revisions/{number}/comments": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get?: never;
-        put?: never;
-        /** A remark on one field, or on the whole */
-        post: operations["commentOnRevision"];
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
-    };
     "/api/correlations/{slug}/revisions/{number}/approval": {
         parameters: {
             query?: never;
@@ -613,6 +647,23 @@ export interface paths {
         put?: never;
         /** An authority's signature on the present content, with the password once more */
         post: operations["approveRevision"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/correlations/{slug}/revisions/{number}/decline": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** An authority's no to a revision in review */
+        post: operations["declineRevision"];
         delete?: never;
         options?: never;
         head?: never;
@@ -664,6 +715,109 @@ export interface paths {
         put?: never;
         /** Takes a revision out of use for good */
         post: operations["withdrawRevision"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/correlations/{slug}/revisions/{number}/comments": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** A remark on one field, or on the whole */
+        post: operations["commentOnRevision"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/correlations/{slug}/revisions/{number}/comments/{id}/answers": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** What is to be said to a comment */
+        post: operations["answerComment"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/correlations/{slug}/revisions/{number}/comments/{id}/resolution": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Settles a comment: by whoever made it, or by the originator once it has an answer */
+        post: operations["resolveComment"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/correlations/{slug}/revisions/{number}/review": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** The review of a revision: report, reviewers, verdicts, comments, iterations */
+        get: operations["getReview"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/correlations/{slug}/problem-reports": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** What was found wrong with a correlation */
+        get: operations["listProblemReports"];
+        put?: never;
+        /** Reports a problem with a revision */
+        post: operations["fileProblemReport"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/problem-reports/{id}/answer": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Says what was found, and closes the report */
+        post: operations["answerProblemReport"];
         delete?: never;
         options?: never;
         head?: never;
@@ -773,6 +927,23 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/desk": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** What waits for the caller, by role */
+        get: operations["getDesk"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/correlations/{slug}/evaluations": {
         parameters: {
             query?: never;
@@ -866,7 +1037,7 @@ export interface components {
             at: string;
             actor: components["schemas"]["JournalActor"];
             /** @enum {string} */
-            act: "office.founded" | "office.first-link" | "settings.changed" | "person.added" | "person.invited" | "person.joined" | "person.changed" | "person.deactivated" | "person.reactivated" | "password.changed" | "password-reset.asked" | "password-reset.done" | "session.closed" | "appointment.proposed" | "appointment.confirmed" | "appointment.ended" | "appointment.lapsed" | "notice.read" | "notices.chosen" | "session.started" | "session.refused" | "session.ended" | "correlation.drafted" | "revision.drafted" | "revision.submitted" | "revision.taken-back" | "revision.taken-over" | "revision.commented" | "revision.reviewed" | "revision.approved" | "revision.superseded" | "revision.declined" | "revision.suspended" | "revision.reinstated" | "revision.withdrawn" | "evaluation.deviated" | "property-equation.drafted" | "attachment.added" | "attachment.relicensed" | "geometries.added";
+            act: "office.founded" | "office.first-link" | "settings.changed" | "person.added" | "person.invited" | "person.joined" | "person.changed" | "person.deactivated" | "person.reactivated" | "password.changed" | "password-reset.asked" | "password-reset.done" | "session.closed" | "appointment.proposed" | "appointment.confirmed" | "appointment.ended" | "appointment.lapsed" | "notice.read" | "notices.chosen" | "session.started" | "session.refused" | "session.ended" | "correlation.drafted" | "revision.drafted" | "revision.submitted" | "revision.taken-back" | "revision.edited" | "revision.put-forward" | "revision.review-due" | "review.taken" | "comment.answered" | "comment.resolved" | "revision.taken-over" | "revision.commented" | "revision.reviewed" | "revision.approved" | "revision.superseded" | "revision.declined" | "revision.suspended" | "revision.reinstated" | "revision.withdrawn" | "problem-report.filed" | "problem-report.answered" | "register.imported" | "evaluation.deviated" | "property-equation.drafted" | "attachment.added" | "attachment.relicensed" | "geometries.added";
             /** @description Path of what was acted on */
             subject: string;
             detail: {
@@ -951,7 +1122,7 @@ export interface components {
         SessionResponse: {
             person: components["schemas"]["SignedInPerson"];
             /** @description What the roles allow, without regard to an object */
-            permissions: ("register.read" | "register.read-unapproved" | "correlation.evaluate" | "evaluation.read-all" | "correlation.draft" | "correlation.submit" | "correlation.comment" | "attachment.add" | "correlation.review" | "correlation.approve" | "correlation.suspend" | "correlation.withdraw" | "people.list" | "people.manage" | "appointment.read" | "appointment.propose" | "appointment.end" | "settings.read" | "settings.change" | "journal.read" | "journal.verify" | "mail.read")[];
+            permissions: ("register.read" | "register.read-unapproved" | "correlation.evaluate" | "evaluation.read-all" | "correlation.draft" | "correlation.submit" | "correlation.comment" | "attachment.add" | "correlation.review" | "correlation.approve" | "correlation.suspend" | "correlation.withdraw" | "problem-report.file" | "problem-report.answer" | "register.export" | "register.import" | "people.list" | "people.manage" | "appointment.read" | "appointment.propose" | "appointment.end" | "settings.read" | "settings.change" | "journal.read" | "journal.verify" | "mail.read")[];
         };
         DemoPerson: {
             name: string;
@@ -1256,6 +1427,33 @@ export interface components {
             standingNote: string | null;
             caution: string;
         };
+        ComparedRevision: {
+            revision: number;
+            hash: string;
+        };
+        DifferenceDto: {
+            /** @description Path with names for places: `bounds[Re].stretches[0].hi.value` */
+            path: string;
+            /** @description Top-level field that it belongs to */
+            section: string;
+            /** @enum {string} */
+            change: "added" | "removed" | "changed";
+            /** @description Null where there was nothing */
+            before: ({
+                [key: string]: unknown;
+            } | unknown[] | string | number | boolean) | null;
+            /** @description Null where there is nothing any more */
+            after: ({
+                [key: string]: unknown;
+            } | unknown[] | string | number | boolean) | null;
+        };
+        DifferencesResponse: {
+            from: components["schemas"]["ComparedRevision"];
+            to: components["schemas"]["ComparedRevision"];
+            differences: components["schemas"]["DifferenceDto"][];
+            before: components["schemas"]["CorrelationDefinition"];
+            after: components["schemas"]["CorrelationDefinition"];
+        };
         BoundEndDto: {
             value: number;
             /** @enum {string} */
@@ -1356,6 +1554,7 @@ export interface components {
             current: boolean;
         };
         SheetComment: {
+            id: number;
             /** @description Path in the definition; empty for the whole */
             field: string;
             text: string;
@@ -1390,9 +1589,36 @@ export interface components {
             comment: boolean;
             review: boolean;
             approve: boolean;
+            decline: boolean;
             suspend: boolean;
             reinstate: boolean;
             withdraw: boolean;
+        };
+        SheetSuccessor: {
+            slug: string;
+            revision: number;
+            title: string;
+        };
+        SheetWithdrawal: {
+            reason: string;
+            /** @enum {string} */
+            class: "error-in-sheet" | "error-in-source" | "unsafe";
+            by: components["schemas"]["NamedPerson"];
+            /** Format: date-time */
+            at: string;
+        };
+        SheetSuspension: {
+            reason: string;
+            by: components["schemas"]["NamedPerson"];
+            /** Format: date-time */
+            at: string;
+            /** @description The problem report that is being looked into */
+            problemReport: number | null;
+        };
+        InspectionSummary: {
+            passed: boolean;
+            warnings: number;
+            errors: number;
         };
         Sheet: {
             slug: string;
@@ -1421,6 +1647,26 @@ export interface components {
             equations: components["schemas"]["SheetEquation"][];
             /** @description What the caller may do with this revision now */
             abilities: components["schemas"]["SheetAbilities"];
+            /**
+             * Format: date-time
+             * @description From when on its approval holds
+             */
+            effectiveFrom: string | null;
+            /**
+             * Format: date-time
+             * @description When it is to be looked at again
+             */
+            reviewDue: string | null;
+            /** @description Approved, and neither before its effective date nor superseded */
+            inForce: boolean;
+            /** @description What to turn to instead */
+            successor: components["schemas"]["SheetSuccessor"] | null;
+            withdrawal: components["schemas"]["SheetWithdrawal"] | null;
+            suspension: components["schemas"]["SheetSuspension"] | null;
+            /** @description Problem reports on this revision that nobody answered yet */
+            openReports: number;
+            /** @description Of the last machine check */
+            inspection: components["schemas"]["InspectionSummary"] | null;
             caution: string;
         };
         DefinitionBody: {
@@ -1432,6 +1678,11 @@ export interface components {
             /** @description What the reviewers should know */
             note?: string;
         };
+        NoteBody: {
+            /** @description What was done about it */
+            note?: string;
+        };
+        NothingBody: Record<string, never>;
         ChecklistDto: {
             /** @description The expression is that of the source */
             expression: boolean;
@@ -1453,11 +1704,6 @@ export interface components {
             /** @description Needed where the verdict is not to recommend */
             note?: string;
         };
-        CommentBody: {
-            /** @description Path in the definition, such as `bounds[0]`; empty: the whole */
-            field: string;
-            text: string;
-        };
         ApprovalBody: {
             /**
              * Format: password
@@ -1469,14 +1715,214 @@ export interface components {
             /** @description Hash of the content that is signed */
             hash: string;
             note?: string;
+            /**
+             * @description From when on it holds: a day (from midnight UTC) or a moment; at once without it
+             * @example 2027-01-31
+             */
+            effectiveFrom?: string;
+            /**
+             * @description When it is to be looked at again; after the office's number of months without it
+             * @example 2030-01-31
+             */
+            reviewDue?: string;
         };
         ReasonBody: {
             reason: string;
+        };
+        SuspensionBody: {
+            reason: string;
+            /** @description The open problem report that is being looked into */
+            problemReport?: number;
         };
         WithdrawalBody: {
             reason: string;
             /** @enum {string} */
             class: "error-in-sheet" | "error-in-source" | "unsafe";
+            /** @description Slug of the correlation to turn to */
+            successor?: string;
+        };
+        CommentBody: {
+            /** @description Path in the definition, such as `bounds[0]`; empty: the whole */
+            field: string;
+            text: string;
+        };
+        TextBody: {
+            text: string;
+        };
+        RemarkDto: {
+            /** @enum {string} */
+            verdict: "passed" | "warning" | "error";
+            /** @enum {string} */
+            topic: "definition" | "checks" | "range" | "seams" | "bounds" | "sources";
+            /** @description Path in the definition; empty for the whole */
+            field: string;
+            message: string;
+        };
+        InspectionReportDto: {
+            passed: boolean;
+            remarks: components["schemas"]["RemarkDto"][];
+            checks: components["schemas"]["CheckReportDto"][];
+        };
+        ReviewAssignmentItem: {
+            reviewer: components["schemas"]["NamedPerson"];
+            /**
+             * @description Asked on submission, or came by themselves
+             * @enum {string}
+             */
+            how: "named" | "taken";
+            /** Format: date-time */
+            at: string;
+        };
+        ReviewVerdict: {
+            reviewer: components["schemas"]["NamedPerson"];
+            /** @enum {string} */
+            verdict: "recommend" | "ask-for-changes" | "decline";
+            checklist: components["schemas"]["ChecklistDto"];
+            note: string | null;
+            /** Format: date-time */
+            at: string;
+            iteration: number;
+            hash: string;
+            /** @description Whether it speaks of the present iteration; else it is void */
+            current: boolean;
+        };
+        CommentResolution: {
+            by: components["schemas"]["NamedPerson"];
+            /** Format: date-time */
+            at: string;
+        };
+        CommentAnswer: {
+            id: number;
+            text: string;
+            by: components["schemas"]["NamedPerson"];
+            /** Format: date-time */
+            at: string;
+        };
+        CommentAbilities: {
+            answer: boolean;
+            resolve: boolean;
+        };
+        ReviewComment: {
+            id: number;
+            /** @description Path in the definition; empty for the whole */
+            field: string;
+            text: string;
+            by: components["schemas"]["NamedPerson"];
+            /** Format: date-time */
+            at: string;
+            /** @description The iteration it was made on */
+            iteration: number;
+            resolved: components["schemas"]["CommentResolution"] | null;
+            answers: components["schemas"]["CommentAnswer"][];
+            abilities: components["schemas"]["CommentAbilities"];
+        };
+        ReviewRound: {
+            round: number;
+            iteration: number;
+            /** Format: date-time */
+            at: string;
+            note: string | null;
+            by: components["schemas"]["NamedPerson"];
+        };
+        ReviewIteration: {
+            number: number;
+            /** Format: date-time */
+            at: string;
+            hash: string;
+            /** @description To the one before in this list */
+            differences: components["schemas"]["DifferenceDto"][];
+        };
+        ReviewAbilities: {
+            take: boolean;
+            comment: boolean;
+            /** @description At least one of the comments */
+            resolve: boolean;
+            verdict: boolean;
+            /** @description Say that it is ready again */
+            putForward: boolean;
+            approve: boolean;
+            decline: boolean;
+            edit: boolean;
+            suspend: boolean;
+            reinstate: boolean;
+            withdraw: boolean;
+        };
+        ReviewCount: {
+            /** @description Favourable reviews of the present iteration */
+            favourable: number;
+            needed: number;
+        };
+        ReviewPage: {
+            slug: string;
+            title: string;
+            revision: number;
+            iteration: number;
+            hash: string;
+            /** @enum {string} */
+            standing: "draft" | "in review" | "approved" | "suspended" | "superseded" | "withdrawn" | "declined";
+            originator: components["schemas"]["NamedPerson"];
+            /**
+             * @description Whose turn it is
+             * @enum {string}
+             */
+            hands: "originator" | "reviewers";
+            definition: components["schemas"]["CorrelationDefinition"];
+            /** @description What the machine found when it was last put forward */
+            inspection: components["schemas"]["InspectionReportDto"] | null;
+            /** @description Favourable reviews that an approval rests on, by the office's settings */
+            reviewersNeeded: number;
+            assignments: components["schemas"]["ReviewAssignmentItem"][];
+            /** @description Current and void ones, in the order given */
+            verdicts: components["schemas"]["ReviewVerdict"][];
+            comments: components["schemas"]["ReviewComment"][];
+            /** @description Each time it was put forward */
+            rounds: components["schemas"]["ReviewRound"][];
+            /** @description What reviewers had before them, and the present content */
+            iterations: components["schemas"]["ReviewIteration"][];
+            abilities: components["schemas"]["ReviewAbilities"];
+            approvals: components["schemas"]["ReviewCount"];
+        };
+        ProblemReportAnswer: {
+            /** @enum {string} */
+            outcome: "no-fault" | "suspended" | "corrected";
+            text: string;
+            by: components["schemas"]["NamedPerson"];
+            /** Format: date-time */
+            at: string;
+        };
+        ProblemReportAbilities: {
+            answer: boolean;
+        };
+        ProblemReport: {
+            id: number;
+            slug: string;
+            revision: number;
+            /** @description The content it speaks of */
+            hash: string;
+            /** @enum {string} */
+            severity: "question" | "error" | "unsafe";
+            text: string;
+            by: components["schemas"]["NamedPerson"];
+            /** Format: date-time */
+            at: string;
+            /** @description Null while it is open */
+            answer: components["schemas"]["ProblemReportAnswer"] | null;
+            abilities: components["schemas"]["ProblemReportAbilities"];
+        };
+        ProblemReportsResponse: {
+            items: components["schemas"]["ProblemReport"][];
+        };
+        ProblemReportBody: {
+            /** @description Number of the revision it is about */
+            revision: number;
+            text: string;
+            /** @enum {string} */
+            severity: "question" | "error" | "unsafe";
+        };
+        ProblemReportAnswerBody: {
+            text: string;
+            /** @enum {string} */
+            outcome: "no-fault" | "suspended" | "corrected";
         };
         AttachmentItem: {
             id: string;
@@ -1615,6 +2061,29 @@ export interface components {
             duplicates: components["schemas"]["ReadingDuplicate"][];
             /** @description Sheets that cite an item already */
             alreadyCitedBy: components["schemas"]["ReadingCitedBy"][];
+        };
+        DeskItem: {
+            title: string;
+            /** @description What waits, in a line */
+            line: string;
+            /** @description A path of the screens */
+            href: string;
+            /**
+             * Format: date-time
+             * @description Since when; of what is due, when
+             */
+            at: string;
+        };
+        DeskSection: {
+            /** @enum {string} */
+            key: "drafts" | "to-review" | "open-comments" | "to-take" | "to-approve" | "reports" | "due" | "appointments" | "notices";
+            title: string;
+            /** @description What to say when nothing waits */
+            empty: string;
+            items: components["schemas"]["DeskItem"][];
+        };
+        Desk: {
+            sections: components["schemas"]["DeskSection"][];
         };
         DeviationDto: {
             /** @description Symbol of the finding it answers */
@@ -1872,6 +2341,8 @@ export interface components {
                 [key: string]: unknown;
             }[];
             alternatives?: components["schemas"]["AlternativeResponse"][];
+            /** @description Of a submission that the machine stopped */
+            inspection?: components["schemas"]["InspectionReportDto"];
         };
         CorrelationDefinition: {
             /** @enum {string} */
@@ -3781,6 +4252,60 @@ export interface operations {
             };
         };
     };
+    compareRevisions: {
+        parameters: {
+            query: {
+                from: number;
+                to: number;
+            };
+            header?: never;
+            path: {
+                slug: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["DifferencesResponse"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission register.read */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description There is none of this name and number that the caller may see */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
     listCorrelations: {
         parameters: {
             query?: {
@@ -4163,8 +4688,143 @@ export interface operations {
                 };
                 content?: never;
             };
-            /** @description The sheet does not reproduce its own worked checks */
+            /** @description The machine found errors: named in `fields`, whole in `inspection` */
             422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    putRevisionForward: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                slug: string;
+                number: number;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["NoteBody"];
+            };
+        };
+        responses: {
+            /** @description The sheet as it stands now */
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["Sheet"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission correlation.submit */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description There is no such revision that the caller may see */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description The revision's standing or content does not allow it */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description The machine found errors */
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    takeReview: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                slug: string;
+                number: number;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["NothingBody"];
+            };
+        };
+        responses: {
+            /** @description The sheet as it stands now */
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["Sheet"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission correlation.review */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description There is no such revision that the caller may see */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description The revision's standing or content does not allow it */
+            409: {
                 headers: {
                     [name: string]: unknown;
                 };
@@ -4217,70 +4877,6 @@ export interface operations {
                 content?: never;
             };
             /** @description Needs the permission correlation.review */
-            403: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content?: never;
-            };
-            /** @description There is no such revision that the caller may see */
-            404: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content?: never;
-            };
-            /** @description The revision's standing or content does not allow it */
-            409: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content?: never;
-            };
-            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemResponse"];
-                };
-            };
-        };
-    };
-    commentOnRevision: {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                slug: string;
-                number: number;
-            };
-            cookie?: never;
-        };
-        requestBody: {
-            content: {
-                "application/json": components["schemas"]["CommentBody"];
-            };
-        };
-        responses: {
-            /** @description The sheet as it stands now */
-            201: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["Sheet"];
-                };
-            };
-            /** @description Not signed in */
-            401: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content?: never;
-            };
-            /** @description Needs the permission correlation.comment */
             403: {
                 headers: {
                     [name: string]: unknown;
@@ -4376,7 +4972,7 @@ export interface operations {
             };
         };
     };
-    suspendRevision: {
+    declineRevision: {
         parameters: {
             query?: never;
             header?: never;
@@ -4389,6 +4985,70 @@ export interface operations {
         requestBody: {
             content: {
                 "application/json": components["schemas"]["ReasonBody"];
+            };
+        };
+        responses: {
+            /** @description The sheet as it stands now */
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["Sheet"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission correlation.approve */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description There is no such revision that the caller may see */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description The revision's standing or content does not allow it */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    suspendRevision: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                slug: string;
+                number: number;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["SuspensionBody"];
             };
         };
         responses: {
@@ -4551,6 +5211,420 @@ export interface operations {
                 content?: never;
             };
             /** @description The revision's standing or content does not allow it */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    commentOnRevision: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                slug: string;
+                number: number;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["CommentBody"];
+            };
+        };
+        responses: {
+            /** @description The sheet as it stands now */
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["Sheet"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission correlation.comment */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description There is no such revision that the caller may see */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description The revision's standing or content does not allow it */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    answerComment: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                slug: string;
+                number: number;
+                id: number;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["TextBody"];
+            };
+        };
+        responses: {
+            /** @description The sheet as it stands now */
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["Sheet"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission correlation.comment */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description There is no such revision that the caller may see */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description The revision's standing or content does not allow it */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    resolveComment: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                slug: string;
+                number: number;
+                id: number;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["NothingBody"];
+            };
+        };
+        responses: {
+            /** @description The sheet as it stands now */
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["Sheet"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission correlation.comment */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description There is no such revision that the caller may see */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description The revision's standing or content does not allow it */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    getReview: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                slug: string;
+                number: number;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ReviewPage"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission register.read */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description There is no such revision that the caller may see */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    listProblemReports: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                slug: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemReportsResponse"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission register.read */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description There is none of this name that the caller may see */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    fileProblemReport: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                slug: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ProblemReportBody"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemReport"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission problem-report.file */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description There is no such revision that the caller may see */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description The revision was never approved: it takes comments instead */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    answerProblemReport: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: number;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ProblemReportAnswerBody"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ProblemReport"];
+                };
+            };
+            /** @description Not signed in */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Needs the permission problem-report.answer */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description It was answered already */
             409: {
                 headers: {
                     [name: string]: unknown;
@@ -4959,6 +6033,34 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemResponse"];
+                };
+            };
+        };
+    };
+    getDesk: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["Desk"];
+                };
             };
             /** @description Refused: a problem (RFC 9457) with its code, and the fields or findings concerned */
             default: {
