@@ -9,6 +9,14 @@ import { RouteError } from './routes/route-error';
 const signedInRoutes: RouteObject[] = [
   { path: '/', element: <Navigate to={paths.start} replace /> },
   { path: '/register', lazy: async () => ({ Component: (await import('./routes/register')).RegisterRoute }) },
+  {
+    path: '/register/new',
+    lazy: async () => ({ Component: (await import('./routes/draft-new')).DraftNewRoute }),
+  },
+  {
+    path: '/register/:slug/revise',
+    lazy: async () => ({ Component: (await import('./routes/draft-revise')).DraftReviseRoute }),
+  },
   { path: '/register/:slug', lazy: async () => ({ Component: (await import('./routes/sheet')).SheetRoute }) },
   {
     path: '/register/:slug/revisions/:n',

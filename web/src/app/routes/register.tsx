@@ -1,5 +1,6 @@
 import { useCallback } from 'react';
 import { Link, useSearchParams } from 'react-router-dom';
+import { SubmitLink } from '../../features/draft/components/draft-links';
 import { RegisterView } from '../../features/register/components/register-view';
 import {
   readFilters,
@@ -23,6 +24,7 @@ export function RegisterRoute() {
       subtitle="The published correlations of this office, and where each one holds."
       margin={<RegisterNotes />}
     >
+      <SubmitLink />
       <RegisterView filters={readFilters(search)} onChange={change} />
     </SheetPage>
   );

@@ -1,5 +1,6 @@
 import { useMemo } from 'react';
 import { Link, useParams } from 'react-router-dom';
+import { DraftLinks } from '../../features/draft/components/draft-links';
 import { DutyPanel } from '../../features/evaluation/components/duty-panel';
 import { OutcomePanel } from '../../features/evaluation/components/outcome-panel';
 import { useEvaluation } from '../../features/evaluation/hooks/use-evaluation';
@@ -66,6 +67,7 @@ function EvaluatedSheet({ sheet, personId }: { sheet: Sheet; personId: string })
     <SheetArticle
       sheet={sheet}
       live={evaluation.readings}
+      links={<DraftLinks slug={sheet.slug} />}
       duty={<DutyPanel evaluation={evaluation} notInUse={notInUse} />}
       outcome={(firstNumber) => (
         <OutcomePanel evaluation={evaluation} firstNumber={firstNumber} notInUse={notInUse} />

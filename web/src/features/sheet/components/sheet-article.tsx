@@ -20,6 +20,8 @@ import './sheet-article.css';
 interface SheetArticleProps {
   sheet: Sheet;
   live: LiveReadings;
+  /** Ways on from the sheet as a whole. */
+  links?: ReactNode;
   /** The form for a duty. */
   duty: ReactNode;
   /** What the duty comes to; told the number of its first equation. */
@@ -27,7 +29,7 @@ interface SheetArticleProps {
 }
 
 /** A sheet as a handbook page: equation, where it holds, the duty and its result, then everything behind it. */
-export function SheetArticle({ sheet, live, duty, outcome }: SheetArticleProps) {
+export function SheetArticle({ sheet, live, links, duty, outcome }: SheetArticleProps) {
   const { definition } = sheet;
   const tex = useMemo(() => {
     const compilation = compileCorrelation(definition);
@@ -49,6 +51,7 @@ export function SheetArticle({ sheet, live, duty, outcome }: SheetArticleProps) 
       }
     >
       <StandingNotice sheet={sheet} />
+      {links}
       <EquationsSection sheet={sheet} tex={tex} />
       <BoundsSection sheet={sheet} live={live} />
       <section aria-labelledby="your-duty">
