@@ -3,7 +3,8 @@ import { describe, expect, test } from 'vitest';
 import { CONSTANTS, isConstant } from './constants.js';
 import { QUANTITIES, serves } from './dictionary.js';
 import { sameDimension } from './dimension.js';
-import { readUnit } from './unit.js';
+import { measuresSame, readUnit } from './unit.js';
+import { unitsFor, usualUnitFor } from './unit-choices.js';
 
 /** The parts of the dictionary, one a file. */
 async function parts(): Promise<Record<string, unknown>[]> {
@@ -38,6 +39,36 @@ describe('the quantity dictionary', () => {
       }
     },
   );
+
+  const withUsual = Object.entries(QUANTITIES).filter(([, entry]) => entry.usual !== undefined);
+  test.each(withUsual)(
+    'the usual unit of %s measures the same and is among those offered',
+    (_name, entry) => {
+      const [own, usual] = [readUnit(entry.unit), readUnit(entry.usual ?? '?')];
+      expect(own.ok && usual.ok && measuresSame(own.unit, usual.unit)).toBe(true);
+      expect(unitsFor(entry.unit, entry)).toContain(entry.usual);
+      expect(usualUnitFor(entry.unit, entry)).toBe(entry.usual);
+    },
+  );
+
+  // Common practice, no source: what data sheets and gauges show.
+  test.each([
+    ['gas-temperature', 'K', 'degC'],
+    ['total-pressure', 'atm', 'kPa'],
+    ['tube-inside-diameter', 'm', 'mm'],
+    ['liquid-viscosity', 'Pa s', 'mPa s'],
+    ['liquid-density', 'g/cm^3', 'kg/m^3'],
+    ['superficial-gas-velocity', 'm/s', 'm/s'],
+    ['corrugation-angle', 'deg', 'deg'],
+  ])('%s on a sheet in %s is asked for in %s', (name, own, asked) => {
+    expect(usualUnitFor(own, QUANTITIES[name])).toBe(asked);
+  });
+
+  test('per cent is offered for parts of a whole, not for counts and constants', () => {
+    expect(unitsFor('1', QUANTITIES['relative-humidity'])).toEqual(['1', '%']);
+    expect(unitsFor('1', QUANTITIES['fibre-count'])).toEqual(['1']);
+    expect(unitsFor('kg/(m s)', QUANTITIES['film-rate-per-width'])).not.toContain('mPa s');
+  });
 
   test('an inherited name is no entry', () => {
     expect(QUANTITIES['constructor']).toBeUndefined();

@@ -9,6 +9,7 @@ export const OFFERED = [
   'mm',
   'cm',
   'um',
+  'nm',
   'in',
   'ft',
   'm^2',
@@ -51,7 +52,6 @@ export const OFFERED = [
   'm^2/s',
   'cm^2/s',
   'mm^2/s',
-  'cSt',
   'ft^2/h',
   'N/m',
   'mN/m',
@@ -103,23 +103,37 @@ export const OFFERED = [
   'm^3/mol',
   'cm^3/mol',
   'J/(mol K)',
+  'J/kg',
+  'kJ/kg',
 ] as const;
 
+/** What a picker has to know of a quantity beside its dimension. */
+interface UnitKind {
+  difference?: boolean;
+  absolutePressure?: boolean;
+  fraction?: boolean;
+  offered?: readonly string[];
+}
+
 /** Units that a value in `unit` can be put in, the sheet's own first. */
-export function unitsFor(
-  unit: string,
-  kind: { difference?: boolean; absolutePressure?: boolean } = {},
-): string[] {
+export function unitsFor(unit: string, kind: UnitKind = {}): string[] {
   const own = readUnit(unit);
   if (!own.ok) return [unit];
-  const fits = OFFERED.filter((offered) => {
+  const fits = (kind.offered ?? OFFERED).filter((offered) => {
     const reading = readUnit(offered);
     if (!reading.ok || !sameDimension(reading.unit.dimension, own.unit.dimension)) return false;
+    if (offered === '%') return kind.fraction === true;
     // Angular speed and frequency share a dimension and differ by 2π: neither is offered for the other.
     if (reading.unit.offset === 0) return reading.unit.angular === own.unit.angular;
     return offered.includes('(g)') ? kind.absolutePressure === true : kind.difference !== true;
   });
   return [unit, ...fits.filter((offered) => offered !== unit)];
+}
+
+/** The unit a form starts with for a quantity of a sheet: the usual one of its kind, else the sheet's own. */
+export function usualUnitFor(unit: string, kind: UnitKind & { usual?: string } = {}): string {
+  const { usual } = kind;
+  return usual !== undefined && unitsFor(unit, kind).includes(usual) ? usual : unit;
 }
 
 /** Converts a number between two units of one dimension; null where they do not fit. */

@@ -75,6 +75,24 @@ export function accuracyText(accuracy: Definition['accuracy']): string {
   return `${figure}${text}`;
 }
 
+/** The accuracy as it stands beside a result: where there is a figure, with what it does not cover. */
+export function accuracyOfResult(accuracy: Definition['accuracy']): string {
+  const text = accuracyText(accuracy);
+  return accuracy === null || accuracy.valuePercent === null
+    ? text
+    : `${text} This is about the published equation; how well the values put in are known comes on top.`;
+}
+
+/** What the result of a part is, by its kind. */
+export const RESULT_WORDS: Readonly<Record<Definition['parts'][number]['result']['kind'], string>> = {
+  Sherwood: 'Sherwood number',
+  Stanton: 'Stanton number of mass transfer',
+  'j-factor': 'j-factor of mass transfer',
+  coefficient: 'coefficient as the source gives it',
+  'volumetric-coefficient': 'volumetric coefficient as the source gives it',
+  'interfacial-area': 'interfacial area per volume',
+};
+
 /** Nature and basis of a bound in words: `where the data end, stated in the source`. */
 export function boundWords({ stretches, basis }: Bound): string {
   const ends = stretches.flatMap(({ lo, hi }) => [

@@ -5,6 +5,7 @@ export const dispersions: DictionaryPart = {
   'power-per-volume': {
     title: 'Power drawn per volume of liquid',
     unit: 'W/m^3',
+    usual: 'W/m^3',
     symbol: 'P_V',
     sign: 'positive',
     hint: 'Gassed power where gas is sparged; it is lower than the ungassed.',
@@ -20,6 +21,7 @@ export const dispersions: DictionaryPart = {
   'impeller-speed': {
     title: 'Impeller speed',
     unit: '1/s',
+    usual: '1/min',
     symbol: 'N',
     sign: 'positive',
     hint: 'Revolutions per time, not radians.',
@@ -29,6 +31,7 @@ export const dispersions: DictionaryPart = {
   'gas-hold-up': {
     title: 'Gas hold-up as a fraction of the dispersion',
     unit: '1',
+    fraction: true,
     symbol: 'eps_G',
     sign: 'positive',
   },
@@ -42,6 +45,7 @@ export const dispersions: DictionaryPart = {
   'ionic-strength': {
     title: 'Ionic strength of the liquid',
     unit: 'mol/m^3',
+    usual: 'mol/l',
     symbol: 'I',
     sign: 'non-negative',
     hint: '0 for a liquid without electrolyte.',

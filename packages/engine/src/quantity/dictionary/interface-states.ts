@@ -5,12 +5,15 @@ export const interfaceStates: DictionaryPart = {
   'interface-temperature': {
     title: 'Temperature of the phase boundary',
     unit: 'K',
+    usual: 'degC',
     symbol: 'T_i',
     sign: 'positive',
   },
   'relative-humidity': {
     title: 'Relative humidity',
     unit: '1',
+    usual: '%',
+    fraction: true,
     symbol: 'phi',
     sign: 'non-negative',
     hint: 'As a fraction of saturation over liquid water.',

@@ -2,7 +2,13 @@ import type { DictionaryPart } from '../dictionary-entry.js';
 
 /** Lengths, areas and the shape of the apparatus. */
 export const lengths: DictionaryPart = {
-  'tube-inside-diameter': { title: 'Tube inside diameter', unit: 'm', symbol: 'd', sign: 'positive' },
+  'tube-inside-diameter': {
+    title: 'Tube inside diameter',
+    unit: 'm',
+    usual: 'mm',
+    symbol: 'd',
+    sign: 'positive',
+  },
   'tube-length': {
     title: 'Tube length',
     unit: 'm',
@@ -13,6 +19,7 @@ export const lengths: DictionaryPart = {
   'particle-diameter': {
     title: 'Particle diameter',
     unit: 'm',
+    usual: 'mm',
     symbol: 'd_p',
     sign: 'positive',
     covers: ['particle-diameter-equal-surface', 'particle-diameter-equal-volume'],
@@ -26,6 +33,7 @@ export const lengths: DictionaryPart = {
   'packing-nominal-size': {
     title: 'Nominal size of the packing',
     unit: 'm',
+    usual: 'mm',
     symbol: 'd_p',
     sign: 'positive',
     hint: 'The size on the label, not a sphere-equivalent diameter.',

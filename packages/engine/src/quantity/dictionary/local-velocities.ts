@@ -58,11 +58,12 @@ export const localVelocities: DictionaryPart = {
   'film-rate-per-width': {
     title: 'Liquid rate per wetted perimeter',
     unit: 'kg/(m s)',
+    offered: ['kg/(m s)', 'kg/(m h)', 'g/(cm s)'],
     symbol: 'Gamma',
     sign: 'positive',
     hint: 'Mass flow over the width of the film.',
   },
-  'angular-speed': { title: 'Angular speed', unit: 'rad/s', symbol: 'omega', sign: 'positive' },
+  'angular-speed': { title: 'Angular speed', unit: 'rad/s', usual: 'rpm', symbol: 'omega', sign: 'positive' },
   'peripheral-velocity': {
     title: 'Peripheral velocity of the rotor',
     unit: 'm/s',

@@ -13,6 +13,7 @@ export const movingDrops: DictionaryPart = {
   'dispersed-viscosity': {
     title: 'Viscosity of the drop liquid',
     unit: 'Pa s',
+    usual: 'mPa s',
     symbol: 'mu_d',
     sign: 'positive',
     hint: 'Dynamic viscosity.',
@@ -20,6 +21,7 @@ export const movingDrops: DictionaryPart = {
   'dispersed-hold-up': {
     title: 'Hold-up of the dispersed phase',
     unit: '1',
+    fraction: true,
     symbol: 'phi',
     sign: 'non-negative',
     hint: 'Volume of drops over the volume of both liquids.',
@@ -46,12 +48,14 @@ export const movingDrops: DictionaryPart = {
   'vapour-mass-fraction-surface': {
     title: 'Mass fraction of vapour at the surface',
     unit: '1',
+    fraction: true,
     symbol: 'Y_s',
     sign: 'positive',
   },
   'vapour-mass-fraction-far': {
     title: 'Mass fraction of vapour far from the surface',
     unit: '1',
+    fraction: true,
     symbol: 'Y_inf',
     sign: 'non-negative',
   },

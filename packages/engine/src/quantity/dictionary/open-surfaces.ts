@@ -21,6 +21,7 @@ export const openSurfaces: DictionaryPart = {
   'latent-heat': {
     title: 'Latent heat of vaporisation',
     unit: 'J/kg',
+    usual: 'kJ/kg',
     symbol: 'Y',
     sign: 'positive',
     hint: 'At the temperature of the surface.',

@@ -2,11 +2,18 @@ import type { DictionaryPart } from '../dictionary-entry.js';
 
 /** Fluid properties. */
 export const properties: DictionaryPart = {
-  'gas-density': { title: 'Gas density', unit: 'kg/m^3', symbol: 'rho', sign: 'positive' },
-  'liquid-density': { title: 'Liquid density', unit: 'kg/m^3', symbol: 'rho', sign: 'positive' },
+  'gas-density': { title: 'Gas density', unit: 'kg/m^3', usual: 'kg/m^3', symbol: 'rho', sign: 'positive' },
+  'liquid-density': {
+    title: 'Liquid density',
+    unit: 'kg/m^3',
+    usual: 'kg/m^3',
+    symbol: 'rho',
+    sign: 'positive',
+  },
   'fluid-density': {
     title: 'Fluid density',
     unit: 'kg/m^3',
+    usual: 'kg/m^3',
     symbol: 'rho',
     sign: 'positive',
     covers: ['gas-density', 'liquid-density'],
@@ -21,6 +28,7 @@ export const properties: DictionaryPart = {
   'liquid-viscosity': {
     title: 'Liquid viscosity',
     unit: 'Pa s',
+    usual: 'mPa s',
     symbol: 'mu',
     sign: 'positive',
     hint: 'Dynamic viscosity.',
@@ -28,6 +36,7 @@ export const properties: DictionaryPart = {
   'fluid-viscosity': {
     title: 'Fluid viscosity',
     unit: 'Pa s',
+    usual: 'mPa s',
     symbol: 'mu',
     sign: 'positive',
     hint: 'Dynamic viscosity.',
@@ -55,18 +64,21 @@ export const properties: DictionaryPart = {
   'surface-tension': {
     title: 'Surface tension of the liquid',
     unit: 'N/m',
+    usual: 'mN/m',
     symbol: 'sigma',
     sign: 'positive',
   },
   'critical-surface-tension': {
     title: 'Critical surface tension of the packing material',
     unit: 'N/m',
+    usual: 'mN/m',
     symbol: 'sigma_c',
     sign: 'positive',
   },
   'solvent-molar-mass': {
     title: 'Molar mass of the solvent',
     unit: 'kg/mol',
+    usual: 'g/mol',
     symbol: 'M_S',
     sign: 'positive',
     hint: 'Of the liquid that carries the species: 0.018 kg/mol for water.',

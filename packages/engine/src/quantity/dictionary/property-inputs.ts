@@ -5,6 +5,7 @@ export const propertyInputs: DictionaryPart = {
   'fluid-viscosity-at-wall': {
     title: 'Viscosity of the fluid at the wall',
     unit: 'Pa s',
+    usual: 'mPa s',
     symbol: 'mu_w',
     sign: 'positive',
     hint: 'Dynamic viscosity at wall temperature and composition.',
@@ -12,6 +13,7 @@ export const propertyInputs: DictionaryPart = {
   'density-difference': {
     title: 'Density difference that drives the motion',
     unit: 'kg/m^3',
+    usual: 'kg/m^3',
     symbol: 'delta_rho',
     sign: 'non-negative',
     hint: 'Between surface and bulk, or between the phases: without sign.',
@@ -31,24 +33,28 @@ export const propertyInputs: DictionaryPart = {
   'reference-liquid-viscosity': {
     title: 'Solvent viscosity at the temperature of the tabulated diffusivity',
     unit: 'Pa s',
+    usual: 'mPa s',
     symbol: 'mu_ref',
     sign: 'positive',
   },
   'reference-temperature': {
     title: 'Temperature of the tabulated value',
     unit: 'K',
+    usual: 'degC',
     symbol: 'T_ref',
     sign: 'positive',
   },
   'reference-pressure': {
     title: 'Pressure of the tabulated value',
     unit: 'Pa',
+    usual: 'kPa',
     symbol: 'P_ref',
     sign: 'positive',
   },
   'diffusion-volume-solute': {
     title: 'Diffusion volume of the transferred species',
     unit: 'm^3/mol',
+    usual: 'cm^3/mol',
     symbol: 'v_A',
     sign: 'positive',
     hint: 'The tabulated increment sum, not the molar volume.',
@@ -56,6 +62,7 @@ export const propertyInputs: DictionaryPart = {
   'diffusion-volume-carrier': {
     title: 'Diffusion volume of the carrier gas',
     unit: 'm^3/mol',
+    usual: 'cm^3/mol',
     symbol: 'v_B',
     sign: 'positive',
     hint: 'The tabulated increment sum, not the molar volume.',
@@ -63,12 +70,14 @@ export const propertyInputs: DictionaryPart = {
   'molar-mass-solute': {
     title: 'Molar mass of the transferred species',
     unit: 'kg/mol',
+    usual: 'g/mol',
     symbol: 'M_A',
     sign: 'positive',
   },
   'molar-mass-carrier': {
     title: 'Molar mass of the carrier gas',
     unit: 'kg/mol',
+    usual: 'g/mol',
     symbol: 'M_B',
     sign: 'positive',
   },
@@ -81,12 +90,14 @@ export const propertyInputs: DictionaryPart = {
   'solute-molar-volume': {
     title: 'Molar volume of the solute at its normal boiling point',
     unit: 'm^3/mol',
+    usual: 'cm^3/mol',
     symbol: 'V_A',
     sign: 'positive',
   },
   'hydrodynamic-radius': {
     title: 'Hydrodynamic radius of the solute',
     unit: 'm',
+    usual: 'nm',
     symbol: 'r',
     sign: 'positive',
   },

@@ -1,7 +1,7 @@
 import { Link } from 'react-router-dom';
 import type { OtherSheet } from '../../../shared/api/types';
 import { withQuery } from '../../../shared/api/with-query';
-import { useFocusWhenLost } from '../hooks/use-focus-when-lost';
+import { useFocusWhenLost } from '../../../shared/hooks/use-focus-when-lost';
 import { paths } from '../../../shared/paths';
 
 interface AlternativesProps {

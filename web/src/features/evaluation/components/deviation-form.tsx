@@ -2,7 +2,7 @@ import type { Finding } from '@merestone/engine';
 import { Button } from 'antd';
 import { useState } from 'react';
 import { ErrorSummary } from '../../../shared/ui/error-summary';
-import { useFocusWhenLost } from '../hooks/use-focus-when-lost';
+import { useFocusWhenLost } from '../../../shared/hooks/use-focus-when-lost';
 import type { EvaluationState } from '../hooks/use-evaluation';
 import { fieldId } from '../model/field-id';
 import { findingLabel } from '../model/finding-label';

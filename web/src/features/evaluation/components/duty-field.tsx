@@ -1,3 +1,5 @@
+import { inWords } from '../../../shared/format/in-words';
+import { lowerFirst } from '../../../shared/format/lower-first';
 import { InlineEquation } from '../../../shared/ui/equation';
 import { QuantityField } from '../../../shared/ui/quantity-field/quantity-field';
 import type { FormField, FormItem } from '../model/duty-form';
@@ -25,10 +27,11 @@ export function DutyField({ field, controls }: DutyFieldProps) {
           id={id}
           label={field.label}
           symbol={symbol}
-          typed={controls.duty.typed[key] ?? { text: '', unit: field.unit }}
+          typed={controls.duty.typed[key] ?? { text: '', unit: field.startUnit }}
           units={field.units}
           hint={field.hint}
           optional={field.optional}
+          needed={neededWords(field, controls)}
           error={controls.errorOf(key)}
           onChange={(typed) => controls.change({ do: 'type', key, typed })}
         />
@@ -43,6 +46,14 @@ export function DutyField({ field, controls }: DutyFieldProps) {
       ) : null}
     </div>
   );
+}
+
+/** What waits for this value, as long as it is not there. */
+function neededWords({ key, neededFor }: FormField, { duty }: DutyControls): string | undefined {
+  const empty = (duty.typed[key]?.text ?? '').trim() === '';
+  return empty && neededFor.length > 0
+    ? `Needed now, for ${inWords(neededFor.map((name) => lowerFirst(name)))}.`
+    : undefined;
 }
 
 /** Where the value comes from: typed in, or a published property equation. */

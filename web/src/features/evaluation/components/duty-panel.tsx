@@ -7,6 +7,7 @@ import { summaryLine } from '../model/field-error';
 import { fieldId } from '../model/field-id';
 import type { DutyControls } from './duty-controls';
 import { DutySection } from './duty-section';
+import { EquationOffer } from './equation-offer';
 import { ForceSection } from './force-section';
 import { ModeSwitch } from './mode-switch';
 import './duty-panel.css';
@@ -47,6 +48,7 @@ export function DutyPanel({ evaluation, notInUse }: DutyPanelProps) {
         }))}
       />
       <ModeSwitch definition={evaluation.sheet.definition} duty={duty} change={change} />
+      <EquationOffer evaluation={evaluation} />
       {sections.map((section) => (
         <DutySection key={section.key} section={section} controls={controls} />
       ))}

@@ -21,14 +21,14 @@ describe('the form', () => {
     expect(names).toEqual(['d', 'T', 'P', 'u', 'rho', 'mu', 'D', 'p_BM'].map((s) => `duty-${s}`));
     expect(screen.getByRole('combobox', { name: 'Unit of Tube inside diameter' })).toHaveProperty(
       'value',
-      'm',
+      'mm',
     );
   });
 
   it('offers to convert when the unit is changed under a number', async () => {
     const { user } = renderEvaluation();
     const unit = screen.getByRole('combobox', { name: 'Unit of Gas temperature' });
-    await user.selectOptions(unit, 'degC');
+    expect(unit).toHaveProperty('value', 'degC');
     await user.type(field('T'), '25');
     await user.selectOptions(unit, 'K');
     await user.click(press('Convert 25 °C to 298.15 K'));
@@ -40,8 +40,8 @@ describe('the form', () => {
   it('keeps the number when asked to', async () => {
     const { user } = renderEvaluation();
     await user.type(field('d'), '25');
-    await user.selectOptions(screen.getByRole('combobox', { name: 'Unit of Tube inside diameter' }), 'mm');
-    await user.click(press('Keep 25 mm'));
+    await user.selectOptions(screen.getByRole('combobox', { name: 'Unit of Tube inside diameter' }), 'in');
+    await user.click(press('Keep 25 in'));
     expect(field('d').value).toBe('25');
   });
 
@@ -95,9 +95,40 @@ describe('the form', () => {
     expect(
       screen.getByText(/Filled by “Dry air as an ideal gas”.*takes for granted: dry air, ideal gas/),
     ).toBeTruthy();
-    fillIn({ T: '288.15', P: '101325' });
+    fillIn({ T: '15', P: '101.325' });
     // U.S. Standard Atmosphere 1976: 1.2250 kg/m³
     await waitFor(() => expect(screen.getByText('1.225')).toBeTruthy());
+  });
+
+  it('says which fields a chosen property equation needs, until they are filled in', async () => {
+    const { user } = renderEvaluation();
+    const temperature = () => field('T').getAttribute('aria-describedby') ?? '';
+    expect(temperature()).not.toContain('needed');
+    await user.selectOptions(
+      screen.getByRole('combobox', { name: 'Gas density: taken from' }),
+      'ideal-gas-dry-air',
+    );
+    expect(screen.getAllByText('Needed now, for gas density.').length).toBe(2);
+    expect(temperature()).toContain('duty-T-needed');
+    fillIn({ T: '15' });
+    expect(screen.getAllByText('Needed now, for gas density.').length).toBe(1);
+  });
+
+  it('takes the first listed equation for each empty property at one press, and takes it back', async () => {
+    const { user } = renderEvaluation();
+    const source = () => screen.getByRole('combobox', { name: 'Gas density: taken from' });
+    expect(screen.getByText('Takes the first one listed for gas density.')).toBeTruthy();
+    await user.click(press('Use property equations where listed'));
+    expect(source()).toHaveProperty('value', 'ideal-gas-dry-air');
+    expect(screen.queryByRole('button', { name: /where listed/ })).toBeNull();
+    await user.click(press('Undo'));
+    expect(source()).toHaveProperty('value', '');
+  });
+
+  it('leaves a typed property alone when the listed equations are taken', () => {
+    renderEvaluation();
+    fillIn({ rho: '1.2' });
+    expect(screen.queryByRole('button', { name: /where listed/ })).toBeNull();
   });
 
   it('shows what a chosen packing gives and no longer asks for it', async () => {
@@ -136,6 +167,9 @@ describe('the result', () => {
     const steps = within(screen.getByRole('list', { name: 'Steps' })).getAllByRole('listitem');
     expect(steps.length).toBeGreaterThanOrEqual(4);
     expect(screen.getByRole('group', { name: 'Equation 3' })).toBeTruthy();
+    expect(screen.getByText('Accuracy of the sheet:').parentElement?.textContent).toContain(
+      'No accuracy is on record.',
+    );
   });
 
   it('goes back to a preview when the duty is changed', async () => {

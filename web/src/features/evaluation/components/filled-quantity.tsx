@@ -1,5 +1,7 @@
+import { convert } from '@merestone/engine';
 import type { ReactNode } from 'react';
 import { formatUnit } from '../../../shared/format/format-unit';
+import { inWords } from '../../../shared/format/in-words';
 import { lowerFirst } from '../../../shared/format/lower-first';
 import { Figure } from '../../../shared/ui/figure';
 import { LabelWords } from '../../../shared/ui/quantity-field/label-words';
@@ -18,6 +20,7 @@ interface FilledQuantityProps {
 /** A value that the product filled in: in italics, with where it comes from and what it takes for granted. */
 export function FilledQuantity({ field, equation, filled, symbol }: FilledQuantityProps) {
   const id = fieldId(field.key);
+  const shown = filled ? inUnit(filled, field.startUnit) : undefined;
   return (
     <div className="quantity">
       <span className="quantity-label" id={`${id}-label`}>
@@ -31,9 +34,9 @@ export function FilledQuantity({ field, equation, filled, symbol }: FilledQuanti
         aria-describedby={`${id}-from`}
       >
         <span className="filled-value">
-          {filled ? <Figure value={filled.value} /> : <span aria-label="not yet computed">…</span>}
+          {shown ? <Figure value={shown.value} /> : <span aria-label="not yet computed">…</span>}
         </span>
-        <span className="quantity-unit">{formatUnit(filled?.unit ?? field.unit)}</span>
+        <span className="quantity-unit">{formatUnit(shown?.unit ?? field.startUnit)}</span>
       </output>
       <div className="quantity-words">
         <p className="quantity-hint" id={`${id}-from`}>
@@ -44,8 +47,14 @@ export function FilledQuantity({ field, equation, filled, symbol }: FilledQuanti
   );
 }
 
+/** The value in the unit that the field would have been typed in. */
+function inUnit({ value, unit }: FilledValue, wanted: string): FilledValue {
+  const converted = convert(value, unit, wanted);
+  return converted === null ? { value, unit } : { value: converted, unit: wanted };
+}
+
 function wordsFor({ title, assumes, served }: EquationInUse): string {
-  const from = served.length > 0 ? `, from ${served.map((s) => s.label.toLowerCase()).join(' and ')}` : '';
+  const from = served.length > 0 ? `, from ${inWords(served.map((s) => lowerFirst(s.label)))}` : '';
   const taking = assumes ? `; takes for granted: ${lowerFirst(assumes).replace(/\.$/, '')}` : '';
   return `Filled by “${title}”${from}${taking}.`;
 }

@@ -40,7 +40,7 @@ export function ForceSection({ controls }: { controls: DutyControls }) {
                 id={fieldId(`drivingForce.${side}`)}
                 label={SIDES[side]}
                 typed={force[side]}
-                units={unitsFor(FORCE_UNITS[force.kind])}
+                units={unitsFor(FORCE_UNITS[force.kind], { fraction: force.kind === 'mole-fraction' })}
                 error={errorOf(`drivingForce.${side}`)}
                 onChange={(typed) => change({ do: 'type-force', side, typed })}
               />

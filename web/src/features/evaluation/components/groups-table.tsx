@@ -1,4 +1,5 @@
 import type { CorrelationDefinition, Numbers } from '@merestone/engine';
+import { nameOfResult } from '../../../shared/format/part-words';
 import { InlineEquation } from '../../../shared/ui/equation';
 import { Figure } from '../../../shared/ui/figure';
 import { SetTable } from '../../../shared/ui/set-table';
@@ -66,25 +67,12 @@ function rowsOf(numbers: Numbers, definition: CorrelationDefinition): Row[] {
     unit,
     derived: true,
   }));
-  const results = numbers.parts.map(({ title, result }) => ({
+  const results = numbers.parts.map(({ key, title, result }) => ({
     symbol: result.symbol,
-    name: numbers.parts.length > 1 ? title : (KINDS[kindOf(definition, result.symbol)] ?? title),
+    name: nameOfResult(definition, key) ?? title,
     value: result.value,
     unit: result.unit,
     derived: true,
   }));
   return [...groups, ...steps, ...results];
-}
-
-const KINDS: Readonly<Record<string, string>> = {
-  Sherwood: 'Sherwood number',
-  Stanton: 'Stanton number of mass transfer',
-  'j-factor': 'j-factor of mass transfer',
-  coefficient: 'Coefficient as the source gives it',
-  'volumetric-coefficient': 'Volumetric coefficient as the source gives it',
-  'interfacial-area': 'Interfacial area per volume',
-};
-
-function kindOf(definition: CorrelationDefinition, symbol: string): string {
-  return definition.parts.find((part) => part.result.symbol === symbol)?.result.kind ?? '';
 }

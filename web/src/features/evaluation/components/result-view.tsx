@@ -1,5 +1,7 @@
 import type { EvaluationState } from '../hooks/use-evaluation';
-import { useFocusWhenLost } from '../hooks/use-focus-when-lost';
+import { useFocusWhenLost } from '../../../shared/hooks/use-focus-when-lost';
+import { accuracyOfResult } from '../../../shared/format/plain-words';
+import { MarkedText } from '../../../shared/ui/marked-text';
 import { copyText } from '../model/copy-text';
 import { notableFindings } from '../model/refusing-findings';
 import type { Shown } from '../model/shown-outcome';
@@ -36,6 +38,10 @@ export function ResultView({ shown, evaluation, firstNumber }: ResultViewProps) 
       </h2>
       <RecordLine shown={shown} />
       <Headline numbers={outcome} request={shown.request} mark={mark} definition={sheet.definition} />
+      <p className="result-accuracy">
+        <strong>Accuracy of the sheet:</strong>{' '}
+        <MarkedText text={accuracyOfResult(sheet.definition.accuracy)} />
+      </p>
       {notable.map((finding) => (
         <FindingText key={finding.symbol} finding={finding} deviation={reasons.get(finding.symbol)} />
       ))}

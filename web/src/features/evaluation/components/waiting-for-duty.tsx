@@ -1,3 +1,4 @@
+import { lowerFirst } from '../../../shared/format/lower-first';
 import type { EvaluationState } from '../hooks/use-evaluation';
 import { fieldsOf } from '../model/duty-form';
 
@@ -16,7 +17,7 @@ function wordsFor({ preview, sections, definitionProblems }: EvaluationState): s
   if (preview.state === 'incomplete') {
     const labels = fieldsOf(sections)
       .filter((field) => preview.missing.some((error) => error.field === field.key))
-      .map((field) => field.label.toLowerCase());
+      .map((field) => lowerFirst(field.label));
     return labels.length > 0
       ? `Still needed: ${labels.join('; ')}.`
       : preview.missing.map((p) => p.message).join(' ');

@@ -3,11 +3,14 @@ import {
   serves,
   symbolTex,
   unitsFor,
+  usualUnitFor,
   type Group,
   type PropertyEquationDefinition,
   type Quantity,
   type Table,
 } from '@merestone/engine';
+import { quantityName } from '../../../shared/format/symbol-on-sheet';
+import { quantityWords } from '../../../shared/format/quantity-words';
 import type { DutyChoices } from './duty';
 import type { EquationInUse, FormField, FormItem, FormSection, RowPicker } from './duty-form';
 import type { EvaluatedSheet } from './evaluated-sheet';
@@ -57,39 +60,44 @@ function withPickers(sections: FormSection[], pickers: RowPicker[]): FormSection
   return [{ key: 'geometry', title: TITLES.geometry, items: pickers }, ...sections];
 }
 
-/** Quantities of the sheet that a chosen property equation takes as inputs. */
-function neededByEquations({ definition, equations }: EvaluatedSheet, duty: DutyChoices): Set<string> {
-  const chosen = Object.entries(duty.equations).flatMap(([symbol, slug]) => {
-    const listed = definition.quantities.find((q) => q.symbol === symbol)?.equations?.includes(slug);
-    const equation = listed ? equations.find((e) => e.slug === slug) : undefined;
-    return equation ? equation.definition.quantities : [];
-  });
-  return new Set(chosen.flatMap((input) => servingQuantity(definition.quantities, input.is)?.symbol ?? []));
+/** Quantities of the sheet that a chosen property equation takes as inputs, with what is found from each. */
+function neededByEquations({ definition, equations }: EvaluatedSheet, duty: DutyChoices): Needed {
+  const needed = new Map<string, string[]>();
+  for (const [symbol, slug] of Object.entries(duty.equations)) {
+    const filled = definition.quantities.find((q) => q.symbol === symbol && q.equations?.includes(slug));
+    const equation = filled ? equations.find((e) => e.slug === slug) : undefined;
+    if (!filled || !equation) continue;
+    for (const input of equation.definition.quantities) {
+      const serving = servingQuantity(definition.quantities, input.is)?.symbol;
+      if (serving === undefined || serving === symbol) continue;
+      needed.set(serving, [...new Set([...(needed.get(serving) ?? []), quantityName(filled.is)])]);
+    }
+  }
+  return needed;
 }
+
+/** By symbol on the sheet: the titles of the quantities that chosen equations find from it. */
+type Needed = ReadonlyMap<string, string[]>;
 
 /** What other bases are made from; worth asking for beside the quantities of the formula. */
 const SERVES_BASES = ['gas-temperature', 'total-pressure', 'log-mean-inert-pressure', 'solvent-molar-mass'];
 
 /** A state that no formula, bound, basis or chosen equation uses. */
-function isIdle({ role, is, symbol }: Quantity, sheet: EvaluatedSheet, needed: ReadonlySet<string>): boolean {
+function isIdle({ role, is, symbol }: Quantity, sheet: EvaluatedSheet, needed: Needed): boolean {
   if (role !== 'state' || needed.has(symbol)) return false;
   const bounded = sheet.definition.bounds.some((bound) => bound.on === symbol);
   return !bounded && !SERVES_BASES.some((name) => serves(is, name));
 }
 
 /** A quantity of the sheet; only these may be filled by a property equation. */
-function sheetField(
-  quantity: Quantity,
-  sheet: EvaluatedSheet,
-  duty: DutyChoices,
-  needed: ReadonlySet<string>,
-): FormField {
+function sheetField(quantity: Quantity, sheet: EvaluatedSheet, duty: DutyChoices, needed: Needed): FormField {
   const { symbol } = quantity;
   const choices = sheet.equations.filter(({ slug }) => quantity.equations?.includes(slug));
   const chosen = choices.find(({ slug }) => slug === duty.equations[symbol]);
   return {
     ...quantityField(quantity, symbol),
     optional: quantity.role === 'state' && !needed.has(symbol),
+    neededFor: needed.get(symbol) ?? [],
     equations: choices.map(({ slug, definition }) => ({ slug, title: definition.title })),
     filledBy: chosen ? equationInUse(chosen.slug, chosen.definition, symbol, sheet, duty) : null,
   };
@@ -100,20 +108,17 @@ function quantityField(quantity: Quantity, key: string): FormField {
   return {
     kind: 'quantity',
     key,
-    label: labelOf(quantity),
+    label: quantityWords(quantity),
     symbolTex: symbolTex(quantity.symbol, quantity.tex),
     unit: quantity.unit,
     units: unitsFor(quantity.unit, entry),
+    startUnit: usualUnitFor(quantity.unit, entry),
     hint: quantity.meaning ?? entry?.hint ?? null,
     optional: quantity.role === 'state',
     equations: [],
     filledBy: null,
+    neededFor: [],
   };
-}
-
-function labelOf(quantity: Quantity): string {
-  const title = QUANTITIES[quantity.is]?.title ?? quantity.is.replaceAll('-', ' ');
-  return quantity.at ? `${title}, ${quantity.at}` : title;
 }
 
 function groupField(group: Group): FormField {
@@ -124,10 +129,12 @@ function groupField(group: Group): FormField {
     symbolTex: symbolTex(group.symbol, group.tex),
     unit: '1',
     units: ['1'],
+    startUnit: '1',
     hint: group.note ?? null,
     optional: false,
     equations: [],
     filledBy: null,
+    neededFor: [],
   };
 }
 
@@ -148,7 +155,7 @@ function equationInUse(
     if (fromRow.has(quantity.symbol)) continue;
     const onSheet = servingQuantity(sheet.definition.quantities, quantity.is);
     if (onSheet && onSheet.symbol !== key)
-      served.push({ key: onSheet.symbol, symbol: quantity.symbol, label: labelOf(onSheet) });
+      served.push({ key: onSheet.symbol, symbol: quantity.symbol, label: quantityWords(onSheet) });
     else own.push(quantityField(quantity, `${key}.${quantity.symbol}`));
   }
   return { slug, title: definition.title, assumes: definition.assumes ?? null, own, served };
@@ -168,7 +175,7 @@ function rowPicker(table: Table, key: string, quantities: readonly Quantity[], d
       .map((quantity) => ({
         symbol: quantity.symbol,
         symbolTex: symbolTex(quantity.symbol, quantity.tex),
-        label: labelOf(quantity),
+        label: quantityWords(quantity),
         unit: quantity.unit,
       })),
   };

@@ -23,7 +23,7 @@ export function buildRequest(sections: readonly FormSection[], duty: Duty): Buil
       equations[field.key] = field.filledBy.slug;
       continue;
     }
-    const reading = readQuantity(duty.typed[field.key] ?? { text: '', unit: field.unit });
+    const reading = readQuantity(duty.typed[field.key] ?? { text: '', unit: field.startUnit });
     if (reading.kind === 'problem') errors.push({ field: field.key, message: reading.message });
     if (reading.kind !== 'value') continue;
     inputs[field.key] =

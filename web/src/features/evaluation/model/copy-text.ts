@@ -2,6 +2,7 @@ import type { Numbers, UsedEquation } from '@merestone/engine';
 import { symbolText } from '../../../shared/format/symbol-parts';
 import { formatUnit } from '../../../shared/format/format-unit';
 import { NUMBER_SPACE } from '../../../shared/format/format-number';
+import { accuracyOfResult } from '../../../shared/format/plain-words';
 import { coefficientWords } from './coefficient-words';
 import type { EvaluatedSheet } from './evaluated-sheet';
 import { findingLabel } from './finding-label';
@@ -30,6 +31,7 @@ export function copyText({ sheet, shown }: CopyTextInput): string {
       Object.entries(outcome.groups).map(([symbol, value]) => line(symbol, value, '1')),
     ),
     block('Result', resultLines(outcome, mark)),
+    block('Accuracy of the sheet', [accuracyOfResult(sheet.definition.accuracy)]),
     block('Other bases', basisLines(outcome, mark)),
     outcome.flux
       ? block('Flux', [

@@ -10,11 +10,15 @@ export interface FormField {
   /** Unit on the sheet. */
   unit: string;
   units: string[];
+  /** Unit the field starts with: what people have the value in, where that is not the sheet's. */
+  startUnit: string;
   hint: string | null;
   optional: boolean;
   /** Property equations that may fill it. */
   equations: { slug: string; title: string }[];
   filledBy: EquationInUse | null;
+  /** What a chosen property equation finds from this field. */
+  neededFor: string[];
 }
 
 /** A property equation that was chosen to fill a field, and what it takes its inputs from. */

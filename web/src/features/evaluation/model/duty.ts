@@ -38,13 +38,15 @@ export const EMPTY_DUTY: Duty = {
 
 export const FORCE_UNITS: Readonly<Record<DrivingForce['kind'], string>> = {
   concentration: 'mol/m^3',
-  'partial-pressure': 'Pa',
+  'partial-pressure': 'kPa',
   'mole-fraction': '1',
 };
 
 export type DutyChange =
   | { do: 'type'; key: string; typed: TypedQuantity }
   | { do: 'choose-equation'; key: string; slug: string | null }
+  | { do: 'choose-equations'; equations: Readonly<Record<string, string>> }
+  | { do: 'drop-equations'; equations: Readonly<Record<string, string>> }
   | { do: 'choose-row'; key: string; row: string | null }
   | { do: 'switch-mode'; mode: DutyMode }
   | { do: 'force-kind'; kind: DrivingForce['kind'] | null }
@@ -59,6 +61,10 @@ export function changeDuty(duty: Duty, change: DutyChange): Duty {
       return { ...duty, typed: { ...duty.typed, [change.key]: change.typed } };
     case 'choose-equation':
       return { ...duty, equations: withOrWithout(duty.equations, change.key, change.slug) };
+    case 'choose-equations':
+      return { ...duty, equations: { ...duty.equations, ...change.equations } };
+    case 'drop-equations':
+      return { ...duty, equations: withoutChosen(duty.equations, change.equations) };
     case 'choose-row':
       return { ...duty, rows: withOrWithout(duty.rows, change.key, change.row) };
     case 'switch-mode':
@@ -77,6 +83,14 @@ export function changeDuty(duty: Duty, change: DutyChange): Duty {
 function forceOf(kind: DrivingForce['kind']): TypedForce {
   const empty = { text: '', unit: FORCE_UNITS[kind] };
   return { kind, interface: empty, bulk: empty };
+}
+
+/** What was chosen for a field since then stays. */
+function withoutChosen(
+  equations: Readonly<Record<string, string>>,
+  dropped: Readonly<Record<string, string>>,
+): Record<string, string> {
+  return Object.fromEntries(Object.entries(equations).filter(([key, slug]) => dropped[key] !== slug));
 }
 
 function withOrWithout(

@@ -26,10 +26,12 @@ interface SheetArticleProps {
   duty: ReactNode;
   /** What the duty comes to; told the number of its first equation. */
   outcome: (firstNumber: number) => ReactNode;
+  /** The documents behind its sources. */
+  documents?: ReactNode;
 }
 
 /** A sheet as a handbook page: equation, where it holds, the duty and its result, then everything behind it. */
-export function SheetArticle({ sheet, live, links, duty, outcome }: SheetArticleProps) {
+export function SheetArticle({ sheet, live, links, duty, outcome, documents }: SheetArticleProps) {
   const { definition } = sheet;
   const tex = useMemo(() => {
     const compilation = compileCorrelation(definition);
@@ -62,6 +64,7 @@ export function SheetArticle({ sheet, live, links, duty, outcome }: SheetArticle
       <SymbolsSection definition={definition} tex={tex} live={live} />
       <PropertyEquationsSection equations={sheet.equations} />
       <ChecksSection sheet={sheet} />
+      {documents}
       <HistorySection sheet={sheet} />
       <p className="sheet-caution">{sheet.caution}</p>
     </SheetPage>

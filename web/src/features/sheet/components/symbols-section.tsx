@@ -1,6 +1,7 @@
 import { symbolTex, type CorrelationDefinition, type DefinitionTex } from '@merestone/engine';
 import { memo, type ReactNode } from 'react';
 import { formatUnit } from '../../../shared/format/format-unit';
+import { coefficientTitle, nameOfResult } from '../../../shared/format/part-words';
 import { InlineEquation } from '../../../shared/ui/equation';
 import { Figure } from '../../../shared/ui/figure';
 import { MarginNote } from '../../../shared/ui/margin-note';
@@ -109,14 +110,19 @@ function rowsOf(definition: CorrelationDefinition, tex: DefinitionTex | null): S
       unit: line.unit,
     };
   });
-  const results = (tex?.parts ?? []).flatMap(({ title, result, coefficient }) => [
-    { symbol: result.symbol, tex: result.symbolTex, meaning: `${title}: result`, unit: result.unit },
+  const results = (tex?.parts ?? []).flatMap(({ key, title, result, coefficient }) => [
+    {
+      symbol: result.symbol,
+      tex: result.symbolTex,
+      meaning: nameOfResult(definition, key) ?? title,
+      unit: result.unit,
+    },
     ...(coefficient
       ? [
           {
             symbol: coefficient.symbol,
             tex: coefficient.symbolTex,
-            meaning: `${title}: coefficient`,
+            meaning: coefficientTitle({ title }),
             unit: coefficient.unit,
           },
         ]

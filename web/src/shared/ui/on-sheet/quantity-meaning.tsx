@@ -1,5 +1,5 @@
 import { QUANTITIES, type Quantity } from '@merestone/engine';
-import { quantityName } from '../../format/symbol-on-sheet';
+import { quantityWords } from '../../format/quantity-words';
 import './symbol-note.css';
 
 /** What a quantity stands for on its sheet: the dictionary's name, the state, and what else must be known of it. */
@@ -8,8 +8,7 @@ export function QuantityMeaning({ quantity }: { quantity: Quantity }) {
   const notes = [hint, roleWords(quantity)].filter(Boolean);
   return (
     <>
-      {quantityName(quantity.is)}
-      {quantity.at ? `, at ${quantity.at}` : ''}
+      {quantityWords(quantity)}
       {notes.length > 0 ? <span className="symbol-note">{notes.join(' ')}</span> : null}
     </>
   );

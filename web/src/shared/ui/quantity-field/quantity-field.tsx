@@ -21,6 +21,8 @@ export interface QuantityFieldProps {
   /** What is wrong, as told by whoever knows more than the text shows. */
   error?: string | undefined;
   optional?: boolean;
+  /** Why an empty field must be filled in after all. */
+  needed?: string | undefined;
   onChange: (typed: TypedQuantity) => void;
 }
 
@@ -29,7 +31,7 @@ export interface QuantityFieldProps {
  * when the unit is changed under a number. What cannot be read is said once the field is left.
  */
 export function QuantityField(props: QuantityFieldProps) {
-  const { id, label, symbol, typed, units, hint, optional = false, onChange } = props;
+  const { id, label, symbol, typed, units, hint, optional = false, needed, onChange } = props;
   const [busy, setBusy] = useState(false);
   const asked = isAsked(typed);
   const error = asked ? undefined : (props.error ?? (busy ? undefined : refusalOf(typed)));
@@ -37,12 +39,13 @@ export function QuantityField(props: QuantityFieldProps) {
   const described = [
     asked ? `${id}-question` : null,
     error ? `${id}-error` : null,
+    needed ? `${id}-needed` : null,
     hint ? `${id}-hint` : null,
   ]
     .filter(Boolean)
     .join(' ');
   return (
-    <div className={wrong ? 'quantity quantity-wrong' : 'quantity'}>
+    <div className={classOf(wrong, needed !== undefined)}>
       <label className="quantity-label" htmlFor={id}>
         <LabelWords label={label} symbol={symbol} />
         {optional ? <span className="quantity-optional"> (optional)</span> : null}
@@ -70,6 +73,11 @@ export function QuantityField(props: QuantityFieldProps) {
             {error}
           </p>
         ) : null}
+        {needed ? (
+          <p className="quantity-needed-words" id={`${id}-needed`}>
+            {needed}
+          </p>
+        ) : null}
         {hint ? (
           <p className="quantity-hint" id={`${id}-hint`}>
             {hint}
@@ -78,6 +86,11 @@ export function QuantityField(props: QuantityFieldProps) {
       </div>
     </div>
   );
+}
+
+function classOf(wrong: boolean, needed: boolean): string {
+  if (wrong) return 'quantity quantity-wrong';
+  return needed ? 'quantity quantity-needed' : 'quantity';
 }
 
 interface UnitPickerProps {
