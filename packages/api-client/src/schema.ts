@@ -1242,7 +1242,7 @@ export interface components {
         };
         NoticeChoices: {
             /** @description Which kinds come by mail, too */
-            mail?: {
+            mail: {
                 "review-asked": boolean;
                 comment: boolean;
                 verdict: boolean;

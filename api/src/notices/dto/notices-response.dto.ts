@@ -38,6 +38,7 @@ export class NoticeChoices {
     type: 'object',
     properties: Object.fromEntries(NOTICE_KINDS.map((kind) => [kind, { type: 'boolean' }])),
     required: [...NOTICE_KINDS],
+    selfRequired: true,
     description: 'Which kinds come by mail, too',
   })
   readonly mail!: Record<NoticeKind, boolean>;
