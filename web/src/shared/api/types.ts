@@ -1,7 +1,9 @@
 import type { components } from '@merestone/api-client';
 import type {
   CorrelationDefinition,
+  Difference,
   Finding,
+  InspectionReport,
   Outcome,
   PropertyEquationDefinition,
   Stretch,
@@ -77,3 +79,26 @@ export type MailChoices = Schemas['NoticeChoices']['mail'];
 export type Attachment = Schemas['AttachmentItem'];
 export type Attachments = Schemas['AttachmentsResponse'];
 export type Licence = Attachment['licence'];
+
+export type Desk = Schemas['Desk'];
+export type DeskSection = Schemas['DeskSection'];
+export type DeskItem = Schemas['DeskItem'];
+
+export type Verdict = Schemas['ReviewVerdict'];
+export type Checklist = Schemas['ChecklistDto'];
+export type ReviewComment = Schemas['ReviewComment'];
+export type Iteration = Replace<Schemas['ReviewIteration'], { differences: Difference[] }>;
+export type Review = Replace<
+  Schemas['ReviewPage'],
+  { definition: CorrelationDefinition; inspection: InspectionReport | null; iterations: Iteration[] }
+>;
+export type Withdrawal = Schemas['SheetWithdrawal'];
+
+export type Differences = Replace<
+  Schemas['DifferencesResponse'],
+  { differences: Difference[]; before: CorrelationDefinition; after: CorrelationDefinition }
+>;
+
+export type ProblemReport = Schemas['ProblemReport'];
+export type ReportSeverity = ProblemReport['severity'];
+export type ReportOutcome = Schemas['ProblemReportAnswer']['outcome'];

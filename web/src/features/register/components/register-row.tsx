@@ -40,7 +40,8 @@ export function RegisterRow({ item, withGeometry }: { item: ListedCorrelation; w
   );
 }
 
-function RowBound({ item }: { item: ListedCorrelation }) {
+/** Where the correlation holds: its Reynolds number drawn, or the symbols that are bounded instead. */
+export function RowBound({ item }: { item: ListedCorrelation }) {
   const row = boundOfRow(item);
   if (row.kind === 'others') return <OtherBounds symbols={row.symbols} />;
   const { symbol, name, stretches } = row.bound;

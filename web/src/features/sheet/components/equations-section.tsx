@@ -43,7 +43,10 @@ function EquationNotes({ sheet }: { sheet: Sheet }) {
       </MarginNote>
       {sheet.approval ? (
         <MarginNote title="Approved">
-          by {sheet.approval.by.name} on {formatDay(sheet.approval.at)}. {sheet.approval.meaning}
+          <p>
+            by {sheet.approval.by.name} on {formatDay(sheet.approval.at)}. {sheet.approval.meaning}
+          </p>
+          {sheet.reviewDue ? <p>To be looked at again by {formatDay(sheet.reviewDue)}.</p> : null}
         </MarginNote>
       ) : null}
     </>

@@ -27,6 +27,7 @@ export const HistorySection = memo(function HistorySection({ sheet }: { sheet: S
             <th scope="col">Standing</th>
             <th scope="col">Since</th>
             <th scope="col">Content</th>
+            <th scope="col">Compare</th>
           </tr>
         </thead>
         <tbody>
@@ -44,6 +45,19 @@ export const HistorySection = memo(function HistorySection({ sheet }: { sheet: S
               </td>
               <td>{formatDay(at)}</td>
               <td>{shortHash(hash)}</td>
+              <td>
+                {number === sheet.revision ? null : (
+                  <Link
+                    to={paths.differences(
+                      sheet.slug,
+                      Math.min(number, sheet.revision),
+                      Math.max(number, sheet.revision),
+                    )}
+                  >
+                    differences<span className="heard-only"> between rev {number} and this one</span>
+                  </Link>
+                )}
+              </td>
             </tr>
           ))}
         </tbody>

@@ -28,10 +28,12 @@ interface SheetArticleProps {
   outcome: (firstNumber: number) => ReactNode;
   /** The documents behind its sources. */
   documents?: ReactNode;
+  /** Problems that were reported with it. */
+  reports?: ReactNode;
 }
 
 /** A sheet as a handbook page: equation, where it holds, the duty and its result, then everything behind it. */
-export function SheetArticle({ sheet, live, links, duty, outcome, documents }: SheetArticleProps) {
+export function SheetArticle({ sheet, live, links, duty, outcome, documents, reports }: SheetArticleProps) {
   const { definition } = sheet;
   const tex = useMemo(() => {
     const compilation = compileCorrelation(definition);
@@ -65,6 +67,7 @@ export function SheetArticle({ sheet, live, links, duty, outcome, documents }: S
       <PropertyEquationsSection equations={sheet.equations} />
       <ChecksSection sheet={sheet} />
       {documents}
+      {reports}
       <HistorySection sheet={sheet} />
       <p className="sheet-caution">{sheet.caution}</p>
     </SheetPage>
