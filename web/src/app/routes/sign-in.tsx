@@ -1,10 +1,11 @@
-import { Navigate, useNavigate, useSearchParams } from 'react-router-dom';
+import { Link, Navigate, useNavigate, useSearchParams } from 'react-router-dom';
 import { useDemoPeople } from '../../features/sign-in/api/use-demo-people';
 import { DemoPeopleList } from '../../features/sign-in/components/demo-people-list';
 import { SignInForm } from '../../features/sign-in/components/sign-in-form';
 import { refusalWords } from '../../features/sign-in/model/refusal-words';
 import { pathWithin } from '../../features/sign-in/model/path-within';
 import '../../features/sign-in/components/sign-in.css';
+import { paths } from '../../shared/paths';
 import { useSession } from '../../shared/session/use-session';
 import { MarginNote } from '../../shared/ui/margin-note';
 import { SheetPage } from '../../shared/ui/sheet-page';
@@ -31,6 +32,9 @@ export function SignInRoute() {
       }
     >
       <SignInForm onSignIn={enter} wordsFor={refusalWords} />
+      <p className="sign-in-else">
+        <Link to={paths.passwordReset}>Forgot your password?</Link>
+      </p>
       {demo ? <DemoPeopleList demo={demo} onSignIn={enter} wordsFor={refusalWords} /> : null}
     </SheetPage>
   );

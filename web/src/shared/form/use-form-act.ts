@@ -1,6 +1,7 @@
 import { useState, type SyntheticEvent } from 'react';
-import { asApiProblem, type ApiProblem } from '../api/api-problem';
+import type { ApiProblem } from '../api/api-problem';
 import { sentence } from '../format/sentence';
+import { useAct } from '../hooks/use-act';
 
 /** What is wrong, by the name of the field in the request. */
 export type FieldErrors = Readonly<Record<string, string | undefined>>;
@@ -13,35 +14,16 @@ interface FormActOptions {
 
 /** A form with one act: faults are found first, and what the server refuses comes back at its fields. */
 export function useFormAct({ find = () => ({}), act }: FormActOptions) {
-  const [errors, setErrors] = useState<FieldErrors>({});
-  const [problem, setProblem] = useState<ApiProblem | null>(null);
-  const [working, setWorking] = useState(false);
-
-  const send = async () => {
-    const found = find();
-    setErrors(found);
-    setProblem(null);
-    if (Object.values(found).some((message) => message !== undefined)) return;
-    setWorking(true);
-    try {
-      await act();
-    } catch (thrown) {
-      const refusal = asApiProblem(thrown);
-      setProblem(refusal);
-      setErrors(errorsOf(refusal));
-    }
-    setWorking(false);
+  const [found, setFound] = useState<FieldErrors>({});
+  const { working, problem, run, forget } = useAct();
+  const send = (event?: SyntheticEvent) => {
+    event?.preventDefault();
+    const faults = find();
+    setFound(faults);
+    if (Object.values(faults).some((message) => message !== undefined)) forget();
+    else void run(act);
   };
-
-  return {
-    errors,
-    problem,
-    working,
-    send: (event?: SyntheticEvent) => {
-      event?.preventDefault();
-      void send();
-    },
-  };
+  return { errors: problem ? errorsOf(problem) : found, problem, working, send };
 }
 
 export type FormAct = Pick<ReturnType<typeof useFormAct>, 'errors' | 'problem'>;
