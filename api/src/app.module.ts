@@ -6,7 +6,9 @@ import { CandidatesModule } from './candidates/candidates.module.js';
 import { CitationsModule } from './citations/citations.module.js';
 import { CorrelationsModule } from './correlations/correlations.module.js';
 import { SeedModule } from './database/seed/seed.module.js';
+import { DeskModule } from './desk/desk.module.js';
 import { EvaluationsModule } from './evaluations/evaluations.module.js';
+import { ExchangeModule } from './exchange/exchange.module.js';
 import { GeometriesModule } from './geometries/geometries.module.js';
 import { PropertyEquationsModule } from './property-equations/property-equations.module.js';
 import { ReviewsModule } from './reviews/reviews.module.js';
@@ -45,7 +47,9 @@ import { SettingsModule } from './settings/settings.module.js';
     CandidatesModule,
     CitationsModule,
     CorrelationsModule,
+    DeskModule,
     EvaluationsModule,
+    ExchangeModule,
     GeometriesModule,
     PropertyEquationsModule,
     ReviewsModule,

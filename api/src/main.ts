@@ -7,6 +7,7 @@ import { ConfigError, readConfig } from './config/read-config.js';
 import type { Config } from './config/config.js';
 import { configureApp } from './configure-app.js';
 import { DATABASE_FILE } from './database/database.provider.js';
+import { FixtureFiles } from './database/seed/fixture-files.js';
 import { SeedService } from './database/seed/seed.service.js';
 import { setAsideUnfinished } from './database/set-aside-unfinished.js';
 import { greeting } from './greeting.js';
@@ -34,7 +35,7 @@ async function start(config: Config): Promise<void> {
   });
   configureApp(app);
   await app.init();
-  await app.get(SeedService).fill(config.demo);
+  await app.get(SeedService).fill(config.demo, config.demo || config.library ? new FixtureFiles() : null);
   app.get(CheckpointService).trySigningHead();
   await app.listen(config.port);
   process.stdout.write(greeting(app));

@@ -3,6 +3,7 @@ import { afterAll, beforeAll, describe, expect, test } from 'vitest';
 import type { CandidatesResponse } from '../src/candidates/dto/candidates-response.dto.js';
 import type { CorrelationPage } from '../src/correlations/dto/correlation-page.dto.js';
 import type { Sheet } from '../src/correlations/dto/sheet.dto.js';
+import { UNAPPROVED } from '../src/common/standing.js';
 import { FixtureFiles } from '../src/database/seed/fixture-files.js';
 import { SeedService } from '../src/database/seed/seed.service.js';
 import { correlationStanding } from '../src/database/seed/standing-rule.js';
@@ -57,15 +58,24 @@ async function everyItem(who: Agent, query: Record<string, string> = {}): Promis
 }
 
 describe('the demo office', () => {
-  test('has every sheet of the library, each in the standing that the rule gives', async () => {
+  test('has every sheet of the library, in the standing that the rule gives or that its life led to', async () => {
     const items = await everyItem(auditor);
     const library = files.correlations();
     expect(items.map(({ slug }) => slug).sort()).toEqual(library.map(({ slug }) => slug).sort());
     const standings = new Map(items.map(({ slug, standing }) => [slug, standing]));
     const ruled = library.filter(({ slug }) => standings.get(slug) !== 'draft');
+    const ledTo = new Map<string, string>(
+      files.demoLife().life.flatMap(({ slug, acts }): [string, string][] => {
+        if (acts.some((act) => act.do === 'suspend')) return [[slug, 'suspended']];
+        return acts.some((act) => act.do === 'decline') ? [[slug, 'declined']] : [];
+      }),
+    );
     expect(Object.fromEntries(ruled.map(({ slug }) => [slug, standings.get(slug)]))).toEqual(
       Object.fromEntries(
-        ruled.map(({ slug, definition }) => [slug, correlationStanding(definition).standing]),
+        ruled.map(({ slug, definition }) => [
+          slug,
+          ledTo.get(slug) ?? correlationStanding(definition).standing,
+        ]),
       ),
     );
     expect(items.filter(({ standing }) => standing === 'approved').length).toBeGreaterThan(20);
@@ -131,7 +141,7 @@ describe('the list', () => {
     const items = await everyItem(engineer);
     const own = await engineer.get('/api/session').expect(200);
     const { id } = (own.body as { person: { id: string } }).person;
-    for (const { slug } of items.filter(({ standing }) => standing !== 'approved')) {
+    for (const { slug } of items.filter(({ standing }) => UNAPPROVED.includes(standing))) {
       const { body } = await engineer.get(`/api/correlations/${slug}`).expect(200);
       expect((body as Sheet).originator.id).toBe(id);
     }

@@ -24,6 +24,8 @@ export class Config {
   readonly dataFolder: string;
   /** Whether a new database becomes the demo office. */
   readonly demo: boolean;
+  /** Whether a new office that is no demo gets the library as drafts. Without it a register can be brought in. */
+  readonly library: boolean;
   readonly smtpUrl: string | undefined;
   /** The address people use, when the server stands behind a proxy: scheme, host and port. */
   readonly origin: string | undefined;
@@ -37,6 +39,7 @@ export class Config {
     this.port = settings.port;
     this.dataFolder = settings.dataFolder;
     this.demo = settings.demo;
+    this.library = settings.library ?? true;
     this.smtpUrl = settings.smtpUrl;
     this.origin = settings.origin;
     this.webFolder = settings.webFolder;
@@ -55,6 +58,7 @@ export interface Settings {
   readonly port: number;
   readonly dataFolder: string;
   readonly demo: boolean;
+  readonly library?: boolean;
   readonly smtpUrl?: string | undefined;
   readonly origin?: string | undefined;
   readonly webFolder: string;

@@ -24,6 +24,7 @@ export function readConfig(environment: Environment): Config {
     port: readPort(environment.MERESTONE_PORT, failures),
     dataFolder: readFolder(environment.MERESTONE_DATA),
     demo: readFlag('MERESTONE_DEMO', environment.MERESTONE_DEMO, true, failures),
+    library: readFlag('MERESTONE_LIBRARY', environment.MERESTONE_LIBRARY, true, failures),
     smtpUrl: readUrl('MERESTONE_SMTP_URL', environment.MERESTONE_SMTP_URL, ['smtp:', 'smtps:'], failures)
       ?.href,
     origin: readOrigin(environment.MERESTONE_ORIGIN, failures),

@@ -31,6 +31,7 @@ export const ACTS = {
   'revision.taken-back': 'took a revision back for changes',
   'revision.edited': 'edited a revision in review',
   'revision.put-forward': 'put a revision forward again',
+  'revision.review-due': 'reminded of a review that falls due',
   'review.taken': 'took a review',
   'comment.answered': 'answered a comment',
   'comment.resolved': 'resolved a comment',

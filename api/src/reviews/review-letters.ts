@@ -58,6 +58,11 @@ export const reviewLetters = {
     text: `${by.name} reinstated ${named(record)}.`,
     href: sheetPath(record),
   }),
+  due: (record: Named, day: string, isDue: boolean): Notice => ({
+    kind: 'reminder',
+    text: `${named(record)} ${isDue ? 'was' : 'is'} due for review on ${day.slice(0, 10)}.`,
+    href: sheetPath(record),
+  }),
   superseded: (record: Named, by: number): Notice => ({
     kind: 'approval',
     text: `${named(record)} is superseded by revision ${by}.`,

@@ -17,6 +17,8 @@ import { MachineCheckService } from './machine-check.service.js';
 import { ReviewPageController } from './review-page.controller.js';
 import { ReviewPageReadModel } from './review-page.read-model.js';
 import { ReviewPageService } from './review-page.service.js';
+import { RemindersReadModel } from './reminders.read-model.js';
+import { ReviewRemindersService } from './review-reminders.service.js';
 import { ReviewingService } from './reviewing.service.js';
 import { ReviewsController } from './reviews.controller.js';
 import { ReviewsRepository } from './reviews.repository.js';
@@ -45,7 +47,9 @@ import { SupersessionService } from './supersession.service.js';
     LifeNoticesService,
     MachineCheckService,
     ReviewPageReadModel,
+    RemindersReadModel,
     ReviewPageService,
+    ReviewRemindersService,
     ReviewingService,
     ReviewsRepository,
     ReviewsService,

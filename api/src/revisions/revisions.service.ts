@@ -63,6 +63,11 @@ export class RevisionsService {
     return this.revisions.ofGeometry(geometry);
   }
 
+  /** All revisions of correlations, whoever asks. */
+  ofCorrelations(): RevisionRecord[] {
+    return this.revisions.every('correlation');
+  }
+
   /** All revisions of property equations, whoever asks. */
   ofPropertyEquations(): RevisionRecord[] {
     return this.revisions.every('property-equation');

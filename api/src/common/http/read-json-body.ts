@@ -27,6 +27,11 @@ function parseBody(request: IncomingMessage, raw: Buffer): object {
   if (mediaType(request) !== 'application/json') {
     throw new ApiProblem('unsupported-media-type', 'Send the body as application/json.');
   }
+  return readJsonObject(raw);
+}
+
+/** The object that some bytes say as JSON; refused with a reason where they say none that can be used. */
+export function readJsonObject(raw: Buffer): object {
   const text = decode(raw);
   const value = parseJson(text);
   if (typeof value !== 'object' || value === null || Array.isArray(value)) {

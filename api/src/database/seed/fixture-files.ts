@@ -11,6 +11,7 @@ import {
 import { isRole, type Role } from '../../common/roles.js';
 import { inRepository } from '../../config/paths.js';
 import type { Geometry } from '../../geometries/geometries.read-model.js';
+import type { DemoLife } from './demo-life.js';
 import type { StartingStanding } from './standing-rule.js';
 
 export interface Named<T> {
@@ -52,6 +53,11 @@ export class FixtureFiles {
 
   office(): { name: string; principal: string } {
     return this.read('demo/office.yaml') as { name: string; principal: string };
+  }
+
+  /** What happens in the demo office after its library was brought in. */
+  demoLife(): DemoLife {
+    return this.read('demo/life.yaml') as DemoLife;
   }
 
   exceptions(): { correlations: Exceptions; propertyEquations: Exceptions } {

@@ -19,24 +19,17 @@ import { OfficeService } from '../../people/office.service.js';
 import { PropertyEquationsService } from '../../property-equations/property-equations.service.js';
 import { PropertyLibraryService } from '../../property-equations/property-library.service.js';
 import { ApprovalService } from '../../reviews/approval.service.js';
+import { LifeNoticesService } from '../../reviews/life-notices.service.js';
 import { ReviewingService } from '../../reviews/reviewing.service.js';
 import { SubmissionService } from '../../reviews/submission.service.js';
 import type { RevisionKey, RevisionRecord } from '../../revisions/revision-record.js';
+import { changed, type DemoLife } from './demo-life.js';
+import { DemoLifeService } from './demo-life.service.js';
 import { DemoOffice } from './demo-office.js';
 import { DemoStaffService } from './demo-staff.service.js';
+import { DEMO_MEANING, DEMO_REVIEW_NOTE, EVERYTHING_CHECKED } from './demo-words.js';
 import { FixtureFiles, type Exceptions, type Named } from './fixture-files.js';
 import { correlationStanding, propertyEquationStanding, type StartingStanding } from './standing-rule.js';
-
-const MEANING = 'Approved for design within its bounds (demo office)';
-const REVIEW_NOTE = 'Demo office: an invented review. Hold the sheet against its sources before real use.';
-const EVERYTHING_CHECKED = {
-  expression: true,
-  definitions: true,
-  ranges: true,
-  basis: true,
-  recalculated: true,
-  duplicates: true,
-};
 
 /** Fills a new database, through the services that people use, so that the journal tells how everything came to be. */
 @Injectable()
@@ -51,14 +44,21 @@ export class SeedService {
     private readonly submissions: SubmissionService,
     private readonly reviewing: ReviewingService,
     private readonly approvals: ApprovalService,
+    private readonly notices: LifeNoticesService,
+    private readonly demoLife: DemoLifeService,
   ) {}
 
-  /** Sets the office up unless that was done before: a demo office, or an empty one with the library as drafts. */
-  async fill(demo: boolean, files: FixtureFiles = new FixtureFiles()): Promise<void> {
+  /**
+   * Sets the office up unless that was done before: a demo office, or an empty one with the library as drafts; without
+   * files there is nothing in it, so that a register can be brought in.
+   */
+  async fill(demo: boolean, files: FixtureFiles | null = new FixtureFiles()): Promise<void> {
     if (this.office.isFounded()) return;
-    this.geometries.add(SYSTEM_ACTOR, files.geometries());
-    if (demo) await this.fillDemo(files);
-    else this.bringDrafts(files);
+    if (files !== null) {
+      this.geometries.add(SYSTEM_ACTOR, files.geometries());
+      if (demo) await this.fillDemo(files);
+      else this.bringDrafts(files);
+    }
     this.office.found(demo);
   }
 
@@ -76,12 +76,26 @@ export class SeedService {
 
   private async fillDemo(files: FixtureFiles): Promise<void> {
     const office = new DemoOffice(await this.staff.bring(files));
+    const life = files.demoLife();
+    await this.notices.without(() => this.bringLibrary(office, files, life));
+    const library = files.correlations();
+    for (const { slug, acts } of life.life) {
+      const n = library.findIndex((named) => named.slug === slug);
+      const named = library[n];
+      if (named === undefined) throw new Error(`The demo speaks of ${slug}, which is not in the library.`);
+      await this.demoLife.live({ slug, team: office.team(n), library: named.definition }, acts);
+    }
+    this.demoLife.propose(life.appointment, office.administrator);
+  }
+
+  private async bringLibrary(office: DemoOffice, files: FixtureFiles, life: DemoLife): Promise<void> {
     const exceptions = files.exceptions();
     for (const [n, named] of files.propertyEquations().entries()) {
       await this.bringEquation(office, n, named, exceptions.propertyEquations);
     }
-    for (const [n, named] of files.correlations().entries()) {
-      await this.bringCorrelation(office, n, named, exceptions.correlations);
+    for (const [n, { slug, definition }] of files.correlations().entries()) {
+      const first = changed(definition, life.firstRevisions[slug] ?? []);
+      await this.bringCorrelation(office, n, { slug, definition: first }, exceptions.correlations);
     }
   }
 
@@ -131,12 +145,12 @@ export class SeedService {
       this.reviewing.review(reviewer, key, {
         verdict: 'recommend',
         checklist: EVERYTHING_CHECKED,
-        note: REVIEW_NOTE,
+        note: DEMO_REVIEW_NOTE,
       });
     }
     await this.approvals.approve(authority, key, {
       password: DEMO_PASSWORD,
-      meaning: MEANING,
+      meaning: DEMO_MEANING,
       hash: record.hash,
     });
   }
