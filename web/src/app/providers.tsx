@@ -1,7 +1,8 @@
 import { ConfigProvider } from 'antd';
 import type { ReactNode } from 'react';
-import { SWRConfig } from 'swr';
+import { mutate, SWRConfig } from 'swr';
 import { asApiProblem } from '../shared/api/api-problem';
+import { SESSION } from '../shared/session/use-session';
 import { antdTheme } from '../theme/antd-theme';
 import { useNightSheet } from '../theme/use-night-sheet';
 
@@ -10,7 +11,7 @@ export function Providers({ children }: { children: ReactNode }) {
   const night = useNightSheet();
   return (
     <ConfigProvider theme={antdTheme(night)} wave={{ disabled: true }}>
-      <SWRConfig value={{ shouldRetryOnError: mayPass, revalidateOnFocus: false }}>
+      <SWRConfig value={{ shouldRetryOnError: mayPass, revalidateOnFocus: false, onError: askWhoIsSignedIn }}>
         {children}
       </SWRConfig>
     </ConfigProvider>
@@ -21,4 +22,9 @@ export function Providers({ children }: { children: ReactNode }) {
 function mayPass(thrown: unknown): boolean {
   const { status } = asApiProblem(thrown);
   return status === 0 || status >= 500;
+}
+
+/** A session that was ended elsewhere is noticed at the next answer; the sign-in page then takes over. */
+function askWhoIsSignedIn(thrown: unknown): void {
+  if (asApiProblem(thrown).status === 401) void mutate(SESSION);
 }

@@ -1,18 +1,24 @@
 import { Button } from 'antd';
 import { useState } from 'react';
 import { Link, NavLink, useNavigate } from 'react-router-dom';
+import { NoticesDisclosure } from '../../features/notices/components/notices-disclosure';
 import { asApiProblem } from '../../shared/api/api-problem';
-import type { Permission } from '../../shared/api/types';
+import type { Permission, Role } from '../../shared/api/types';
+import { inWords } from '../../shared/format/in-words';
+import { roleWords } from '../../shared/format/role-words';
 import { paths } from '../../shared/paths';
 import { useSession } from '../../shared/session/use-session';
 import './masthead.css';
 
 /** The pages of the masthead; one with a permission is shown to those who have it. */
 const NOUNS: readonly { to: string; noun: string; permission?: Permission }[] = [
+  { to: paths.start, noun: 'Desk' },
   { to: paths.register, noun: 'Register' },
+  { to: paths.reviews, noun: 'Reviews' },
   { to: paths.geometries, noun: 'Geometries' },
   { to: paths.propertyEquations, noun: 'Property equations' },
   { to: paths.journal, noun: 'Journal', permission: 'journal.read' },
+  { to: paths.office, noun: 'Office', permission: 'appointment.end' },
 ];
 
 /** The product's word, its nouns, and who is signed in. */
@@ -42,7 +48,7 @@ export function Masthead() {
   );
 }
 
-function SignedIn({ name, roles }: { name: string; roles: string[] }) {
+function SignedIn({ name, roles }: { name: string; roles: Role[] }) {
   const { signOut } = useSession();
   const [problem, setProblem] = useState<string | null>(null);
   const navigate = useNavigate();
@@ -55,13 +61,17 @@ function SignedIn({ name, roles }: { name: string; roles: string[] }) {
     }
   };
   return (
-    <p className="masthead-person">
-      <span title={roles.join(', ')}>{name}</span>
+    <div className="masthead-person">
+      <NoticesDisclosure />
+      <span aria-hidden="true"> · </span>
+      <NavLink to={paths.account} title={`Your own page; ${inWords(roles.map(roleWords))}`}>
+        {name}
+      </NavLink>
       <span aria-hidden="true"> · </span>
       <Button type="link" size="small" onClick={() => void leave()}>
         Sign out
       </Button>
       {problem ? <span role="alert"> {problem}</span> : null}
-    </p>
+    </div>
   );
 }

@@ -1,9 +1,9 @@
+import { Link } from 'react-router-dom';
 import { PasswordForm } from '../../features/account/components/password-form';
 import { SessionList } from '../../features/account/components/session-list';
 import { useOwnSessions } from '../../features/account/api/use-own-sessions';
 import { MailChoicesForm } from '../../features/notices/components/mail-choices-form';
 import { useMailChoices } from '../../features/notices/api/use-mail-choices';
-import { Link } from 'react-router-dom';
 import { inWords } from '../../shared/format/in-words';
 import { roleWords } from '../../shared/format/role-words';
 import { paths } from '../../shared/paths';
@@ -19,21 +19,18 @@ export function AccountRoute() {
   if (!session) return null;
   const { name, email, roles } = session.person;
   return (
-    <SheetPage
-      title={name}
-      subtitle={`${email}, ${inWords(roles.map(roleWords))}`}
-      margin={
-        <MarginNote title="Name and roles">
-          are given by an administrator of the office. What you do stands on record under this name.
-        </MarginNote>
-      }
-    >
+    <SheetPage title={name} subtitle={`${email}, ${inWords(roles.map(roleWords))}`}>
       <MarginRow
         heading={<h2>Password</h2>}
         notes={
-          <MarginNote title="Changed?">
-            All your other sessions end at once, and a letter to your address says that it was changed.
-          </MarginNote>
+          <>
+            <MarginNote title="Name and roles">
+              are given by an administrator of the office. What you do stands on record under this name.
+            </MarginNote>
+            <MarginNote title="Changed?">
+              All your other sessions end at once, and a letter to your address says that it was changed.
+            </MarginNote>
+          </>
         }
       >
         <PasswordForm email={email} onChanged={() => void refetch()} />

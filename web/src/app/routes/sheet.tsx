@@ -1,9 +1,10 @@
 import { useMemo } from 'react';
 import { Link, useParams } from 'react-router-dom';
-import { DraftLinks } from '../../features/draft/components/draft-links';
+import { AttachmentsSection } from '../../features/attachments/components/attachments-section';
 import { DutyPanel } from '../../features/evaluation/components/duty-panel';
 import { OutcomePanel } from '../../features/evaluation/components/outcome-panel';
 import { useEvaluation } from '../../features/evaluation/hooks/use-evaluation';
+import { ReportList } from '../../features/problem-reports/components/report-list';
 import { useSheet } from '../../features/sheet/api/use-sheet';
 import { SheetArticle } from '../../features/sheet/components/sheet-article';
 import type { ApiProblem } from '../../shared/api/api-problem';
@@ -14,6 +15,7 @@ import { Loading } from '../../shared/ui/loading';
 import { ProblemNotice } from '../../shared/ui/problem-notice';
 import { SheetPage } from '../../shared/ui/sheet-page';
 import { NotFound } from './not-found';
+import { SheetActs } from './sheet-acts';
 
 /** The sheet of a correlation, in use or as a given revision, with the evaluation of a duty beside it. */
 export function SheetRoute() {
@@ -67,11 +69,15 @@ function EvaluatedSheet({ sheet, personId }: { sheet: Sheet; personId: string })
     <SheetArticle
       sheet={sheet}
       live={evaluation.readings}
-      links={<DraftLinks slug={sheet.slug} />}
+      links={<SheetActs sheet={sheet} />}
       duty={<DutyPanel evaluation={evaluation} notInUse={notInUse} />}
       outcome={(firstNumber) => (
         <OutcomePanel evaluation={evaluation} firstNumber={firstNumber} notInUse={notInUse} />
       )}
+      reports={<ReportList slug={sheet.slug} />}
+      documents={
+        <AttachmentsSection slug={sheet.slug} revision={sheet.revision} sources={sheet.definition.sources} />
+      }
     />
   );
 }

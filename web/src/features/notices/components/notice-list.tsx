@@ -32,7 +32,12 @@ export function NoticeList({ notices, onRead }: NoticeListProps) {
               </time>
             </span>
             {notice.read ? null : (
-              <Button size="small" aria-label={`Mark as read: ${notice.text}`} onClick={() => onRead(notice)}>
+              <Button
+                type="link"
+                size="small"
+                aria-label={`Mark as read: ${notice.text}`}
+                onClick={() => onRead(notice)}
+              >
                 Mark as read
               </Button>
             )}

@@ -6,7 +6,7 @@ import { useAct } from '../../../shared/hooks/use-act';
 import { paths } from '../../../shared/paths';
 import { ProblemNotice } from '../../../shared/ui/problem-notice';
 import { useLatestNotices, useReading } from '../api/use-notices';
-import { noticeCountWords } from '../model/count-words';
+import { countWords } from '../model/count-words';
 import { NoticeList } from './notice-list';
 import './notices.css';
 
@@ -28,7 +28,14 @@ export function NoticesDisclosure() {
         aria-controls="notices-latest"
         onClick={() => setOpen((before) => !before)}
       >
-        {unread === 0 ? 'Notices' : noticeCountWords(unread)}
+        {unread === 0 ? (
+          'Notices'
+        ) : (
+          <span>
+            {countWords(unread)} new
+            <span className="notices-noun"> {unread === 1 ? 'notice' : 'notices'}</span>
+          </span>
+        )}
       </Button>
       <div
         id="notices-latest"
@@ -47,7 +54,7 @@ export function NoticesDisclosure() {
         <p className="notices-acts">
           <Link to={paths.notices}>All notices</Link>
           {waiting.length > 1 ? (
-            <Button size="small" onClick={() => markRead(waiting)}>
+            <Button type="link" size="small" onClick={() => markRead(waiting)}>
               Mark these as read
             </Button>
           ) : null}

@@ -5,7 +5,7 @@ import { EmptyState } from '../../../shared/ui/empty-state';
 import { Loading } from '../../../shared/ui/loading';
 import { ProblemNotice } from '../../../shared/ui/problem-notice';
 import { useNotices, useReading } from '../api/use-notices';
-import { noticeCountWords } from '../model/count-words';
+import { countWords } from '../model/count-words';
 import { NoticeList } from './notice-list';
 import './notices.css';
 
@@ -31,9 +31,9 @@ export function NoticesView() {
   return (
     <>
       <div className="notices-start">
-        <p role="status">{unread === 0 ? 'Nothing new.' : `${capital(noticeCountWords(unread))}.`}</p>
+        <p role="status">{waitingWords(unread)}</p>
         {waiting.length > 1 ? (
-          <Button size="small" loading={working} onClick={() => markRead(waiting)}>
+          <Button type="link" size="small" loading={working} onClick={() => markRead(waiting)}>
             Mark these as read
           </Button>
         ) : null}
@@ -51,6 +51,7 @@ export function NoticesView() {
   );
 }
 
-function capital(text: string): string {
-  return text.charAt(0).toUpperCase() + text.slice(1);
+function waitingWords(unread: number): string {
+  if (unread === 0) return 'Nothing new.';
+  return unread === 1 ? 'One of them is new.' : `Of these, ${countWords(unread)} are new.`;
 }

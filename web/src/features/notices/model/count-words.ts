@@ -1,7 +1,6 @@
 const SMALL = ['no', 'one', 'two', 'three', 'four', 'five', 'six', 'seven', 'eight', 'nine', 'ten'];
 
-/** How many notices wait to be read, in words as far as words are short. */
-export function noticeCountWords(unread: number): string {
-  const count = SMALL[unread] ?? String(unread);
-  return `${count} new ${unread === 1 ? 'notice' : 'notices'}`;
+/** A count in words as far as words are short. */
+export function countWords(count: number): string {
+  return SMALL[count] ?? String(count);
 }

@@ -50,18 +50,21 @@ export function PeopleTable({ heading, people, actsOn, sending, onAct }: PeopleT
               </th>
               <td>{person.roles.length > 0 ? inWords(person.roles.map(roleWords)) : 'none'}</td>
               <td className="people-since">{lastSeen(person)}</td>
-              <td className="people-acts">
-                {actsOn(person).map((act) => (
-                  <Button
-                    key={act}
-                    size="small"
-                    loading={act === 'resend' && sending === person.id}
-                    aria-label={`${ACT_WORDS[act]}: ${person.name}`}
-                    onClick={() => onAct(act, person)}
-                  >
-                    {ACT_WORDS[act]}
-                  </Button>
-                ))}
+              <td>
+                <div className="people-acts">
+                  {actsOn(person).map((act) => (
+                    <Button
+                      key={act}
+                      type="link"
+                      size="small"
+                      loading={act === 'resend' && sending === person.id}
+                      aria-label={`${ACT_WORDS[act]}: ${person.name}`}
+                      onClick={() => onAct(act, person)}
+                    >
+                      {ACT_WORDS[act]}
+                    </Button>
+                  ))}
+                </div>
               </td>
             </tr>
           ))}
