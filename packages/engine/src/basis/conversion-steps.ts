@@ -6,7 +6,7 @@ import type { Tree } from '../expression/tree.js';
 import { valueTex } from '../evaluation/explain.js';
 import type { CoefficientBasis, Conversion, Step } from '../evaluation/outcome.js';
 import { CONSTANTS } from '../quantity/constants.js';
-import { BASES, type CoefficientInSI, type FluidState } from './convert-basis.js';
+import { BASES, liquidConcentration, type CoefficientInSI, type FluidState } from './convert-basis.js';
 
 /** How a coefficient on concentration, k, is put on each basis. */
 const FORMULAS: Readonly<Record<CoefficientBasis, string>> = {
@@ -67,7 +67,7 @@ function valueFor(name: string, from: CoefficientInSI, state: FluidState): numbe
     T: state.temperature,
     P: state.pressure,
     p_BM: state.inertPressure,
-    c_L: state.liquidConcentration,
+    c_L: liquidConcentration(state),
     R: CONSTANTS['R']?.value ?? null,
   };
   return values[name] ?? Number.NaN;

@@ -16,13 +16,15 @@ const KNOWN: FluidState = {
   temperature: 300,
   pressure: 101325,
   inertPressure: 95000,
-  liquidConcentration: 55000,
+  liquidDensity: 990,
+  molarMass: 0.018,
 };
 const NOTHING: FluidState = {
   temperature: null,
   pressure: null,
   inertPressure: null,
-  liquidConcentration: null,
+  liquidDensity: null,
+  molarMass: null,
 };
 
 const gas = (
@@ -45,7 +47,8 @@ const state = fc
     temperature,
     pressure,
     inertPressure: share * pressure,
-    liquidConcentration: null,
+    liquidDensity: null,
+    molarMass: null,
   }));
 const form = fc.constantFrom<CoefficientInSI['rateForm']>(
   'dilute-or-equimolar',
@@ -210,7 +213,11 @@ describe('in a liquid', () => {
   test('without density and molar mass k_x has no value', () => {
     expect(convertBasis(liquid, 'k_x', NOTHING)).toMatchObject({
       value: null,
-      missing: ['liquid density and molar mass'],
+      missing: ['liquid density', 'molar mass of the solvent'],
+    });
+    expect(convertBasis(liquid, 'k_x', { ...NOTHING, liquidDensity: 998 })).toMatchObject({
+      value: null,
+      missing: ['molar mass of the solvent'],
     });
     expect(convertBasis(liquid, 'k_G', KNOWN)).toMatchObject({ value: null, missing: ['another phase'] });
   });

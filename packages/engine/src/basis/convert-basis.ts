@@ -7,7 +7,8 @@ export interface CoefficientInSI {
   basis: 'concentration' | 'partial-pressure' | 'mole-fraction';
   per: 'area' | 'volume';
   rateForm: 'dilute-or-equimolar' | 'stagnant-inert' | 'drift-free';
-  phase: 'gas' | 'liquid';
+  /** Null where the sheet serves both and nothing tells which it is here. */
+  phase: 'gas' | 'liquid' | null;
 }
 
 /** State of the fluid in SI, as far as it is known. */
@@ -15,8 +16,14 @@ export interface FluidState {
   temperature: number | null;
   pressure: number | null;
   inertPressure: number | null;
-  /** Molar concentration of the liquid, ρ/M, mol/m³. */
-  liquidConcentration: number | null;
+  liquidDensity: number | null;
+  /** Of the liquid that carries the species. */
+  molarMass: number | null;
+}
+
+/** Molar concentration of the liquid, ρ/M, mol/m³; null where it is not known. */
+export function liquidConcentration({ liquidDensity, molarMass }: FluidState): number | null {
+  return liquidDensity === null || molarMass === null ? null : liquidDensity / molarMass;
 }
 
 interface BasisRule {
@@ -76,19 +83,26 @@ export function convertBasis(from: CoefficientInSI, to: CoefficientBasis, state:
 }
 
 function missingState(from: CoefficientInSI, to: CoefficientBasis, state: FluidState): string[] {
+  if (from.phase === null) return ['whether the fluid is a gas or a liquid'];
   if (BASES[to].phase !== from.phase) return ['another phase'];
   const missing: string[] = [];
   const kind = BASES[to].kind;
   if (from.phase === 'liquid') {
-    if (kind !== from.basis && state.liquidConcentration === null)
-      missing.push('liquid density and molar mass');
-    return missing;
+    return kind === from.basis ? [] : lackingOfLiquid(state);
   }
   const needs = needOf(from, kind);
   if (needs.temperature && state.temperature === null) missing.push('gas temperature');
   if (needs.pressure && state.pressure === null) missing.push('total pressure');
   if (needs.inert && state.inertPressure === null) missing.push('log-mean inert pressure');
   return missing;
+}
+
+/** What a concentration of the liquid is still made from. */
+function lackingOfLiquid({ liquidDensity, molarMass }: FluidState): string[] {
+  return [
+    ...(liquidDensity === null ? ['liquid density'] : []),
+    ...(molarMass === null ? ['molar mass of the solvent'] : []),
+  ];
 }
 
 function needOf(from: CoefficientInSI, kind: BasisRule['kind']) {
@@ -123,13 +137,9 @@ function toMoleFraction(basis: CoefficientInSI['basis'], { temperature, pressure
   return basis === 'partial-pressure' ? p : p / (R * (temperature ?? Number.NaN));
 }
 
-function liquidValue(
-  from: CoefficientInSI,
-  to: CoefficientBasis,
-  { liquidConcentration }: FluidState,
-): number {
+function liquidValue(from: CoefficientInSI, to: CoefficientBasis, state: FluidState): number {
   const { kind } = BASES[to];
   if (kind === from.basis) return from.value;
-  const c = liquidConcentration ?? Number.NaN;
+  const c = liquidConcentration(state) ?? Number.NaN;
   return kind === 'mole-fraction' ? from.value * c : from.value / c;
 }

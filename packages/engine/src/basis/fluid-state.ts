@@ -2,7 +2,7 @@ import { serves } from '../quantity/dictionary.js';
 import type { Reckoner } from '../evaluation/reckoner.js';
 import type { FluidState } from './convert-basis.js';
 
-/** Reads temperature, pressure and concentration off a sheet's quantities, by dictionary name. */
+/** Reads temperature, pressures and the liquid's density off a sheet's quantities, by dictionary name. */
 export function fluidStateOf(reckoner: Reckoner): FluidState {
   const find = (name: string): number | null => {
     for (const { definition } of reckoner.sheet.quantities.values())
@@ -10,12 +10,11 @@ export function fluidStateOf(reckoner: Reckoner): FluidState {
         return reckoner.valueOf(definition.symbol);
     return null;
   };
-  const density = find('liquid-density');
-  const molarMass = find('solvent-molar-mass');
   return {
     temperature: find('gas-temperature'),
     pressure: find('total-pressure'),
     inertPressure: find('log-mean-inert-pressure'),
-    liquidConcentration: density !== null && molarMass !== null ? density / molarMass : null,
+    liquidDensity: find('liquid-density'),
+    molarMass: find('solvent-molar-mass'),
   };
 }

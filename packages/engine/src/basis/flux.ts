@@ -47,7 +47,13 @@ export function fluxFrom(
   force: ReadForce,
   state: FluidState,
 ): { ok: true; line: FluxLine } | { ok: false; problem: Problem } {
-  const basis = basisFor(force.kind, coefficient.phase);
+  const phase = coefficient.phase ?? phaseMeantBy(force.kind);
+  if (phase === null)
+    return fault(
+      'missing',
+      'It must be known whether the fluid is a gas or a liquid: give the total pressure of the gas, or the molar mass of the solvent.',
+    );
+  const basis = basisFor(force.kind, phase);
   if (!basis)
     return fault(
       'malformed',
@@ -60,7 +66,7 @@ export function fluxFrom(
     Math.max(force.interface, force.bulk) > (state.pressure ?? Infinity)
   )
     return fault('domain', 'A partial pressure is at most the total pressure.');
-  const converted = convertBasis(coefficient, basis, state);
+  const converted = convertBasis({ ...coefficient, phase }, basis, state);
   if (converted.value === null)
     return fault(
       'missing',
@@ -77,7 +83,7 @@ export function fluxFrom(
         value: converted.value * difference,
         unit: coefficient.per === 'area' ? 'mol/(m^2 s)' : 'mol/(m^3 s)',
         basis: force.kind,
-        warnings: driftWarnings(coefficient, force, state),
+        warnings: driftWarnings({ ...coefficient, phase }, force, state),
       },
     },
   };
@@ -85,6 +91,11 @@ export function fluxFrom(
 
 function fault(code: Problem['code'], message: string): { ok: false; problem: Problem } {
   return { ok: false, problem: { code, field: 'drivingForce', message } };
+}
+
+/** A partial pressure is of a gas; on concentrations k_c and k_L are one number. */
+function phaseMeantBy(kind: DrivingForce['kind']): 'gas' | null {
+  return kind === 'mole-fraction' ? null : 'gas';
 }
 
 function basisFor(kind: DrivingForce['kind'], phase: 'gas' | 'liquid'): CoefficientBasis | null {

@@ -15,7 +15,8 @@ const UNKNOWN: FluidState = {
   temperature: null,
   pressure: null,
   inertPressure: null,
-  liquidConcentration: null,
+  liquidDensity: null,
+  molarMass: null,
 };
 
 function converted(from: CoefficientInSI, to: CoefficientBasis, state: Partial<FluidState>): number {
@@ -127,7 +128,8 @@ describe('liquid', () => {
   it('Benitez, Example 2.1, p. 94 (companion): k_L to k_x of oxygen in water', () => {
     const from = { value: 3.3e-5, basis: 'concentration', per: 'area', phase: 'liquid' } as const;
     const k_x = converted({ ...from, rateForm: 'dilute-or-equimolar' }, 'k_x', {
-      liquidConcentration: 993 / 0.018,
+      liquidDensity: 993,
+      molarMass: 0.018,
     });
     // 3.3e-5 x 993/18 = 1.8205e-3 kmol/(m2 s).
     expectWithin(k_x, 1.82, 0.1);

@@ -217,6 +217,14 @@ describe('where near says nothing', () => {
   });
 });
 
+describe('the end of a definition', () => {
+  const constant = bound({ lo: end(0, 'definition'), hi: end(871, 'definition') });
+  test('is an ordinary value, such as a constant from a table; a value beside it is near', () => {
+    expect(hold(constant, 871).kind).toBe('within');
+    expect(hold(constant, 860).kind).toBe('near');
+  });
+});
+
 describe('temperatures', () => {
   const warm = bound({ lo: end(0), hi: end(50) });
 

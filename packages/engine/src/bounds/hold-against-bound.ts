@@ -74,7 +74,12 @@ function insideFinding(blank: Finding, { lo, hi }: Stretch, value: number): Find
   const upper = (toHi ?? 0) >= (toLo ?? 0);
   const ratio = upper ? toHi : toLo;
   const end = upper ? hi : lo;
-  const near = ratio !== null && ratio > 1 - NEAR && end?.nature !== 'physical' && !narrow(lo, hi);
+  const near =
+    ratio !== null &&
+    ratio > 1 - NEAR &&
+    end?.nature !== 'physical' &&
+    !narrow(lo, hi) &&
+    !onDefinition(end, value);
   const shown = `${blank.symbol} = ${formatNumber(value)}${unitText(blank.unit)}`;
   return {
     ...blank,
@@ -85,6 +90,11 @@ function insideFinding(blank: Finding, { lo, hi }: Stretch, value: number): Find
       ? `${shown} is in bounds, near the ${upper ? 'upper' : 'lower'} bound ${formatNumber(end?.value ?? 0)}.`
       : `${shown} is in bounds.`,
   };
+}
+
+/** The very end of a definition is an ordinary value of it, such as a constant that a table gives. */
+function onDefinition(end: BoundEnd | undefined, value: number): boolean {
+  return end?.nature === 'definition' && compareWithLimit(value, end.value) === 0;
 }
 
 /** A stretch so short that all of it would be near: it stands for a single value. */

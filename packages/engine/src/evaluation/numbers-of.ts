@@ -92,13 +92,14 @@ function lackingRemarks({ lacking }: Work): string[] {
 function partOutcome(
   definition: CorrelationDefinition,
   part: Part,
-  { reckoner }: Work,
+  work: Work,
   bases: CoefficientBasis[] | undefined,
   state: FluidState,
 ): PartOutcome {
+  const { reckoner } = work;
   const { result, coefficient } = part;
   const solved = coefficient && reckoner.has(coefficient.symbol) ? coefficient : null;
-  const inSI = coefficientInSI(definition, part, reckoner);
+  const inSI = coefficientInSI(definition, part, work);
   return {
     key: part.key,
     title: part.title,
@@ -118,31 +119,35 @@ function partOutcome(
 }
 
 /** The coefficient of a part in SI; a result that is itself a coefficient counts as on concentration. */
-function coefficientInSI(
-  definition: CorrelationDefinition,
-  part: Part,
-  reckoner: Work['reckoner'],
-): CoefficientInSI | null {
+function coefficientInSI(definition: CorrelationDefinition, part: Part, work: Work): CoefficientInSI | null {
   const read = readingOf(part);
-  if (!read || !reckoner.has(read.symbol)) return null;
-  const phase =
-    part.phase ?? (definition.phase === 'gas' ? 'gas' : definition.phase === 'liquid' ? 'liquid' : null);
+  if (!read || !work.reckoner.has(read.symbol)) return null;
   const { basis, per, rateForm } = read;
   return {
-    value: reckoner.valueOf(read.symbol),
+    value: work.reckoner.valueOf(read.symbol),
     basis,
     per,
     rateForm,
-    phase: phase ?? phaseByState(reckoner),
+    phase: phaseOf(definition, part, work),
   };
 }
 
-/** A sheet for gas or liquid is one for a gas as soon as a pressure is given. */
-function phaseByState(reckoner: Work['reckoner']): 'gas' | 'liquid' {
-  const { pressure } = fluidStateOf(reckoner);
-  return pressure === null ? 'liquid' : 'gas';
+/**
+ * The phase of a part. On a sheet for gas or liquid the property equations in use tell it; else a pressure is taken
+ * to mean a gas and a molar mass of the solvent a liquid. Null where nothing tells.
+ */
+function phaseOf({ phase }: CorrelationDefinition, part: Part, { reckoner, supplies }: Work): Phase | null {
+  if (part.phase) return part.phase;
+  if (phase === 'gas' || phase === 'liquid') return phase;
+  for (const { equation } of supplies.filled)
+    for (const told of ['gas', 'liquid'] as const)
+      if (equation.definition.gives.startsWith(`${told}-`)) return told;
+  const { pressure, molarMass } = fluidStateOf(reckoner);
+  if (pressure !== null) return 'gas';
+  return molarMass === null ? null : 'liquid';
 }
 
+type Phase = CoefficientInSI['phase'];
 type Reading = Pick<Coefficient, 'symbol' | 'basis' | 'per' | 'rateForm'>;
 
 function readingOf({ result, coefficient }: Part): Reading | null {
@@ -156,12 +161,12 @@ function readingOf({ result, coefficient }: Part): Reading | null {
 function conversionSteps(
   definition: CorrelationDefinition,
   part: Part,
-  { reckoner }: Work,
+  work: Work,
   outcomes: readonly PartOutcome[],
   state: FluidState,
 ): Step[] {
   const outcome = outcomes.find(({ key }) => key === part.key);
-  const inSI = coefficientInSI(definition, part, reckoner);
+  const inSI = coefficientInSI(definition, part, work);
   if (!outcome || !inSI) return [];
   const own = readingOf(part)?.symbol ?? part.result.symbol;
   return outcome.conversions.flatMap(
@@ -183,7 +188,7 @@ function conversionsOf(
 
 function fluxOf(definition: CorrelationDefinition, work: Work, force: ReadForce | null, state: FluidState) {
   const principal = definition.parts.filter(({ key }) => work.parts.has(key)).at(-1);
-  const inSI = principal ? coefficientInSI(definition, principal, work.reckoner) : null;
+  const inSI = principal ? coefficientInSI(definition, principal, work) : null;
   if (!force) return null;
   if (!inSI)
     return {

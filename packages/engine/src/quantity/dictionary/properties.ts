@@ -81,6 +81,6 @@ export const properties: DictionaryPart = {
     usual: 'g/mol',
     symbol: 'M_S',
     sign: 'positive',
-    hint: 'Of the liquid that carries the species: 0.018 kg/mol for water.',
+    hint: 'Of the liquid that carries the species: 18 g/mol for water.',
   },
 };
