@@ -12,14 +12,38 @@ export function DeskView({ sections }: { sections: readonly DeskSection[] }) {
       {section.items.length === 0 ? (
         <p className="desk-empty">{section.empty}</p>
       ) : (
-        <ul className="desk-items">
-          {section.items.map((item) => (
-            <DeskLine key={`${item.href} ${item.title} ${item.at}`} item={item} />
-          ))}
-        </ul>
+        <DeskItems items={inOrder(section)} />
       )}
     </section>
   ));
+}
+
+/** What fell to the person last stands first; what is due, by its day. */
+function inOrder({ key, items }: DeskSection): DeskItem[] {
+  return key === 'due' ? items : items.toSorted((a, b) => b.at.localeCompare(a.at));
+}
+
+const SHOWN = 6;
+
+/** The first few; a long list is folded from there on. */
+function DeskItems({ items }: { items: readonly DeskItem[] }) {
+  const first = items.length > SHOWN + 1 ? items.slice(0, SHOWN) : items;
+  const others = items.slice(first.length);
+  return (
+    <div>
+      <ul className="desk-items">{first.map(line)}</ul>
+      {others.length > 0 ? (
+        <details className="desk-more">
+          <summary>{others.length} more</summary>
+          <ul className="desk-items">{others.map(line)}</ul>
+        </details>
+      ) : null}
+    </div>
+  );
+}
+
+function line(item: DeskItem) {
+  return <DeskLine key={`${item.href} ${item.title} ${item.at}`} item={item} />;
 }
 
 function DeskLine({ item: { title, line, href, at } }: { item: DeskItem }) {

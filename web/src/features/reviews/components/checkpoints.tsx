@@ -26,7 +26,10 @@ export function Checkpoints({ points, checklist, missing, onTick }: CheckpointsP
               aria-invalid={lacking}
               onChange={(event) => onTick(point, event.target.checked)}
             />
-            <span>{text}</span>
+            <span>
+              {text}
+              {lacking ? <span className="choice-hint"> Not checked yet.</span> : null}
+            </span>
           </label>
         );
       })}

@@ -59,11 +59,16 @@ interface FieldRowProps {
   talk: Talk;
 }
 
-function FieldRow({ field: { path, label, content }, comments, remarks, talk }: FieldRowProps) {
+function FieldRow({
+  field: { path, label, ownLabel = false, content },
+  comments,
+  remarks,
+  talk,
+}: FieldRowProps) {
   return (
     <div className="review-row" id={rowId(path)} tabIndex={-1}>
       <div className="review-row-field">
-        {path === '' ? null : <h3 className="review-row-label">{label}</h3>}
+        {path === '' ? null : <h3 className={ownLabel ? 'heard-only' : 'review-row-label'}>{label}</h3>}
         {content}
       </div>
       <div className="review-row-margin">

@@ -56,10 +56,10 @@ export function ReviewArticle({ review, acts, check, differences }: ReviewArticl
         />
       }
     >
-      <ReviewState review={review} onTake={acts.take} />
+      <ReviewState review={review} groups={groups} onTake={acts.take} />
       <MachineReport inspection={review.inspection} rows={rows} />
       <FieldRows groups={groups} comments={review.comments} remarks={remarks} talk={acts.talk} />
-      <IterationList iterations={review.iterations} differences={differences} />
+      <IterationList iterations={review.iterations} rounds={review.rounds} differences={differences} />
       <VerdictList review={review} />
       {abilities.putForward ? <PutForwardForm review={review} onPutForward={acts.putForward} /> : null}
       {abilities.verdict ? (

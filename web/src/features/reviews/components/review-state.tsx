@@ -7,20 +7,23 @@ import { paths } from '../../../shared/paths';
 import { MarginNote } from '../../../shared/ui/margin-note';
 import { ProblemNotice } from '../../../shared/ui/problem-notice';
 import { MarginRow } from '../../../shared/ui/sheet-page';
+import { rowId, rowOf } from '../model/field-rows';
 import { openWords, progressWords } from '../model/review-words';
+import type { FieldGroup } from './sheet-fields';
 
 interface ReviewStateProps {
   review: Review;
+  groups: readonly FieldGroup[];
   onTake: () => Promise<unknown>;
 }
 
 /** How far the review has come, whose turn it is, and who looks at it. */
-export function ReviewState({ review, onTake }: ReviewStateProps) {
+export function ReviewState({ review, groups, onTake }: ReviewStateProps) {
   const { standing, abilities, comments } = review;
   const { working, problem, run } = useAct();
   const open = comments.filter(({ resolved }) => resolved === null).length;
   return (
-    <MarginRow notes={<ReviewNotes review={review} />}>
+    <MarginRow notes={<ReviewNotes review={review} groups={groups} />}>
       <div className="review-state">
         <p className="review-progress">{progressWords(review)}</p>
         <p>
@@ -52,7 +55,8 @@ function turnWords({ standing, hands, originator, revision }: Review): string {
     : 'It is with its reviewers.';
 }
 
-function ReviewNotes({ review: { originator, assignments, iterations } }: { review: Review }) {
+function ReviewNotes({ review, groups }: Pick<ReviewStateProps, 'review' | 'groups'>) {
+  const { originator, assignments, iterations } = review;
   const last = iterations.at(-1);
   return (
     <>
@@ -73,6 +77,29 @@ function ReviewNotes({ review: { originator, assignments, iterations } }: { revi
           </ul>
         )}
       </MarginNote>
+      <OpenComments review={review} groups={groups} />
     </>
+  );
+}
+
+/** The fields with open comments, each a way to its row. */
+function OpenComments({ review: { comments }, groups }: Pick<ReviewStateProps, 'review' | 'groups'>) {
+  const fields = groups.flatMap((group) => group.fields);
+  const rowPaths = fields.map(({ path }) => path);
+  const open = comments.filter(({ resolved }) => resolved === null);
+  const rows = [...new Set(open.map(({ field }) => rowOf(field, rowPaths) ?? ''))];
+  if (rows.length === 0) return null;
+  return (
+    <MarginNote title="Open comments on">
+      <ul className="plain-list">
+        {rows.map((row) => (
+          <li key={row}>
+            <a href={`#${rowId(row)}`}>
+              {fields.find(({ path }) => path === row)?.label ?? 'the sheet as a whole'}
+            </a>
+          </li>
+        ))}
+      </ul>
+    </MarginNote>
   );
 }

@@ -17,8 +17,10 @@ interface ReviewsViewProps {
   strip: (item: ListedCorrelation) => ReactNode;
 }
 
-/** Reviews by what they wait for, then every revision in review; each with where it holds. */
+/** Reviews by what they wait for, then what else is in review; each with where it holds. */
 export function ReviewsView({ sections, inReview, strip }: ReviewsViewProps) {
+  const waiting = new Set(sections.flatMap(({ items }) => items.map(({ href }) => href)));
+  const others = inReview.filter(({ slug, revision }) => !waiting.has(paths.review(slug, revision)));
   return (
     <>
       {sections.map(({ key, title, empty, items }) => (
@@ -41,12 +43,12 @@ export function ReviewsView({ sections, inReview, strip }: ReviewsViewProps) {
         </section>
       ))}
       <section className="reviews-section" aria-labelledby="reviews-all">
-        <h2 id="reviews-all">Everything in review</h2>
-        {inReview.length === 0 ? (
-          <p className="reviews-empty">No revision is in review.</p>
+        <h2 id="reviews-all">Also in review</h2>
+        {others.length === 0 ? (
+          <p className="reviews-empty">No other revision is in review.</p>
         ) : (
           <ul className="reviews-list">
-            {inReview.map((item) => (
+            {others.map((item) => (
               <li key={item.slug} className="reviews-line">
                 <div>
                   <Link to={paths.review(item.slug, item.revision)}>

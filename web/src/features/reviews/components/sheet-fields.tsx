@@ -24,8 +24,9 @@ import { TableOnSheet } from './table-on-sheet';
 export interface SheetField {
   /** Path in the definition, to which comments are anchored. */
   path: string;
-  /** What the field is called. */
+  /** What the field is called; `ownLabel`: its content says so itself. */
   label: string;
+  ownLabel?: boolean;
   content: ReactNode;
 }
 
@@ -168,7 +169,8 @@ function groupFields({ definition, tex }: FieldParts): SheetField[] {
 function quantityFields(definition: CorrelationDefinition): SheetField[] {
   const quantities = definition.quantities.map((quantity, i) => ({
     path: `quantities[${i}]`,
-    label: `Quantity ${quantityName(quantity.is)}`,
+    label: quantityName(quantity.is),
+    ownLabel: true,
     content: (
       <div className="field-quantity">
         <InlineEquation tex={symbolOnSheet(definition, quantity.symbol).tex} />
