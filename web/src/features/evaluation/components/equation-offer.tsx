@@ -3,45 +3,45 @@ import { useState } from 'react';
 import { inWords } from '../../../shared/format/in-words';
 import { lowerFirst } from '../../../shared/format/lower-first';
 import type { EvaluationState } from '../hooks/use-evaluation';
-import { listedEquations } from '../model/listed-equations';
+import { equationSets, type EquationSet } from '../model/listed-equations';
 
 /** One press for all empty properties: each takes the first equation that the sheet lists for it; can be undone. */
 export function EquationOffer({ evaluation }: { evaluation: EvaluationState }) {
   const { sections, duty, change } = evaluation;
-  const [set, setSet] = useState<Readonly<Record<string, string>>>({});
-  const open = listedEquations(sections, duty);
-  const standing = Object.entries(set).filter(([key, slug]) => duty.equations[key] === slug);
-  const use = () => {
-    const equations = Object.fromEntries(open.map(({ field, slug }) => [field.key, slug]));
-    setSet({ ...set, ...equations });
+  const [chosen, setChosen] = useState<Readonly<Record<string, string>>>({});
+  const sets = equationSets(sections, duty);
+  const standing = Object.entries(chosen).filter(([key, slug]) => duty.equations[key] === slug).length;
+  const use = ({ equations }: EquationSet) => {
+    setChosen({ ...chosen, ...equations });
     change({ do: 'choose-equations', equations });
   };
   const undo = () => {
-    change({ do: 'drop-equations', equations: set });
-    setSet({});
+    change({ do: 'drop-equations', equations: chosen });
+    setChosen({});
   };
   return (
     <div className="equation-offer" role="group" aria-label="Property equations">
-      {open.length > 0 ? (
-        <>
-          <Button size="small" onClick={use}>
-            Use property equations where listed
-          </Button>
-          <span>
-            Takes the first one listed for {inWords(open.map(({ field }) => lowerFirst(field.label)))}.
-          </span>
-        </>
-      ) : null}
-      <span role="status">
-        {standing.length > 0
-          ? `${standing.length === 1 ? 'One quantity is' : `${standing.length} quantities are`} filled by the first equation listed. Read below what each takes for granted.`
-          : ''}
-      </span>
-      {standing.length > 0 ? (
+      {sets.map((set) => (
+        <Button key={set.phase ?? ''} size="small" onClick={() => use(set)}>
+          {set.phase === null ? 'Use property equations where listed' : `Use those listed for a ${set.phase}`}
+        </Button>
+      ))}
+      {sets[0] ? <span>{offerWords(sets[0])}</span> : null}
+      <span role="status">{standing > 0 ? chosenWords(standing) : ''}</span>
+      {standing > 0 ? (
         <Button size="small" onClick={undo}>
           Undo
         </Button>
       ) : null}
     </div>
   );
+}
+
+function offerWords({ fields }: EquationSet): string {
+  return `Takes the first one listed for ${inWords(fields.map(({ label }) => lowerFirst(label.split(', ')[0] ?? label)))}.`;
+}
+
+function chosenWords(count: number): string {
+  const filled = count === 1 ? 'One quantity is' : `${count} quantities are`;
+  return `${filled} filled by the first equation listed; what each takes for granted stands under it.`;
 }

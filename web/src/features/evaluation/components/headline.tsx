@@ -8,7 +8,8 @@ import {
 import { symbolText } from '../../../shared/format/symbol-parts';
 import { Figure } from '../../../shared/ui/figure';
 import { InlineEquation } from '../../../shared/ui/equation';
-import { coefficientWords } from '../model/coefficient-words';
+import { RESULT_MEANT, coefficientWords } from '../model/coefficient-words';
+import { inCoherentUnit } from '../model/in-coherent-unit';
 import { lackingForCoefficient } from '../model/lacking-for-coefficient';
 import { CopyButton } from './copy-button';
 import { Mark } from './mark';
@@ -56,12 +57,23 @@ interface PartLineProps {
 function PartLine({ part, mark, definition, titled, lacking }: PartLineProps) {
   const own = definition.parts.find(({ key }) => key === part.key);
   const { symbol, value, unit } = part.coefficient ?? part.result;
+  const coherent = inCoherentUnit(value, unit);
+  const words = part.coefficient
+    ? coefficientWords(part.coefficient)
+    : RESULT_MEANT[own?.result.kind ?? 'Sherwood'];
   const tex = symbolTex(symbol, part.coefficient ? own?.coefficient?.tex : own?.result.tex);
   return (
     <div className="headline-part">
       {titled ? <h3>{part.title}</h3> : null}
       <p className="headline-number">
-        <InlineEquation tex={tex} /> = <Figure value={value} unit={unit} /> <Mark words={mark} />
+        <InlineEquation tex={tex} /> = <Figure value={value} unit={unit} />
+        {coherent ? (
+          <>
+            {' '}
+            = <Figure value={coherent.value} unit={coherent.unit} />
+          </>
+        ) : null}{' '}
+        <Mark words={mark} />
         <CopyButton
           quiet
           text={() => `${value} ${unit === '1' ? '' : unit}${mark ? ` (${mark})` : ''}`.trim()}
@@ -69,7 +81,7 @@ function PartLine({ part, mark, definition, titled, lacking }: PartLineProps) {
           Copy value
         </CopyButton>
       </p>
-      {part.coefficient ? <p className="headline-words">{coefficientWords(part.coefficient)}</p> : null}
+      {words ? <p className="headline-words">{words}</p> : null}
       {lacking.length > 0 ? (
         <p className="headline-words">
           The coefficient follows once these are given too: {lacking.map(symbolText).join(', ')}.

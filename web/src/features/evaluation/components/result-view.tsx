@@ -5,6 +5,7 @@ import { MarkedText } from '../../../shared/ui/marked-text';
 import { copyText } from '../model/copy-text';
 import { notableFindings } from '../model/refusing-findings';
 import type { Shown } from '../model/shown-outcome';
+import { unboundedWords } from '../model/unbounded-words';
 import { BasesTable } from './bases-table';
 import { CopyButton } from './copy-button';
 import { FindingText } from './finding-text';
@@ -28,6 +29,7 @@ export function ResultView({ shown, evaluation, firstNumber }: ResultViewProps) 
   const { outcome } = shown;
   const mark = outcome.outcome === 'deviating' ? outcome.mark : null;
   const notable = notableFindings(outcome.findings);
+  const unbounded = unboundedWords(outcome.findings);
   const reasons = new Map(
     outcome.outcome === 'deviating' ? outcome.deviations.map(({ symbol, reason }) => [symbol, reason]) : [],
   );
@@ -45,6 +47,11 @@ export function ResultView({ shown, evaluation, firstNumber }: ResultViewProps) 
       {notable.map((finding) => (
         <FindingText key={finding.symbol} finding={finding} deviation={reasons.get(finding.symbol)} />
       ))}
+      {unbounded ? (
+        <p>
+          <MarkedText text={unbounded} />
+        </p>
+      ) : null}
       {outcome.remarks.map((remark) => (
         <p key={remark}>{sentence(remark)}</p>
       ))}
@@ -54,7 +61,7 @@ export function ResultView({ shown, evaluation, firstNumber }: ResultViewProps) 
       </div>
       <GroupsTable numbers={outcome} mark={mark} definition={sheet.definition} />
       <BasesTable numbers={outcome} mark={mark} />
-      <StepsList steps={outcome.steps} firstNumber={firstNumber} mark={mark} />
+      <StepsList steps={outcome.steps} firstNumber={firstNumber} mark={mark} definition={sheet.definition} />
       <Provenance shown={shown} sheet={sheet} />
     </div>
   );

@@ -1,5 +1,6 @@
-import type { Step } from '@merestone/engine';
+import type { CorrelationDefinition, Step } from '@merestone/engine';
 import { memo } from 'react';
+import { nameOfResult } from '../../../shared/format/part-words';
 import { Equation } from '../../../shared/ui/equation';
 import { Figure } from '../../../shared/ui/figure';
 import { MarginNote } from '../../../shared/ui/margin-note';
@@ -10,6 +11,7 @@ interface StepsListProps {
   steps: readonly Step[];
   firstNumber: number;
   mark: string | null;
+  definition: CorrelationDefinition;
 }
 
 const WORDS: Readonly<Record<Step['kind'], string>> = {
@@ -26,7 +28,7 @@ const WORDS: Readonly<Record<Step['kind'], string>> = {
 const CARRIES_MARK = new Set<Step['kind']>(['result', 'coefficient', 'conversion', 'flux', 'intermediate']);
 
 /** The whole calculation in numbered lines, each in symbols and with the values put in. */
-export const StepsList = memo(function StepsList({ steps, firstNumber, mark }: StepsListProps) {
+export const StepsList = memo(function StepsList({ steps, firstNumber, mark, definition }: StepsListProps) {
   return (
     <section aria-labelledby="written-out">
       <h2 id="written-out">Written out</h2>
@@ -38,7 +40,7 @@ export const StepsList = memo(function StepsList({ steps, firstNumber, mark }: S
       <ol className="steps" aria-label="Steps">
         {steps.map((step, i) => (
           <li key={`${step.kind} ${step.symbol}`}>
-            <MarginRow notes={<StepNote step={step} mark={mark} />}>
+            <MarginRow notes={<StepNote step={step} mark={mark} name={nameOf(step, definition)} />}>
               <Equation tex={step.tex} number={firstNumber + i} />
               {step.texWithNumbers && step.texWithNumbers !== step.tex ? (
                 <Equation tex={step.texWithNumbers} />
@@ -51,11 +53,18 @@ export const StepsList = memo(function StepsList({ steps, firstNumber, mark }: S
   );
 });
 
-function StepNote({ step, mark }: { step: Step; mark: string | null }) {
+/** What the line's number is: a result by its kind, all else as the engine names it. */
+function nameOf({ kind, symbol, note }: Step, definition: CorrelationDefinition): string | undefined {
+  const part =
+    kind === 'result' ? definition.parts.find(({ result }) => result.symbol === symbol) : undefined;
+  return part ? nameOfResult(definition, part.key) : note;
+}
+
+function StepNote({ step, mark, name }: { step: Step; mark: string | null; name: string | undefined }) {
   return (
     <MarginNote title={WORDS[step.kind]}>
       <p>
-        {step.note ? `${step.note.replace(/\.$/, '')}: ` : null}
+        {name ? `${name.replace(/\.$/, '')}: ` : null}
         <Figure value={step.value} unit={step.unit} />{' '}
         {CARRIES_MARK.has(step.kind) ? <Mark words={mark} /> : null}
       </p>

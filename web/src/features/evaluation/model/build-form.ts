@@ -98,7 +98,11 @@ function sheetField(quantity: Quantity, sheet: EvaluatedSheet, duty: DutyChoices
     ...quantityField(quantity, symbol),
     optional: quantity.role === 'state' && !needed.has(symbol),
     neededFor: needed.get(symbol) ?? [],
-    equations: choices.map(({ slug, definition }) => ({ slug, title: definition.title })),
+    equations: choices.map(({ slug, definition }) => ({
+      slug,
+      title: definition.title,
+      gives: definition.gives,
+    })),
     filledBy: chosen ? equationInUse(chosen.slug, chosen.definition, symbol, sheet, duty) : null,
   };
 }

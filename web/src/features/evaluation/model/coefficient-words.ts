@@ -1,4 +1,4 @@
-import type { CoefficientValue } from '@merestone/engine';
+import type { CoefficientValue, Part } from '@merestone/engine';
 
 const BASIS = {
   concentration: 'on a concentration difference',
@@ -11,6 +11,14 @@ const RATE_FORM = {
   'stagnant-inert': 'through a stagnant inert gas, the drift factor included',
   'drift-free': 'free of drift, for the logarithmic flux law',
 } as const;
+
+/** What a result is that the source gives as such, with no coefficient made from it. */
+export const RESULT_MEANT: Readonly<Partial<Record<Part['result']['kind'], string>>> = {
+  coefficient: 'as the source gives it: on a concentration difference, per unit area; low-flux form',
+  'volumetric-coefficient':
+    'as the source gives it: on a concentration difference, per unit volume; low-flux form',
+  'interfacial-area': 'area of the interface per unit volume',
+};
 
 /** What a coefficient is meant with: its driving force, its reference and its rate form. */
 export function coefficientWords({

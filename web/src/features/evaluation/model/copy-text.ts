@@ -7,6 +7,7 @@ import { coefficientWords } from './coefficient-words';
 import type { EvaluatedSheet } from './evaluated-sheet';
 import { findingLabel } from './finding-label';
 import { notableFindings } from './refusing-findings';
+import { unboundedWords } from './unbounded-words';
 import type { Shown } from './shown-outcome';
 
 interface CopyTextInput {
@@ -17,6 +18,7 @@ interface CopyTextInput {
 /** The result as plain text with everything that must travel with it: mark, findings, provenance, caution. */
 export function copyText({ sheet, shown }: CopyTextInput): string {
   const { outcome } = shown;
+  const unbounded = unboundedWords(outcome.findings);
   const mark = outcome.outcome === 'deviating' ? outcome.mark : null;
   const blocks = [
     [
@@ -39,10 +41,10 @@ export function copyText({ sheet, shown }: CopyTextInput): string {
           ...outcome.flux.warnings,
         ])
       : [],
-    block(
-      'Findings',
-      notableFindings(outcome.findings).map((finding) => finding.message),
-    ),
+    block('Findings', [
+      ...notableFindings(outcome.findings).map((finding) => finding.message),
+      ...(unbounded ? [unbounded] : []),
+    ]),
     block('Remarks', outcome.remarks),
     provenanceLines(shown),
     [shown.kind === 'kept' ? shown.outcome.caution : sheet.caution],

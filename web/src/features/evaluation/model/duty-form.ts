@@ -15,7 +15,7 @@ export interface FormField {
   hint: string | null;
   optional: boolean;
   /** Property equations that may fill it. */
-  equations: { slug: string; title: string }[];
+  equations: { slug: string; title: string; gives: string }[];
   filledBy: EquationInUse | null;
   /** What a chosen property equation finds from this field. */
   neededFor: string[];

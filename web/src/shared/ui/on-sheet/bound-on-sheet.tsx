@@ -20,7 +20,7 @@ export function BoundOnSheet({ bound, definition, finding }: BoundOnSheetProps) 
       stretches={bound.stretches}
       unit={unit}
       reading={finding ?? null}
-      note={boundWords(bound)}
+      note={bound.stretches.length === 0 && finding ? null : boundWords(bound)}
     />
   );
 }
