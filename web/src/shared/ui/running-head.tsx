@@ -6,6 +6,8 @@ import './running-head.css';
 interface RunningHeadProps {
   geometry: ReactNode;
   correlation: ReactNode;
+  /** Geometry and correlation in plain words, for the top of every printed page. */
+  printed?: string;
   revision: number;
   standing: Standing;
   /** The whole content hash; its first twelve figures are shown. */
@@ -13,9 +15,12 @@ interface RunningHeadProps {
 }
 
 /** The line on top of every sheet: which revision this is, and the start of its content hash. */
-export function RunningHead({ geometry, correlation, revision, standing, hash }: RunningHeadProps) {
+export function RunningHead({ geometry, correlation, printed, revision, standing, hash }: RunningHeadProps) {
   return (
     <p className="running-head">
+      {printed === undefined ? null : (
+        <style>{printedHead(`${printed} · rev ${revision} · ${standing} · ${shortHash(hash)}`)}</style>
+      )}
       <span className="running-head-geometry">{geometry}</span>
       <span>{correlation}</span>
       <span>rev {revision}</span>
@@ -26,6 +31,12 @@ export function RunningHead({ geometry, correlation, revision, standing, hash }:
       </span>
     </p>
   );
+}
+
+/** The running head and the page number on paper; a page margin takes text only from a style. */
+function printedHead(text: string): string {
+  const quoted = text.replace(/["\\\n\r\f<]/g, ' ');
+  return `@page { @top-left { content: "${quoted}"; } @bottom-right { content: counter(page) " / " counter(pages); } }`;
 }
 
 /** The first twelve figures in groups of four: `7f3a c19e 04b2`. */

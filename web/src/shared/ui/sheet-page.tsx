@@ -1,4 +1,5 @@
 import { useEffect, type ReactNode } from 'react';
+import './print.css';
 import './sheet-page.css';
 
 interface SheetPageProps {

@@ -1,5 +1,6 @@
 import type { Finding } from '@merestone/engine';
 import { Link } from 'react-router-dom';
+import { firstSentence } from '../model/first-sentence';
 import { paths } from '../../../shared/paths';
 import { MarkedText } from '../../../shared/ui/marked-text';
 
@@ -36,9 +37,4 @@ export function FindingText({ finding, deviation }: FindingTextProps) {
       ) : null}
     </p>
   );
-}
-
-/** What is so, without the advice that follows it. */
-function firstSentence(message: string): string {
-  return message.split(/(?<=\.)\s+(?=\p{Lu})/u)[0] ?? message;
 }

@@ -1,9 +1,10 @@
-import type { Numbers, UsedEquation } from '@merestone/engine';
+import type { Finding, Numbers, UsedEquation } from '@merestone/engine';
 import { symbolText } from '../../../shared/format/symbol-parts';
 import { formatUnit } from '../../../shared/format/format-unit';
 import { NUMBER_SPACE } from '../../../shared/format/format-number';
 import { accuracyOfResult } from '../../../shared/format/plain-words';
 import { coefficientWords } from './coefficient-words';
+import { firstSentence } from './first-sentence';
 import type { EvaluatedSheet } from './evaluated-sheet';
 import { findingLabel } from './finding-label';
 import { notableFindings } from './refusing-findings';
@@ -42,7 +43,7 @@ export function copyText({ sheet, shown }: CopyTextInput): string {
         ])
       : [],
     block('Findings', [
-      ...notableFindings(outcome.findings).map((finding) => finding.message),
+      ...notableFindings(outcome.findings).map((finding) => toldIn(finding, shown)),
       ...(unbounded ? [unbounded] : []),
     ]),
     block('Remarks', outcome.remarks),
@@ -63,6 +64,12 @@ function recordLine(shown: CopyTextInput['shown']): string {
   return shown.kind === 'kept'
     ? `Kept ${shown.outcome.at} as ${shown.outcome.id}`
     : 'Preview, not on record: computed in the browser';
+}
+
+/** A finding in its words; where a deviation is on record for it, without the advice to record one. */
+function toldIn({ symbol, message }: Finding, { outcome }: CopyTextInput['shown']): string {
+  const recorded = outcome.outcome === 'deviating' && outcome.deviations.some((d) => d.symbol === symbol);
+  return recorded ? firstSentence(message) : message;
 }
 
 function deviationLines(shown: CopyTextInput['shown']): string[] {

@@ -48,6 +48,7 @@ export function SheetArticle({ sheet, live, links, duty, outcome, documents, rep
         <RunningHead
           geometry={<Link to={paths.geometry(sheet.geometry)}>{sheet.geometryName}</Link>}
           correlation={inWords(definition.authors)}
+          printed={`${sheet.geometryName} · ${inWords(definition.authors)}`}
           revision={sheet.revision}
           standing={sheet.standing}
           hash={sheet.hash}
@@ -56,6 +57,9 @@ export function SheetArticle({ sheet, live, links, duty, outcome, documents, rep
     >
       <StandingNotice sheet={sheet} />
       {links}
+      <p className="sheet-jump">
+        <a href="#your-duty">To your duty and its result</a>
+      </p>
       <EquationsSection sheet={sheet} tex={tex} />
       <BoundsSection sheet={sheet} live={live} />
       <section aria-labelledby="your-duty">
