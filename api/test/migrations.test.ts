@@ -1,6 +1,7 @@
 import { cpSync, mkdtempSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
+import { migrate } from 'drizzle-orm/better-sqlite3/migrator';
 import { afterEach, beforeEach, describe, expect, it } from 'vitest';
 import { inRepository } from '../src/config/paths.js';
 import { Connection, openSqlite } from '../src/database/connection.js';
@@ -108,6 +109,66 @@ describe('migrating', () => {
 
     expect(() => migrateDatabase(connection, losing)).toThrow(/references lead nowhere: .*names no person/);
     expect(one('PRAGMA foreign_keys')).toBe(1);
+  });
+});
+
+/** The migrations up to one, as an office had them before the next came. */
+function upTo(count: number): string {
+  const target = join(folder, 'former-migrations');
+  cpSync(inRepository('api/migrations'), target, { recursive: true });
+  const journalFile = join(target, 'meta', '_journal.json');
+  const journal = JSON.parse(readFileSync(journalFile, 'utf8')) as { entries: unknown[] };
+  writeFileSync(journalFile, JSON.stringify({ ...journal, entries: journal.entries.slice(0, count) }));
+  return target;
+}
+
+describe('the migration that brings rounds of review', () => {
+  /** Two iterations; the first was recommended, changed, and changed back to the same words. */
+  const FORMER_ROWS = `
+    INSERT INTO geometry VALUES ('pipe', 'Pipe', '', '', '', '[]');
+    INSERT INTO correlation VALUES (1, 'one', 'pipe', 't0', 'p');
+    INSERT INTO revision VALUES (1, 1, NULL, 1, 'p', 't0');
+    INSERT INTO revision_content (id, revision_id, iteration, format, canonical_text, hash, at, by_id) VALUES
+      (1, 1, 1, 'f', '{"title":"a"}', 'A', 't0', 'p'),
+      (2, 1, 2, 'f', '{"title":"b"}', 'B', 't3', 'p'),
+      (3, 1, 3, 'f', '{"title":"a"}', 'A', 't5', 'p');
+    INSERT INTO standing_event VALUES (1, 1, 'approved', 'A', 't9', 'p', 'P', NULL, NULL);
+    INSERT INTO submission VALUES (1, 1, 'A', 't1', 'p', 'P', 'e', '[]'), (2, 1, 'A', 't6', 'p', 'P', 'e', '[]');
+    INSERT INTO review VALUES
+      (1, 1, 'A', 'r', 'R', 'recommend', '{}', NULL, 't2'), (2, 1, 'A', 'r', 'R', 'recommend', '{}', NULL, 't7');
+    INSERT INTO comment VALUES (1, 1, 'B', '', 'x', 'p', 'P', 't4');
+    INSERT INTO approval VALUES (1, 1, 'A', 'a', 'A', 'm', NULL, 't9');`;
+
+  it('keeps every row and says of each which iteration and round it belongs to', () => {
+    const guards = readFileSync(inRepository('api/src/database/guards.sql'), 'utf8');
+    const former = upTo(4);
+    connection.sqlite.pragma('foreign_keys = OFF');
+    migrate(connection.query, { migrationsFolder: former });
+    // The guards of these tables were there then, too.
+    for (const table of ['submission', 'review', 'comment']) {
+      const trigger = new RegExp(`CREATE TRIGGER ${table}_keeps_rows[\\s\\S]*?\\nEND;`).exec(guards);
+      connection.sqlite.exec(trigger?.[0] ?? '');
+    }
+    connection.sqlite.exec(FORMER_ROWS);
+
+    migrateDatabase(connection);
+
+    const rows = (sql: string): unknown[] => connection.sqlite.prepare(sql).raw().all();
+    expect(rows('SELECT id, iteration, round FROM submission')).toEqual([
+      [1, 1, 1],
+      [2, 3, 2],
+    ]);
+    expect(rows('SELECT id, iteration, round FROM review')).toEqual([
+      [1, 1, 1],
+      [2, 3, 2],
+    ]);
+    expect(rows('SELECT id, iteration FROM comment')).toEqual([[1, 2]]);
+    expect(rows('SELECT standing, effective_from, superseded_from FROM revision_now')).toEqual([
+      ['approved', 't9', null],
+    ]);
+    expect(() => connection.sqlite.exec("UPDATE review SET verdict = 'decline'")).toThrow(
+      /cannot be changed/,
+    );
   });
 });
 

@@ -3,7 +3,8 @@ import { afterAll, beforeAll, describe, expect, test } from 'vitest';
 import type { CandidatesResponse } from '../src/candidates/dto/candidates-response.dto.js';
 import type { CorrelationPage } from '../src/correlations/dto/correlation-page.dto.js';
 import type { Sheet } from '../src/correlations/dto/sheet.dto.js';
-import { UNAPPROVED } from '../src/common/standing.js';
+import { STANDINGS, UNAPPROVED } from '../src/common/standing.js';
+import type { Desk } from '../src/desk/dto/desk.dto.js';
 import { FixtureFiles } from '../src/database/seed/fixture-files.js';
 import { SeedService } from '../src/database/seed/seed.service.js';
 import { correlationStanding } from '../src/database/seed/standing-rule.js';
@@ -102,6 +103,41 @@ describe('the demo office', () => {
     ];
     expect(new Set(people).size).toBe(4);
     expect(sheet.checks.every(({ passed }) => passed)).toBe(true);
+  });
+
+  test('shows every standing, and a revision that holds from a later day on', async () => {
+    const { facets } = await page(auditor);
+    expect(facets.standing.map(({ value }) => value)).toEqual([...STANDINGS]);
+    const successors = await Promise.all(
+      ['superseded', 'withdrawn'].map(async (standing) => {
+        const [item] = (await page(engineer, { standing })).items;
+        const { body } = await engineer
+          .get(`/api/correlations/${item?.slug ?? ''}/revisions/${item?.revision ?? 0}`)
+          .expect(200);
+        return (body as Sheet).successor;
+      }),
+    );
+    expect(successors).toMatchObject([{ revision: 2 }, { revision: 2 }]);
+    const pending = (await engineer.get('/api/correlations/stirred-tank-vant-riet-noncoalescing').expect(200))
+      .body as Sheet;
+    expect(pending).toMatchObject({ revision: 1, inForce: true });
+    expect(pending.revisions.map(({ standing }) => standing)).toEqual(['approved', 'approved']);
+  });
+
+  test('has work on the desk of everybody', async () => {
+    const waiting = async (name: string): Promise<string[]> => {
+      const { sections } = (await (await demo(name)).get('/api/desk').expect(200)).body as Desk;
+      return sections.filter(({ items }) => items.length > 0).map(({ key }) => key);
+    };
+    expect(await waiting('engineer')).toContain('drafts');
+    expect(await waiting('engineer2')).toContain('drafts');
+    for (const name of ['reviewer', 'reviewer2', 'reviewer3'])
+      expect(await waiting(name)).toContain('to-review');
+    expect([...(await waiting('reviewer')), ...(await waiting('reviewer3'))]).toContain('to-take');
+    expect(await waiting('authority')).toEqual(
+      expect.arrayContaining(['to-approve', 'reports', 'due', 'appointments', 'notices']),
+    );
+    expect(await waiting('admin')).toContain('appointments');
   });
 
   test('is not set up a second time', async () => {
