@@ -95,11 +95,11 @@ describe('POST /api/citations/reading', () => {
 
   it.each([
     ['nobody', 401],
-
     ['authority', 403],
     ['auditor', 403],
     ['administrator', 403],
     ['engineer', 200],
+    ['reviewer', 200],
   ] as const)('answers the %s with %i', async (who, status) => {
     const body = { text: '@book{x, title={T}}' };
     const { default: supertest } = await import('supertest');
