@@ -7,8 +7,9 @@ import { emptyStretch } from '../model/empty-rows';
 import { draftFieldId } from '../model/field-id';
 import { useDraftTools } from './draft-context';
 import { EndFields } from './end-fields';
+import { LongTextField } from './fields/long-text-field';
 import { PickField } from './fields/pick-field';
-import { TextField } from './fields/text-field';
+
 import { RowAct } from './row-list';
 
 interface BoundFieldsProps {
@@ -73,15 +74,17 @@ export const BoundFields = memo(function BoundFields({ row, at, path, symbols }:
         </div>
       )}
       <div className="draft-grid">
-        <TextField
+        <LongTextField
           path={`${path}.place`}
+          rows={1}
           label="Place (optional)"
           value={row.place}
           onChange={(place) => edit({ place })}
           hint="Where in the source the limits stand, or who says so."
         />
-        <TextField
+        <LongTextField
           path={`${path}.note`}
+          rows={1}
           label="Note (optional)"
           value={row.note}
           onChange={(note) => edit({ note })}

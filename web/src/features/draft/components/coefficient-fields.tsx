@@ -70,7 +70,7 @@ export function CoefficientFields({ path, coefficient, onChange }: CoefficientFi
             label="Expression of the coefficient"
             value={coefficient.expression}
             onChange={(expression) => onChange({ expression })}
-            hint="From the result: Sh*D/d."
+            hint={coefficient.expression === '' ? 'From the result: Sh*D/d.' : undefined}
           />
         </>
       ) : null}

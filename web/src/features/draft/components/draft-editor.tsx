@@ -101,7 +101,7 @@ export function DraftEditor({ opening, person, onEntered, onSubmitted }: DraftEd
           <VerificationSection verification={form.verification} />
           <SubmitSection draft={draft} personId={person.id} onSubmit={(ids) => void submit(ids)} />
         </form>
-        <p className="sheet-caution">
+        <p className="draft-caution">
           An approval speaks for this office and the stated use only. Whoever uses a correlation for design
           answers for it, under local codes and with the licence that they ask for.
         </p>

@@ -40,26 +40,39 @@ export function EndFields({ path, label, end, onChange }: EndFieldsProps) {
             choices={CLOSINGS}
             onChange={(closed) => onChange({ closed: closed === 'open' ? 'open' : '' })}
           />
-          {end.nature === 'data' ? (
-            <TextField
-              path={`${path}.reach`}
-              label="Reach"
-              value={end.reach}
-              onChange={(reach) => onChange({ reach })}
-              hint="Factor past it for a deviation; 2 unless told."
-              number
-            />
-          ) : null}
           {end.nature === 'physical' ? null : (
-            <SlugsField
-              path={`${path}.beyond`}
-              label="Sheets that hold beyond (optional)"
-              value={end.beyond}
-              onChange={(beyond) => onChange({ beyond })}
-            />
+            <details className="draft-more draft-beyond">
+              <summary>{pastWords(end)}</summary>
+              {end.nature === 'data' ? (
+                <TextField
+                  path={`${path}.reach`}
+                  label="Reach (optional)"
+                  value={end.reach}
+                  onChange={(reach) => onChange({ reach })}
+                  hint="Factor past the limit up to which a deviation may be recorded; 2 unless told."
+                  number
+                />
+              ) : null}
+              <SlugsField
+                path={`${path}.beyond`}
+                label="Sheets that hold beyond (optional)"
+                value={end.beyond}
+                onChange={(beyond) => onChange({ beyond })}
+              />
+            </details>
           )}
         </>
       ) : null}
     </div>
   );
+}
+
+/** What is said of the other side, so that nothing has to be unfolded to be known. */
+function pastWords({ nature, reach, beyond }: EndForm): string {
+  const said = [
+    nature === 'data' && reach !== '' && `reach ${reach}`,
+    beyond.length > 0 && `${beyond.length} ${beyond.length === 1 ? 'sheet holds' : 'sheets hold'} beyond`,
+  ].filter(Boolean);
+  if (said.length > 0) return said.join('; ');
+  return nature === 'data' ? 'reach, sheets that hold beyond' : 'sheets that hold beyond';
 }

@@ -59,7 +59,11 @@ export function FormulaFields({ path, formula, onChange, label }: FormulaFieldsP
           label={label}
           value={formula.expression}
           onChange={(expression) => onChange({ expression })}
-          hint="+ - * / ^ and brackets; sqrt, exp, ln, log10, min, max and others: 0.023*Re^0.83*Sc^(1/3)."
+          hint={
+            formula.expression === ''
+              ? '+ - * / ^ and brackets; sqrt, exp, ln, log10, min, max and others: 0.023*Re^0.83*Sc^(1/3).'
+              : undefined
+          }
         />
       )}
       <TickField

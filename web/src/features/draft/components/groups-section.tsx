@@ -98,7 +98,7 @@ const GroupFields = memo(function GroupFields({ row, at, path }: GroupFieldsProp
           label="Name"
           value={row.name}
           onChange={(name) => edit({ name })}
-          hint="With the length it stands on, where several could be meant."
+          placeholder="with the length it stands on, where several could be meant"
         />
       </div>
       <ExpressionField
@@ -107,8 +107,8 @@ const GroupFields = memo(function GroupFields({ row, at, path }: GroupFieldsProp
         value={row.expression}
         onChange={(expression) => edit({ expression })}
       />
-      <details className="draft-more" open={row.note !== '' || row.tex !== '' || undefined}>
-        <summary>Note, typeset form</summary>
+      <details className="draft-more">
+        <summary>{row.note || 'note, typeset form'}</summary>
         <div className="draft-grid">
           <TextField
             path={`${path}.note`}

@@ -54,7 +54,7 @@ export const PartFields = memo(function PartFields({ row, at, path, alone }: Par
           onChange={(title) =>
             edit({ title, ...(followsTitle && !alone ? { key: suggestSlug({ title }) } : {}) })
           }
-          hint="Wall coefficient, mean over the length; gas side …"
+          placeholder="Wall coefficient, mean over the length; gas side …"
         />
         <TextField
           path={`${path}.key`}

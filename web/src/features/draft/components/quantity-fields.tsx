@@ -68,8 +68,8 @@ export const QuantityFields = memo(function QuantityFields({ row, at, path, tabl
           ))}
         </datalist>
       </div>
-      <details className="draft-more" open={hasMore(row) || undefined}>
-        <summary>Role, state, meaning, where its value may come from</summary>
+      <details className="draft-more">
+        <summary>{moreWords(row)}</summary>
         <div className="draft-grid">
           <PickField
             path={`${path}.role`}
@@ -153,6 +153,15 @@ function EquationTicks({ row, path, onChange }: EquationTicksProps) {
   );
 }
 
-function hasMore({ role, at, meaning, tex, table, equations }: QuantityRow): boolean {
-  return [role, at, meaning, tex, table].some((text) => text !== '') || equations.length > 0;
+/** What is folded away, so that nothing has to be unfolded to be known. */
+function moreWords({ role, at, meaning, table, equations }: QuantityRow): string {
+  const said = [
+    ROLES.find(({ value }) => role !== '' && value === role)?.label,
+    at && `taken at ${at}`,
+    meaning,
+    table && `filled by table ${table}`,
+    equations.length > 0 &&
+      `${equations.length} property ${equations.length === 1 ? 'equation' : 'equations'}`,
+  ].filter(Boolean);
+  return said.length > 0 ? said.join('; ') : 'role, state, meaning, where its value may come from';
 }

@@ -64,11 +64,11 @@ const StepFields = memo(function StepFields({ row, at, path }: StepFieldsProps) 
         />
       </div>
       <FormulaFields path={path} formula={row} onChange={edit} label="Expression" />
-      <details
-        className="draft-more"
-        open={row.dimensional || row.note !== '' || row.tex !== '' || undefined}
-      >
-        <summary>Dimensional formula, note, typeset form</summary>
+      <details className="draft-more">
+        <summary>
+          {[row.dimensional && 'a dimensional formula', row.note].filter(Boolean).join('; ') ||
+            'dimensional formula, note, typeset form'}
+        </summary>
         <TickField
           path={`${path}.dimensional`}
           label="Its constant carries units"

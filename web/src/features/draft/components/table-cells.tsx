@@ -32,6 +32,7 @@ export function TableCells({ row, path, symbols, onChange, onRemove }: TableCell
       <Cell
         path={`${path}.label`}
         label={`Label of ${name}`}
+        long
         value={row.label}
         onChange={(label) => onChange({ label })}
       />
@@ -48,6 +49,7 @@ export function TableCells({ row, path, symbols, onChange, onRemove }: TableCell
       <Cell
         path={`${path}.note`}
         label={`Note on ${name}`}
+        long
         value={row.note}
         onChange={(note) => onChange({ note })}
       />
@@ -65,17 +67,18 @@ interface CellProps {
   label: string;
   value: string;
   number?: boolean;
+  long?: boolean;
   onChange: (value: string) => void;
 }
 
-function Cell({ path, label, value, number = false, onChange }: CellProps) {
+function Cell({ path, label, value, number = false, long = false, onChange }: CellProps) {
   const id = draftFieldId(path);
   const error = useDraftTools().problemAt(path)?.message;
   return (
     <td>
       <input
         id={id}
-        className={number ? 'draft-input draft-cell draft-cell-number' : 'draft-input draft-cell'}
+        className={`draft-input draft-cell ${number ? 'draft-cell-number' : long ? 'draft-cell-long' : ''}`}
         aria-label={label}
         aria-invalid={error !== undefined}
         aria-describedby={error ? `${id}-error` : undefined}

@@ -1,3 +1,4 @@
+import { Button } from 'antd';
 import { memo, useState } from 'react';
 import { SetTable } from '../../../shared/ui/set-table';
 import type { QuantityRow, TableForm, TableRowForm } from '../model/draft-form';
@@ -53,14 +54,13 @@ export const TableFields = memo(function TableFields({ table, at, path, quantiti
           label="Title of the table"
           value={table.title}
           onChange={(title) => edit({ title, ...(followsTitle ? { name: suggestSlug({ title }) } : {}) })}
-          hint="Packings with their constants …"
+          placeholder="Packings with their constants …"
         />
         <TextField
           path={`${path}.name`}
           label="Key"
           value={table.name}
           onChange={(name) => edit({ name })}
-          hint="Quantities name it: packing."
           code
         />
       </div>
@@ -112,11 +112,9 @@ export const TableFields = memo(function TableFields({ table, at, path, quantiti
         hint="The first line names the columns: label, then symbols of this sheet, and note if there is one."
         rows={3}
       />
-      <div className="draft-row-acts">
-        <button type="button" className="draft-act" disabled={pasted.trim() === ''} onClick={paste}>
-          take the pasted rows over
-        </button>
-      </div>
+      <Button disabled={pasted.trim() === ''} onClick={paste}>
+        Take the pasted rows over
+      </Button>
       <div role="status" className="draft-told" id={`${draftFieldId(path)}-told`}>
         {told.map((line) => (
           <p key={line}>{line}</p>

@@ -54,7 +54,7 @@ export function TryOutNote({ live, input, tried, onChange }: TryOutNoteProps) {
           </select>
         </label>
       ))}
-      {tryOutFields(compiled, input.rows).map(({ symbol, label, tex, unit, units, optional }) => (
+      {tryOutFields(compiled, input).map(({ symbol, label, tex, unit, units, optional }) => (
         <QuantityField
           key={symbol}
           id={`draft-try-${symbol}`}

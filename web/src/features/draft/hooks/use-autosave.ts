@@ -5,6 +5,7 @@ import type { Sheet, Standing } from '../../../shared/api/types';
 import { fetchRevision, putContent } from '../api/draft-sheets';
 import type { DraftForm } from '../model/draft-form';
 import type { Opening } from '../model/opening';
+import { mayPass } from '../model/save-words';
 import type { DraftBase } from '../model/stored-draft';
 
 const SAVE_MS = 1500;
@@ -114,9 +115,4 @@ export type Autosave = ReturnType<typeof useAutosave>;
 
 function isStale({ status, code }: ApiProblem): boolean {
   return status === 412 || code === 'stale';
-}
-
-/** A lost connection or a failing server is worth another try; a refusal is not. */
-function mayPass({ status }: ApiProblem): boolean {
-  return status === 0 || status >= 500;
 }

@@ -119,6 +119,7 @@ export function useDraft(opening: Opening, personId: string) {
 
   const saveState = saveStateOf({
     entered: base !== null,
+    toOpen: opening.kind === 'revision' ? opening.nextRevision : null,
     unsaved,
     kept,
     conflict: autosave.theirs !== null,
@@ -128,7 +129,7 @@ export function useDraft(opening: Opening, personId: string) {
     whole: live.verdict.definition !== null && live.form === form,
     empty: live.verdict.empty,
     wrong: live.verdict.wrong,
-    failure: autosave.failure ? autosave.failure.detail || autosave.failure.title : null,
+    failure: autosave.failure,
   });
 
   return {

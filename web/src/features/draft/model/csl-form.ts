@@ -38,7 +38,7 @@ export function citationOf(row: CitationFields): CslItem {
     page: filled(row.page),
     DOI: filled(row.doi),
   };
-  return compact({ ...kept, ...members, type: row.type }) as CslItem;
+  return compact({ ...kept, ...members, type: row.type });
 }
 
 /** `Gilliland, E. R.`; a body, which has no given name, in braces as BibTeX writes it. */

@@ -100,7 +100,12 @@ function nameOfRow(form: DraftForm, list: string, at: number): string {
 function memberWords(step: string): string {
   const [, name = step, index] = /^([A-Za-z]+)\[(\d+)\]$/.exec(step) ?? [];
   const words = MEMBERS[name] ?? name;
-  return index === undefined ? words : `${words.replace(/s$/, '')} ${Number(index) + 1}`;
+  return index === undefined ? words : `${words.replace(/(ch)?e?s$/, singularEnd)} ${Number(index) + 1}`;
+}
+
+/** `stretches` is one stretch, `pieces` one piece. */
+function singularEnd(end: string): string {
+  return end === 'ches' ? 'ch' : end === 'es' ? 'e' : '';
 }
 
 function capital(text: string): string {

@@ -1,3 +1,5 @@
+import type { ApiProblem } from '../../../shared/api/api-problem';
+import { lowerFirst } from '../../../shared/format/lower-first';
 import type { FormProblem } from './form-reading';
 
 /** Where the draft is kept at this moment. */
@@ -15,6 +17,8 @@ export type SaveState =
 export interface SaveFacts {
   /** Whether the register has a draft that this one continues. */
   entered: boolean;
+  /** The revision that is still to be opened; null for a new sheet. */
+  toOpen: number | null;
   /** Whether the register has everything that is in the form. */
   unsaved: boolean;
   /** Whether this browser keeps it. */
@@ -30,28 +34,36 @@ export interface SaveFacts {
   empty: readonly FormProblem[];
   wrong: readonly FormProblem[];
   /** What the server said instead of taking it. */
-  failure: string | null;
+  failure: Pick<ApiProblem, 'status' | 'title' | 'detail'> | null;
 }
 
 /** Tells one state from all the facts. */
 export function saveStateOf(facts: SaveFacts): SaveState {
   if (facts.conflict) return { kind: 'conflict' };
   if (facts.saving) return { kind: 'saving' };
-  if (facts.entered && !facts.unsaved) return { kind: 'saved', at: facts.savedAt };
+  if (!facts.unsaved) return { kind: 'saved', at: facts.savedAt };
   if (!facts.kept) return { kind: 'unkept' };
   const reason = reasonOf(facts);
   return reason === null ? { kind: 'pending' } : { kind: 'local', reason };
 }
 
 function reasonOf(facts: SaveFacts): string | null {
-  if (facts.failure !== null) return facts.failure;
+  if (facts.failure !== null) return failureWords(facts.failure);
   if (facts.wrong.length > 0)
     return `${count(facts.wrong.length, 'place')} to be put right before the register can take it`;
   if (facts.empty.length > 0) return `${count(facts.empty.length, 'place')} still to be filled in`;
   if (!facts.whole) return 'it is being checked';
-  if (!facts.entered) return 'it is not entered in the register yet';
+  if (!facts.entered)
+    return facts.toOpen === null
+      ? 'it is not entered in the register yet'
+      : `revision ${facts.toOpen} is not opened yet`;
   if (facts.held) return 'the revision is in review';
   return null;
+}
+
+function failureWords({ status, title, detail }: NonNullable<SaveFacts['failure']>): string {
+  const words = lowerFirst((mayPass({ status }) ? title : detail || title).replace(/\.$/, ''));
+  return mayPass({ status }) ? `${words}; it is asked again` : words;
 }
 
 /** The state in words. */
@@ -80,4 +92,9 @@ function timeOfDay(iso: string): string {
 
 function count(number: number, noun: string): string {
   return `${number} ${noun}${number === 1 ? '' : 's'}`;
+}
+
+/** A lost connection or a failing server is worth another try; a refusal is not. */
+export function mayPass({ status }: Pick<ApiProblem, 'status'>): boolean {
+  return status === 0 || status >= 500;
 }

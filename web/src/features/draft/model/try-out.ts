@@ -29,14 +29,30 @@ export interface TryOutField {
 export type TriedOut =
   { state: 'empty' } | { state: 'outcome'; outcome: Outcome } | { state: 'problems'; messages: string[] };
 
-/** The fields to try the draft with: a quantity that a chosen row fills is not asked for. */
-export function tryOutFields({ definition }: CompiledCorrelation, rows: TryOutInput['rows']): TryOutField[] {
+/**
+ * The fields to try the draft with: groups that were given, and the quantities. A quantity that a chosen row fills is
+ * not asked for.
+ */
+export function tryOutFields(
+  { definition }: CompiledCorrelation,
+  { rows, typed }: TryOutInput,
+): TryOutField[] {
   const filled = new Set(
     (definition.tables ?? []).flatMap((table) =>
       Object.keys(table.rows.find(({ key }) => key === rows[table.name])?.values ?? {}),
     ),
   );
-  return definition.quantities
+  const groups = definition.groups
+    .filter(({ symbol }) => typed[symbol] !== undefined)
+    .map(({ symbol, name, tex }) => ({
+      symbol,
+      label: name,
+      tex: symbolTex(symbol, tex),
+      unit: '1',
+      units: ['1'],
+      optional: true,
+    }));
+  const quantities = definition.quantities
     .filter(({ symbol }) => !filled.has(symbol))
     .map(({ symbol, is, unit, tex, role }) => ({
       symbol,
@@ -46,16 +62,18 @@ export function tryOutFields({ definition }: CompiledCorrelation, rows: TryOutIn
       units: unitsFor(unit, QUANTITIES[is]),
       optional: role === 'state',
     }));
+  return [...groups, ...quantities];
 }
 
 /** What the draft gives for the numbers put in. */
 export function tryOut(
   compiled: CompiledCorrelation,
   library: PropertyLibrary,
-  { typed, rows }: TryOutInput,
+  input: TryOutInput,
 ): TriedOut {
+  const { typed, rows } = input;
   const inputs: EvaluationRequest['inputs'] = {};
-  for (const { symbol, unit } of tryOutFields(compiled, rows)) {
+  for (const { symbol, unit } of tryOutFields(compiled, input)) {
     const reading = readQuantity(typed[symbol] ?? { text: '', unit });
     if (reading.kind === 'problem') return { state: 'problems', messages: [`${symbol}: ${reading.message}`] };
     if (reading.kind === 'value') inputs[symbol] = { value: reading.value, unit: reading.unit };
@@ -70,7 +88,10 @@ export function tryOut(
 
 /** The numbers of a worked check, to start a try-out from. */
 export function inputOfCheck(check: CheckRow, { definition }: CompiledCorrelation): TryOutInput {
-  const units = new Map(definition.quantities.map(({ symbol, unit }) => [symbol, unit]));
+  const units = new Map([
+    ...definition.groups.map(({ symbol }) => [symbol, '1'] as const),
+    ...definition.quantities.map(({ symbol, unit }) => [symbol, unit] as const),
+  ]);
   return {
     typed: Object.fromEntries(
       check.inputs.flatMap(({ symbol, value, unit }) => {

@@ -21,8 +21,8 @@ const STAND_IN = 'not written yet';
 const ROUNDS = 6;
 
 /**
- * Compiles what a draft says so far, with stand-ins for title, sources and the like, and without the rows of bounds
- * and checks that do not hold yet. For looking at while writing only: nothing of it leaves the page.
+ * Compiles what a draft says so far, with stand-ins for title, sources and the like, and without the rows that do not
+ * hold yet. For looking at while writing only: nothing of it leaves the page.
  */
 export function workingSheet(value: unknown, library: PropertyLibrary): WorkingSheet {
   let sheet = withStandIns(value as Loose);
@@ -91,17 +91,23 @@ function withStandIns(value: Loose): Loose {
   };
 }
 
-/** The sheet without the bounds and checks that faults are about; null where a fault is about anything else. */
+/** The lists of which a row that does not hold yet may be left out; where others stand on it, they tell. */
+const LISTS = ['quantities', 'groups', 'intermediates', 'bounds', 'checks'] as const;
+const ROW = new RegExp(`^(${LISTS.join('|')})\\[(\\d+)\\]`);
+
+/** The sheet without the rows that faults are about; null where a fault is about anything else. */
 function withoutFaulty(sheet: Loose, fields: readonly string[]): Loose | null {
-  const bad = { bounds: new Set<number>(), checks: new Set<number>() };
+  const bad = new Set<string>();
   for (const field of fields) {
-    const [, list, at] = /^(bounds|checks)\[(\d+)\]/.exec(field) ?? [];
-    if (list === 'bounds' || list === 'checks') bad[list].add(Number(at));
+    const row = ROW.exec(field)?.[0];
+    if (row !== undefined) bad.add(row);
     else if (field !== 'checks') return null;
   }
-  const checks = rowsOf(sheet.checks).filter((_, i) => !bad.checks.has(i));
-  const bounds = rowsOf(sheet.bounds).filter((_, i) => !bad.bounds.has(i));
-  return { ...sheet, bounds, checks: checks.length > 0 ? checks : [checkThatRuns(sheet)] };
+  const kept = LISTS.map(
+    (list) => [list, rowsOf(sheet[list]).filter((_, i) => !bad.has(`${list}[${i}]`))] as const,
+  );
+  const next: Loose = { ...sheet, ...Object.fromEntries(kept) };
+  return rowsOf(next.checks).length > 0 ? next : { ...next, checks: [checkThatRuns(sheet)] };
 }
 
 /** A sheet has one check at least; this one asks for the first result and says nothing. */
