@@ -10,18 +10,21 @@ export const sizes = {
 
 export interface OpenOffice {
   readonly origin: string;
+  /** What the server has said on its terminal so far. */
+  printed(): string;
   /** A page of a person who has not been here before. Ends with the office. */
   newPage(size?: keyof typeof sizes): Promise<Page>;
   /** Ends the browsers and the server and removes their data. */
   close(): Promise<void>;
 }
 
-/** Starts the built product as a new demo office, and a browser for each page asked for. */
-export async function openOffice(): Promise<OpenOffice> {
-  const office = await serveForTests();
+/** Starts the built product as a new office, a demo one unless `env` says otherwise, and a browser for each page. */
+export async function openOffice(env: Record<string, string> = {}): Promise<OpenOffice> {
+  const office = await serveForTests({ env });
   const browsers: Awaited<ReturnType<typeof launchBrowser>>[] = [];
   return {
     origin: office.origin,
+    printed: () => office.output(),
     newPage: async (size = 'desk') => {
       const browser = await launchBrowser({ baseURL: office.origin, viewport: sizes[size] });
       browsers.push(browser);

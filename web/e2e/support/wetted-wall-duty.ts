@@ -1,11 +1,10 @@
 import type { Page } from 'playwright-core';
+import { signInAs } from './sign-in-as';
 
-/** Signs in as a demo engineer, which leads to the register. */
+/** Signs in as a demo engineer and goes on from the desk to the register. */
 export async function signInAsEngineer(page: Page): Promise<void> {
-  await page.goto('/');
-  await page.getByLabel('E-mail address').fill('engineer@merestone.example');
-  await page.getByLabel('Password', { exact: true }).fill('merestone-demo');
-  await page.getByRole('button', { name: 'Sign in' }).click();
+  await signInAs(page, 'engineer');
+  await page.getByRole('navigation', { name: 'Main' }).getByRole('link', { name: 'Register' }).click();
   await page.getByRole('heading', { name: 'Register', exact: true }).waitFor();
 }
 

@@ -19,7 +19,7 @@ export function ValueView({ value, path }: ValueViewProps) {
   if (typeof value === 'object')
     return (
       <dl className="value-members">
-        {Object.entries(value).map(([member, one]) => (
+        {Object.entries(value as Readonly<Record<string, unknown>>).map(([member, one]) => (
           <div key={member}>
             <dt>{memberWords(member)}</dt>
             <dd>

@@ -18,6 +18,7 @@ import { BoundOnSheet } from '../../../shared/ui/on-sheet/bound-on-sheet';
 import { Citation } from '../../../shared/ui/on-sheet/citation';
 import { EquationLine } from '../../../shared/ui/on-sheet/equation-line';
 import { QuantityMeaning } from '../../../shared/ui/on-sheet/quantity-meaning';
+import { equationFields } from './equation-fields';
 import { TableOnSheet } from './table-on-sheet';
 
 /** One field of a sheet as a reviewer goes through it. */
@@ -35,7 +36,7 @@ export interface FieldGroup {
   fields: SheetField[];
 }
 
-interface FieldParts {
+export interface FieldParts {
   definition: CorrelationDefinition;
   /** Null where the definition does not hold together. */
   tex: DefinitionTex | null;
@@ -52,7 +53,7 @@ export function sheetFields(parts: FieldParts): FieldGroup[] {
     { title: 'Where it holds', fields: boundFields(definition) },
     { title: 'Groups', fields: groupFields(parts) },
     { title: 'Quantities', fields: quantityFields(definition) },
-    { title: 'Accuracy, restrictions and cautions', fields: useFields(definition) },
+    { title: 'Accuracy, restrictions and cautions', fields: trustFields(definition) },
     { title: 'Sources', fields: sourceFields(definition) },
     {
       title: 'Worked checks',
@@ -91,43 +92,6 @@ function aboutFields(definition: CorrelationDefinition): SheetField[] {
     text('drivingForce', 'Driving force of the data', sentence(FORCE_WORDS[definition.drivingForce])),
     text('propertyState', 'State of the properties', STATE_WORDS[definition.propertyState]),
   ];
-}
-
-function equationFields({ definition, tex }: FieldParts): SheetField[] {
-  const broken = <p>This equation cannot be set: the definition does not hold together.</p>;
-  const lines = (definition.intermediates ?? []).map(({ symbol, name }, i) => {
-    const line = tex?.intermediates.find((one) => one.symbol === symbol);
-    return {
-      path: `intermediates[${i}]`,
-      label: name,
-      content: line ? <EquationLine line={line} /> : broken,
-    };
-  });
-  const parts = definition.parts.flatMap(({ key, title, coefficient }, i) => {
-    const part = tex?.parts.find((one) => one.key === key);
-    const result = {
-      path: `parts[${i}].result`,
-      label: `${title}: result`,
-      content: part ? <EquationLine line={part.result} /> : broken,
-    };
-    if (!coefficient) return [result];
-    const set = part?.coefficient ? <EquationLine line={part.coefficient} /> : broken;
-    const words = `In ${formatUnit(coefficient.unit)}, on ${coefficient.basis.replaceAll('-', ' ')}, per unit ${coefficient.per}; ${coefficient.rateForm.replaceAll('-', ' ')}.`;
-    return [
-      result,
-      {
-        path: `parts[${i}].coefficient`,
-        label: `${title}: coefficient`,
-        content: (
-          <>
-            {set}
-            <p className="field-note">{words}</p>
-          </>
-        ),
-      },
-    ];
-  });
-  return [...lines, ...parts];
 }
 
 function boundFields(definition: CorrelationDefinition): SheetField[] {
@@ -194,7 +158,12 @@ function quantityFields(definition: CorrelationDefinition): SheetField[] {
   return [...quantities, ...tables];
 }
 
-function useFields({ accuracy, restrictions, cautions, verification }: CorrelationDefinition): SheetField[] {
+function trustFields({
+  accuracy,
+  restrictions,
+  cautions,
+  verification,
+}: CorrelationDefinition): SheetField[] {
   return [
     text('accuracy', 'Accuracy', accuracyText(accuracy)),
     ...restrictions.map((words, i) => text(`restrictions[${i}]`, `Restriction ${i + 1}`, sentence(words))),
