@@ -2,9 +2,10 @@ import type { CompiledCorrelation, PropertyLibrary } from '../sheet/compiled.js'
 import { fluidStateOf } from '../basis/fluid-state.js';
 import { readDrivingForce, type ReadForce } from '../basis/flux.js';
 import { checkDeviationForm, checkDeviationTargets, coveringDeviations } from './check-deviations.js';
+import { checkPressures } from './check-pressures.js';
 import { checkOverDetermined } from './check-over-determined.js';
 import { findingsOf } from './findings-of.js';
-import { readInputs } from './given-values.js';
+import { readInputs, type GivenValues } from './given-values.js';
 import { missingProblems } from './missing-problems.js';
 import { numbersOf } from './numbers-of.js';
 import {
@@ -45,7 +46,7 @@ export function evaluate(
   const work = reckon(sheet, request, inputs.values, library);
   if (work.missing.size > 0)
     return { ok: false, problems: missingProblems(sheet, request, library, work.missing) };
-  return decide(compiled, request, work, force.force, inputs.remarks);
+  return decide(compiled, request, work, force.force, inputs);
 }
 
 function decide(
@@ -53,11 +54,13 @@ function decide(
   request: EvaluationRequest,
   work: Work,
   force: ReadForce | null,
-  remarks: string[],
+  { values: given, remarks }: GivenValues,
 ): Evaluation {
   const { reckoner, supplies } = work;
   // The state of the fluid serves conversions only; asked for here, so that what fills it is held against its bounds too.
   fluidStateOf(reckoner);
+  const pressures = checkPressures(reckoner, given);
+  if (pressures.length > 0) return { ok: false, problems: pressures };
   const findings = findingsOf(reckoner, supplies.filled, work.parts);
   const outside = findings.filter(
     ({ kind }) => kind === 'outside' || kind === 'past-reach' || kind === 'between',

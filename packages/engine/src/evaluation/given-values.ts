@@ -112,6 +112,8 @@ export function readValue(input: InputValue, target: Target, field: string): Rea
     return fault('domain', `${target.title} must be greater than zero.`);
   if (target.sign === 'non-negative' && value < 0)
     return fault('domain', `${target.title} cannot be negative.`);
+  if (target.entry?.fraction === true && value > 1)
+    return fault('domain', `${target.title} is a part of a whole: at most 1, which is 100 %.`);
   if (!Number.isFinite(value)) return fault('domain', `${target.title} is too large to be represented.`);
   return { ok: true, value, remark: unit.remark };
 }

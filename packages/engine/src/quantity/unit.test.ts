@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
-import { dimensionText, sameDimension } from './dimension.js';
+import { sameDimension } from './dimension.js';
 import { convert, OFFERED, unitsFor } from './unit-choices.js';
 import { fromSI, readUnit, toSI, type Unit } from './unit.js';
 

@@ -235,6 +235,9 @@ describe('the refusal', () => {
   });
 
   it('offers no deviation across a regime, says why, and names the other side', async () => {
+    vi.stubGlobal('fetch', () =>
+      Promise.resolve(new Response(JSON.stringify({ title: 'Laminar flow in a pipe' }))),
+    );
     renderEvaluation();
     fillIn({ ...AIR, u: '0.5' });
     await waitFor(() => expect(screen.getByText('No number is given here.')).toBeTruthy());
@@ -242,7 +245,7 @@ describe('the refusal', () => {
     expect(document.querySelector('.refusal')?.textContent).toMatch(
       /change of regime: no deviation is possible/,
     );
-    expect(screen.getByRole('link', { name: 'pipe laminar' })).toBeTruthy();
+    await waitFor(() => expect(screen.getByRole('link', { name: 'Laminar flow in a pipe' })).toBeTruthy());
   });
 
   it('says so past the reach of a deviation', async () => {

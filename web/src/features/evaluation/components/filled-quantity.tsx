@@ -4,6 +4,7 @@ import { formatUnit } from '../../../shared/format/format-unit';
 import { inWords } from '../../../shared/format/in-words';
 import { lowerFirst } from '../../../shared/format/lower-first';
 import { Figure } from '../../../shared/ui/figure';
+import { MarkedText } from '../../../shared/ui/marked-text';
 import { LabelWords } from '../../../shared/ui/quantity-field/label-words';
 import type { EquationInUse, FormField } from '../model/duty-form';
 import { fieldId } from '../model/field-id';
@@ -20,7 +21,7 @@ interface FilledQuantityProps {
 /** A value that the product filled in: in italics, with where it comes from and what it takes for granted. */
 export function FilledQuantity({ field, equation, filled, symbol }: FilledQuantityProps) {
   const id = fieldId(field.key);
-  const shown = filled ? inUnit(filled, field.startUnit) : undefined;
+  const shown = filled && filled.outside === undefined ? inUnit(filled, field.startUnit) : undefined;
   return (
     <div className="quantity">
       <span className="quantity-label" id={`${id}-label`}>
@@ -39,6 +40,11 @@ export function FilledQuantity({ field, equation, filled, symbol }: FilledQuanti
         <span className="quantity-unit">{formatUnit(shown?.unit ?? field.startUnit)}</span>
       </output>
       <div className="quantity-words">
+        {filled?.outside === undefined ? null : (
+          <p className="quantity-error">
+            <MarkedText text={`${filled.outside} The equation does not hold there.`} />
+          </p>
+        )}
         <p className="quantity-hint" id={`${id}-from`}>
           {wordsFor(equation)}
         </p>

@@ -3,9 +3,8 @@ import { useFocusWhenLost } from '../../../shared/hooks/use-focus-when-lost';
 import { accuracyOfResult } from '../../../shared/format/plain-words';
 import { MarkedText } from '../../../shared/ui/marked-text';
 import { copyText } from '../model/copy-text';
-import { notableFindings } from '../model/refusing-findings';
+import { notableFindings, unboundedSymbols } from '../model/refusing-findings';
 import type { Shown } from '../model/shown-outcome';
-import { unboundedWords } from '../model/unbounded-words';
 import { BasesTable } from './bases-table';
 import { CopyButton } from './copy-button';
 import { FindingText } from './finding-text';
@@ -14,6 +13,7 @@ import { GroupsTable } from './groups-table';
 import { Headline } from './headline';
 import { Provenance } from './provenance';
 import { RecordLine } from './record-line';
+import { UnboundedNote } from './unbounded-note';
 import { StepsList } from './steps-list';
 
 interface ResultViewProps {
@@ -29,7 +29,6 @@ export function ResultView({ shown, evaluation, firstNumber }: ResultViewProps) 
   const { outcome } = shown;
   const mark = outcome.outcome === 'deviating' ? outcome.mark : null;
   const notable = notableFindings(outcome.findings);
-  const unbounded = unboundedWords(outcome.findings);
   const reasons = new Map(
     outcome.outcome === 'deviating' ? outcome.deviations.map(({ symbol, reason }) => [symbol, reason]) : [],
   );
@@ -47,11 +46,7 @@ export function ResultView({ shown, evaluation, firstNumber }: ResultViewProps) 
       {notable.map((finding) => (
         <FindingText key={finding.symbol} finding={finding} deviation={reasons.get(finding.symbol)} />
       ))}
-      {unbounded ? (
-        <p>
-          <MarkedText text={unbounded} />
-        </p>
-      ) : null}
+      <UnboundedNote symbols={unboundedSymbols(outcome.findings)} />
       {outcome.remarks.map((remark) => (
         <p key={remark}>{sentence(remark)}</p>
       ))}

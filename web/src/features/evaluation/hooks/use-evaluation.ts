@@ -5,11 +5,11 @@ import { buildRequest } from '../model/build-request';
 import { dutyKey } from '../model/stored-duty';
 import type { EvaluatedSheet } from '../model/evaluated-sheet';
 import { fieldErrors, type FieldError } from '../model/field-error';
-import { filledValues, type FilledValue } from '../model/filled-values';
+import { filledValues, withUsed, type FilledValue } from '../model/filled-values';
 import { askedOf } from '../model/keeping';
 import { previewOf, type Preview } from '../model/preview';
 import { readingsOf } from '../model/readings';
-import { shownOutcome } from '../model/shown-outcome';
+import { numbersOf, shownOutcome } from '../model/shown-outcome';
 import { useCompiledSheet } from './use-compiled-sheet';
 import { useDuty } from './use-duty';
 import { useKeeping } from './use-keeping';
@@ -30,7 +30,7 @@ export function useEvaluation(sheet: EvaluatedSheet, personId: string) {
     (): Preview => (engine.ok ? previewOf(engine, settled.built, settled.sections) : { state: 'empty' }),
     [engine, settled],
   );
-  const filled = useMemo(
+  const computed = useMemo(
     (): ReadonlyMap<string, FilledValue> =>
       engine.ok ? filledValues(engine.library, settled.built, settled.sections) : new Map(),
     [engine, settled],
@@ -39,6 +39,7 @@ export function useEvaluation(sheet: EvaluatedSheet, personId: string) {
 
   const asked = askedOf(form.built.request);
   const shown = useMemo(() => shownOutcome(preview, keeping, asked), [preview, keeping, asked]);
+  const filled = useMemo(() => withUsed(computed, numbersOf(shown)), [computed, shown]);
   const readings = useMemo(
     () => readingsOf(shown, settled.built.request.inputs, filled, sheet),
     [shown, settled, filled, sheet],

@@ -69,7 +69,8 @@ function recordLine(shown: CopyTextInput['shown']): string {
 /** A finding in its words; where a deviation is on record for it, without the advice to record one. */
 function toldIn({ symbol, message }: Finding, { outcome }: CopyTextInput['shown']): string {
   const recorded = outcome.outcome === 'deviating' && outcome.deviations.some((d) => d.symbol === symbol);
-  return recorded ? firstSentence(message) : message;
+  const told = recorded ? firstSentence(message) : message;
+  return told.startsWith(`${symbol} `) ? `${findingLabel(symbol)}${told.slice(symbol.length)}` : told;
 }
 
 function deviationLines(shown: CopyTextInput['shown']): string[] {

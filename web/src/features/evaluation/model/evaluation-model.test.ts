@@ -165,6 +165,19 @@ describe('filled values', () => {
   });
 });
 
+describe('a filled value outside the range of its equation', () => {
+  it('is not shown as a value, and says why', () => {
+    const duty = dutyOf(...typed({ T: ['900', 'degC'], P: ['101325', 'Pa'] }), {
+      do: 'choose-equation',
+      key: 'rho',
+      slug: 'ideal-gas-dry-air',
+    });
+    const sections = buildForm(sheet, duty);
+    const filled = filledValues(engine.library, buildRequest(sections, duty), sections);
+    expect(filled.get('rho')?.outside).toMatch(/above the upper bound/);
+  });
+});
+
 describe('the stored duty', () => {
   it('comes back word for word, and anything of another form is left out', () => {
     const duty = dutyOf(...typed({ u: [' 2 000', 'm/s'], d: ['3.20', 'mm'] }), {

@@ -1,11 +1,15 @@
-import { propertyValue, type InputValue, type PropertyLibrary } from '@merestone/engine';
+import { propertyValue, type InputValue, type Numbers, type PropertyLibrary } from '@merestone/engine';
 import type { BuiltRequest } from './build-request';
+import { firstSentence } from './first-sentence';
+import { refusingFindings } from './refusing-findings';
 import { fieldsOf, type FormField, type FormSection } from './duty-form';
 
 /** The value that a property equation puts into a field. */
 export interface FilledValue {
   value: number;
   unit: string;
+  /** Why the value is not shown: the equation does not hold there. */
+  outside?: string;
 }
 
 /**
@@ -29,6 +33,17 @@ export function filledValues(
   return found;
 }
 
+/** With the values that a number on show was computed from, also where a deviation took them outside. */
+export function withUsed(
+  filled: ReadonlyMap<string, FilledValue>,
+  numbers: Numbers | null,
+): ReadonlyMap<string, FilledValue> {
+  const used = numbers?.equations ?? [];
+  return used.length === 0
+    ? filled
+    : new Map([...filled, ...used.map(({ symbol, value, unit }) => [symbol, { value, unit }] as const)]);
+}
+
 function valueOf(
   { key, unit, filledBy }: FormField,
   library: PropertyLibrary,
@@ -49,5 +64,11 @@ function valueOf(
     .filter(([name]) => name.startsWith(`${key}.`))
     .map(([name, row]) => [name.slice(key.length + 1), row] as const);
   const result = propertyValue(equation, { inputs: own, rows: Object.fromEntries(ownRows) });
-  return result.value === null ? null : { value: result.value, unit: equation.definition.unit || unit };
+  if (result.value === null) return null;
+  const outside = refusingFindings(result.findings).map(({ message }) => firstSentence(message));
+  return {
+    value: result.value,
+    unit: equation.definition.unit || unit,
+    ...(outside.length > 0 ? { outside: outside.join(' ') } : {}),
+  };
 }

@@ -18,7 +18,8 @@ export function readingsOf(
 ): Readings {
   const values: Readings['values'] = {};
   for (const { symbol, unit } of definition.quantities) {
-    const given = inputs[symbol] ?? filled.get(symbol);
+    const computed = filled.get(symbol);
+    const given = inputs[symbol] ?? (computed?.outside === undefined ? computed : undefined);
     const value = given ? convert(given.value, given.unit ?? unit, unit) : null;
     if (value !== null) values[symbol] = { value: tidy(value), unit, given: Object.hasOwn(inputs, symbol) };
   }
