@@ -84,6 +84,7 @@ export type { DictionaryEntry, Sign } from './quantity/dictionary-entry.js';
 export { GROUPS, GROUP_SLOTS, type GroupEntry, type GroupSlot } from './quantity/group-dictionary.js';
 export { groupForSheet, type GroupForSheet } from './quantity/group-for-sheet.js';
 export { readUnit, type Unit, type UnitReading } from './quantity/unit.js';
+export { printedUnit } from './quantity/printed-unit.js';
 export { unitsFor, usualUnitFor, convert } from './quantity/unit-choices.js';
 export { CONSTANTS } from './quantity/constants.js';
 

@@ -217,6 +217,15 @@ describe('where near says nothing', () => {
   });
 });
 
+describe('units in a sentence', () => {
+  test('are set as in print', () => {
+    const unit = 'kg/(m^2 s)';
+    const bounded: Bound = { on: 'L', basis: 'stated', stretches: [{ hi: end(5) }] };
+    expect(holdAgainstBound(bounded, 8, unit).message).toMatch(/^L = 8\u2009kg\/\(m²\u2009s\) is/);
+    expect(holdAgainstBound(bounded, 8, 'degC').message).toContain('°C');
+  });
+});
+
 describe('the end of a definition', () => {
   const constant = bound({ lo: end(0, 'definition'), hi: end(871, 'definition') });
   test('is an ordinary value, such as a constant from a table; a value beside it is near', () => {

@@ -1,5 +1,6 @@
 import { formatNumber } from '../expression/number-text.js';
 import type { Finding } from '../evaluation/outcome.js';
+import { printedUnit } from '../quantity/printed-unit.js';
 import type { Bound, BoundEnd, Stretch } from '../sheet/common-schema.js';
 import { compareWithLimit, holds } from './interval.js';
 import { isTemperature, isWithinReach, ratioTo, reachLimit, type Side } from './reach.js';
@@ -172,5 +173,6 @@ function consequence(end: BoundEnd, reached: boolean, side: Side, unit: string):
 }
 
 function unitText(unit: string): string {
-  return unit === '1' ? '' : `\u2009${unit}`;
+  const printed = printedUnit(unit);
+  return printed === '' ? '' : `\u2009${printed}`;
 }
