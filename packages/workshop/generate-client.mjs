@@ -20,7 +20,7 @@ await answer(async () => {
     const response = await fetch(`${office.origin}/api/openapi.json`);
     if (!response.ok) throw new Error(`The contract answered ${String(response.status)}.`);
     const types = astToString(await openapiTypes(await response.json(), { transform: fileAsBlob }));
-    writeFileSync(fromRoot('packages', 'api-client', 'src', 'schema.ts'), types);
+    writeFileSync(fromRoot('packages', 'api-client', 'src', 'schema.generated.ts'), types);
     return 0;
   } finally {
     await office.stop();

@@ -1,6 +1,6 @@
 import createFetchClient, { type Client } from 'openapi-fetch';
 import { problemFrom } from './problem.js';
-import type { paths } from './schema.js';
+import type { paths } from './schema.generated.js';
 
 export type ApiClient = Client<paths>;
 

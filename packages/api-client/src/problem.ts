@@ -1,4 +1,4 @@
-import type { components } from './schema.js';
+import type { components } from './schema.generated.js';
 
 export type ProblemBody = components['schemas']['ProblemResponse'];
 
