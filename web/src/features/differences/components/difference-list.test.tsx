@@ -59,6 +59,22 @@ describe('the differences of two definitions', () => {
     ]);
   });
 
+  it('tell in words an expression that is only written otherwise', () => {
+    const rewritten = {
+      ...before,
+      parts: [{ ...part, result: { ...part.result, expression: '0.0230*Re^0.83*Sc^0.44' } }],
+    };
+    render(
+      <DifferenceList
+        differences={compareDefinitions(before, rewritten)}
+        before={before}
+        after={rewritten}
+      />,
+    );
+    expect(screen.queryByRole('group', { name: 'Equation' })).toBeNull();
+    expect(item(/^Part “gas side”: result, expression/).textContent).toContain('0.0230');
+  });
+
   it('draw a bound before and after in one picture, told in words as well', () => {
     show();
     const picture = screen.getByRole('img', { name: /Before: .*After: / });

@@ -1,4 +1,3 @@
-import { formatDay } from '../../../shared/format/format-date';
 import type { Sheet } from '../../../shared/api/types';
 import { EmptyState } from '../../../shared/ui/empty-state';
 import { ChoiceField } from '../../../shared/ui/fields/choice-field';
@@ -20,9 +19,9 @@ interface DifferencesViewProps {
 export function DifferencesView({ slug, revisions, chosen, onChoose }: DifferencesViewProps) {
   const { from, to } = chosen;
   const { answer, problem, retry } = useDifferences(slug, from, to);
-  const choices = revisions.map(({ number, standing, at }) => ({
+  const choices = revisions.map(({ number, standing }) => ({
     value: String(number),
-    label: `rev ${number}, ${standing} since ${formatDay(at)}`,
+    label: `rev ${number}, ${standing}`,
   }));
   return (
     <>

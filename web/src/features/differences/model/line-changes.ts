@@ -35,13 +35,9 @@ export function lineChanges(
   const lines = new Map<string, LineChange>();
   const rest: Difference[] = [];
   for (const difference of differences) {
-    const ids = old && now ? typesetIds(difference.path) : [];
-    if (ids.length === 0) rest.push(difference);
-    for (const id of ids) {
-      const change = { id, before: old && lineAt(old, id), after: now && lineAt(now, id) };
-      const title = change.after?.name ?? change.before?.name;
-      if (title !== undefined) lines.set(id, { ...change, title });
-    }
+    const seen = old && now ? typesetIds(difference.path).flatMap((id) => changeAt(old, now, id)) : [];
+    if (seen.length === 0) rest.push(difference);
+    for (const change of seen) lines.set(change.id, change);
   }
   return { lines: [...lines.values()], rest };
 }
@@ -53,6 +49,18 @@ function typesetIds(path: string): string[] {
   const [, list, symbol, part, role] = found;
   if (list !== undefined) return [`${list}/${symbol ?? ''}`];
   return (role === undefined ? ['result', 'coefficient'] : [role]).map((one) => `${one}/${part ?? ''}`);
+}
+
+/** None where the equation is set the same, though it is written otherwise (`0.0230` for `0.023`). */
+function changeAt(old: DefinitionTex, now: DefinitionTex, id: string): LineChange[] {
+  const [before, after] = [lineAt(old, id), lineAt(now, id)];
+  const title = after?.name ?? before?.name;
+  if (title === undefined || looksOf(before) === looksOf(after)) return [];
+  return [{ id, title, before, after }];
+}
+
+function looksOf(line: LineTex | null): string {
+  return JSON.stringify(line && [line.symbolTex, line.unit, line.formulas]);
 }
 
 function lineAt(tex: DefinitionTex, id: string): LineTex | null {

@@ -93,7 +93,7 @@ export function ApprovalForm({ review, onApprove, onReload }: ApprovalFormProps)
         <DateField
           id={APPROVAL_IDS.reviewDue}
           label="To be looked at again by"
-          hint="Empty: by the office’s custom."
+          hint="Empty: after the office’s usual time."
           value={rest.reviewDue}
           error={errorOf(APPROVAL_IDS.reviewDue)}
           onChange={set('reviewDue')}

@@ -100,11 +100,11 @@ test.each([
 
 test.each([
   ['/geometries/pipe?x=1', '/geometries/pipe?x=1'],
-  ['//evil.example', '/register'],
-  ['/\\evil.example', '/register'],
-  ['https://evil.example', '/register'],
-  ['/sign-in?from=/x', '/register'],
-  [null, '/register'],
+  ['//evil.example', '/'],
+  ['/\\evil.example', '/'],
+  ['https://evil.example', '/'],
+  ['/sign-in?from=/x', '/'],
+  [null, '/'],
 ])('after signing in %s leads to %s', (from, to) => {
   expect(pathWithin(from)).toBe(to);
 });
