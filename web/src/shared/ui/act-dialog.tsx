@@ -41,6 +41,8 @@ export function ActDialog({
       className="act-dialog"
       aria-labelledby={heading}
       onCancel={(event) => {
+        // A file picker inside that is closed without a choice cancels as well; the dialog stays.
+        if (event.target !== event.currentTarget) return;
         event.preventDefault();
         onLeave();
       }}

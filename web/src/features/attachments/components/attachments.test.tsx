@@ -108,7 +108,7 @@ test('where a document may go is changed by who may attach', async () => {
   const sent = serve([attached({})], true);
   const user = renderSection();
   await user.click(
-    await screen.findByRole('button', { name: 'Say that gilliland-1934.pdf may leave the office' }),
+    await screen.findByRole('button', { name: 'Let it leave the office: gilliland-1934.pdf' }),
   );
   await waitFor(() =>
     expect(sent).toEqual([

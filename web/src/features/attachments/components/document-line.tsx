@@ -4,7 +4,7 @@ import { formatDay } from '../../../shared/format/format-date';
 import { useAct } from '../../../shared/hooks/use-act';
 import { ProblemNotice } from '../../../shared/ui/problem-notice';
 import { fileAddress } from '../api/use-attachments';
-import { activeContentWords, documentWords, LICENCE_WORDS } from '../model/document-words';
+import { activeContentWords, documentWords, LICENCE_ACTS, LICENCE_WORDS } from '../model/document-words';
 
 interface DocumentLineProps {
   slug: string;
@@ -37,10 +37,10 @@ export function DocumentLine({ slug, revision, document, onLicence }: DocumentLi
           size="small"
           className="document-licence"
           loading={working}
-          aria-label={`Say that ${name} ${LICENCE_WORDS[other]}`}
+          aria-label={`${LICENCE_ACTS[other]}: ${name}`}
           onClick={() => void run(() => onLicence(other))}
         >
-          {other === 'may-leave' ? 'It may leave the office' : 'Keep it in the office'}
+          {LICENCE_ACTS[other]}
         </Button>
       ) : null}
       {problem ? <ProblemNotice problem={problem} /> : null}

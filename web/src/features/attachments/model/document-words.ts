@@ -12,6 +12,12 @@ export const LICENCE_WORDS: Readonly<Record<Licence, string>> = {
   'office-only': 'stays in the office',
 };
 
+/** The act that makes a document one or the other. */
+export const LICENCE_ACTS: Readonly<Record<Licence, string>> = {
+  'may-leave': 'Let it leave the office',
+  'office-only': 'Keep it in the office',
+};
+
 const ACTIVE: Readonly<Record<Attachment['activeContent'][number], string>> = {
   script: 'a script',
   launch: 'a call of another program',
