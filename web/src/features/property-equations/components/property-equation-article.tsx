@@ -87,7 +87,7 @@ function Formulas({ equation: { slug, definition, gives, unit } }: { equation: P
       )}
       {definition.dimensional ? (
         <p className="property-units">
-          A formula of figures: it takes each quantity in the unit given below, and answers in{' '}
+          A dimensional formula: each quantity goes in as a number in the unit given below; the answer is in{' '}
           {formatUnit(unit) || 'no unit'}.
         </p>
       ) : null}

@@ -2,6 +2,7 @@ import { memo } from 'react';
 import type { CheckReport, Sheet } from '../../../shared/api/types';
 import { formatNumber } from '../../../shared/format/format-number';
 import { Figure } from '../../../shared/ui/figure';
+import { MarkedText } from '../../../shared/ui/marked-text';
 import { MarginNote } from '../../../shared/ui/margin-note';
 import { SetTable } from '../../../shared/ui/set-table';
 import { MarginRow } from '../../../shared/ui/sheet-page';
@@ -52,11 +53,9 @@ function CheckRows({ check }: { check: CheckReport }) {
     <tbody>
       <tr className="check-title">
         <th scope="rowgroup" colSpan={4}>
-          {check.title}
+          <MarkedText text={check.title} />
           <span className="symbol-note">
-            {check.kind === 'published' ? 'Published example' : 'Computed by us, guards against slips only'}
-            {check.source ? `: ${check.source.replace(/\.$/, '')}` : ''}; within {check.tolerancePercent} %.{' '}
-            {check.note ?? ''}
+            <MarkedText text={wordsOf(check)} />
           </span>
         </th>
         <td>{check.passed ? 'reproduces' : <strong className="check-fails">does not reproduce</strong>}</td>
@@ -70,9 +69,7 @@ function CheckRows({ check }: { check: CheckReport }) {
             <Figure value={expected} unit={unit} exactly />
           </td>
           <td className="number">{found === null ? 'none' : <Figure value={found} unit={unit} />}</td>
-          <td className="number">
-            {deviationPercent === null ? '' : `${formatNumber(deviationPercent, 2)} %`}
-          </td>
+          <td className="number">{deviationPercent === null ? '' : deviationText(deviationPercent)}</td>
           <td>{passed ? 'within' : 'outside'}</td>
         </tr>
       ))}
@@ -90,6 +87,22 @@ function CheckRows({ check }: { check: CheckReport }) {
       ))}
     </tbody>
   );
+}
+
+function wordsOf({ kind, source, tolerancePercent, note }: CheckReport): string {
+  const origin = kind === 'published' ? 'Published example' : 'Computed by us';
+  const from = source ?? (kind === 'published' ? '' : 'guards against slips only');
+  const told = from === '' ? origin : `${origin}: ${from.replace(/\.$/, '')}`;
+  return `${told}; within ${tolerancePercent} %.${note ? ` ${note}` : ''}`;
+}
+
+/** Below this a deviation is the rounding of what was expected. */
+const NOTHING_PERCENT = 0.001;
+
+function deviationText(percent: number): string {
+  return Math.abs(percent) < NOTHING_PERCENT
+    ? `< ${formatNumber(NOTHING_PERCENT, 1)} %`
+    : `${formatNumber(percent, 2)} %`;
 }
 
 function summaryOf(checks: readonly CheckReport[]): string {
