@@ -74,7 +74,7 @@ const allowances = [
     from: local('api-root'),
     allow: { to: local(['api-common', 'api-database', 'api-feature', 'api-seed']) },
   },
-  { from: local('api-test'), allow: { to: [engine, local([...api, 'api-test'])] } },
+  { from: local('api-test'), allow: { to: [engine, local([...api, 'api-test', 'workshop'])] } },
   {
     from: { element: { type: api }, file: { categories: 'test' } },
     allow: { to: [engine, local([...api, 'api-test'])] },
