@@ -6,7 +6,7 @@ export interface DictionaryEntry {
   title: string;
   /** Coherent SI unit, which also fixes the dimension. */
   unit: string;
-  /** Unit that people have the value in, where it is not the SI one or a formula may ask for another: forms start with it. */
+  /** Unit that people have the value in, where it is not the SI one: forms start with it. */
   usual?: string;
   /** The only units to offer, where others of the same dimension would be another thing. */
   offered?: readonly string[];

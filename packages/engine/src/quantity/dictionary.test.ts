@@ -46,6 +46,7 @@ describe('the quantity dictionary', () => {
     (_name, entry) => {
       const [own, usual] = [readUnit(entry.unit), readUnit(entry.usual ?? '?')];
       expect(own.ok && usual.ok && measuresSame(own.unit, usual.unit)).toBe(true);
+      expect(entry.usual).not.toBe(entry.unit);
       expect(unitsFor(entry.unit, entry)).toContain(entry.usual);
       expect(usualUnitFor(entry.unit, entry)).toBe(entry.usual);
     },
@@ -59,6 +60,7 @@ describe('the quantity dictionary', () => {
     ['liquid-viscosity', 'Pa s', 'mPa s'],
     ['liquid-density', 'g/cm^3', 'kg/m^3'],
     ['superficial-gas-velocity', 'm/s', 'm/s'],
+    ['wind-speed', 'm/h', 'm/s'],
     ['corrugation-angle', 'deg', 'deg'],
   ])('%s on a sheet in %s is asked for in %s', (name, own, asked) => {
     expect(usualUnitFor(own, QUANTITIES[name])).toBe(asked);

@@ -130,9 +130,12 @@ export function unitsFor(unit: string, kind: UnitKind = {}): string[] {
   return [unit, ...fits.filter((offered) => offered !== unit)];
 }
 
-/** The unit a form starts with for a quantity of a sheet: the usual one of its kind, else the sheet's own. */
-export function usualUnitFor(unit: string, kind: UnitKind & { usual?: string } = {}): string {
-  const { usual } = kind;
+/**
+ * The unit a form starts with for a quantity of a sheet: the usual one of its kind, else the SI one; a sheet's own
+ * (m/h, lb/ft^3) is that of its formula and not of the people who use it.
+ */
+export function usualUnitFor(unit: string, kind: UnitKind & { usual?: string; unit?: string } = {}): string {
+  const usual = kind.usual ?? kind.unit;
   return usual !== undefined && unitsFor(unit, kind).includes(usual) ? usual : unit;
 }
 

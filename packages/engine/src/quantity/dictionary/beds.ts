@@ -56,7 +56,7 @@ export const beds: DictionaryPart = {
     sign: 'positive',
     hint: 'Not the nominal size: some 1.25 to 1.45 times as large.',
   },
-  'packed-height': { title: 'Height of the packing', unit: 'm', usual: 'm', symbol: 'Z', sign: 'positive' },
+  'packed-height': { title: 'Height of the packing', unit: 'm', symbol: 'Z', sign: 'positive' },
   'liquid-hold-up': {
     title: 'Liquid hold-up as a fraction of the bed volume',
     unit: '1',

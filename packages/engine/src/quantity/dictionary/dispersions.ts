@@ -5,7 +5,6 @@ export const dispersions: DictionaryPart = {
   'power-per-volume': {
     title: 'Power drawn per volume of liquid',
     unit: 'W/m^3',
-    usual: 'W/m^3',
     symbol: 'P_V',
     sign: 'positive',
     hint: 'Gassed power where gas is sparged; it is lower than the ungassed.',

@@ -13,7 +13,6 @@ export const flow: DictionaryPart = {
   'liquid-superficial-mass-velocity': {
     title: 'Superficial mass velocity of the liquid',
     unit: 'kg/(m^2 s)',
-    usual: 'kg/(m^2 s)',
     symbol: 'L',
     sign: 'positive',
     hint: 'Mass flow over the empty cross-section.',
@@ -21,7 +20,6 @@ export const flow: DictionaryPart = {
   'gas-superficial-mass-velocity': {
     title: 'Superficial mass velocity of the gas',
     unit: 'kg/(m^2 s)',
-    usual: 'kg/(m^2 s)',
     symbol: 'G',
     sign: 'positive',
     hint: 'Mass flow over the empty cross-section.',

@@ -2,18 +2,16 @@ import type { DictionaryPart } from '../dictionary-entry.js';
 
 /** Fluid properties. */
 export const properties: DictionaryPart = {
-  'gas-density': { title: 'Gas density', unit: 'kg/m^3', usual: 'kg/m^3', symbol: 'rho', sign: 'positive' },
+  'gas-density': { title: 'Gas density', unit: 'kg/m^3', symbol: 'rho', sign: 'positive' },
   'liquid-density': {
     title: 'Liquid density',
     unit: 'kg/m^3',
-    usual: 'kg/m^3',
     symbol: 'rho',
     sign: 'positive',
   },
   'fluid-density': {
     title: 'Fluid density',
     unit: 'kg/m^3',
-    usual: 'kg/m^3',
     symbol: 'rho',
     sign: 'positive',
     covers: ['gas-density', 'liquid-density'],

@@ -13,7 +13,6 @@ export const propertyInputs: DictionaryPart = {
   'density-difference': {
     title: 'Density difference that drives the motion',
     unit: 'kg/m^3',
-    usual: 'kg/m^3',
     symbol: 'delta_rho',
     sign: 'non-negative',
     hint: 'Between surface and bulk, or between the phases: without sign.',

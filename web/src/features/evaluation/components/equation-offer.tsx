@@ -23,7 +23,9 @@ export function EquationOffer({ evaluation }: { evaluation: EvaluationState }) {
     <div className="equation-offer" role="group" aria-label="Property equations">
       {sets.map((set) => (
         <Button key={set.phase ?? ''} size="small" onClick={() => use(set)}>
-          {set.phase === null ? 'Use property equations where listed' : `Use those listed for a ${set.phase}`}
+          {set.phase === null
+            ? 'Use property equations where listed'
+            : `Use property equations listed for a ${set.phase}`}
         </Button>
       ))}
       {sets[0] ? <span>{offerWords(sets[0])}</span> : null}
