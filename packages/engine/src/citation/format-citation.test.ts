@@ -81,14 +81,16 @@ describe('formatCitation', () => {
   });
 
   it('writes a thesis with its kind and school', () => {
-    const { text } = formatCitation({
+    // A member beyond those we rely on, as CSL-JSON allows.
+    const thesis = {
       type: 'thesis',
       title: 'Mass transfer from solid shapes to water in streamline and turbulent flow',
       author: [{ family: 'Linton', given: 'W. H.' }],
       issued: { 'date-parts': [[1949]] },
       genre: 'Sc.D. thesis',
       publisher: 'Massachusetts Institute of Technology',
-    });
+    };
+    const { text } = formatCitation(thesis);
     expect(text).toBe(
       'Linton, W. H. (1949). Mass transfer from solid shapes to water in streamline and turbulent flow, ' +
         'Sc.D. thesis, Massachusetts Institute of Technology.',
