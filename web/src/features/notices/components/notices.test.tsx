@@ -4,6 +4,7 @@ import { MemoryRouter } from 'react-router-dom';
 import { SWRConfig } from 'swr';
 import { afterEach, expect, test, vi } from 'vitest';
 import type { MailChoices, Notice } from '../../../shared/api/types';
+import { countWords } from '../model/count-words';
 import { NOTICE_KINDS } from '../model/notice-kinds';
 import { pathOfNotice } from '../model/path-of-notice';
 import { MailChoicesForm } from './mail-choices-form';
@@ -104,4 +105,13 @@ test.each([
   ['', null],
 ])('a notice to %j leads to %j', (href, to) => {
   expect(pathOfNotice(href)).toBe(to);
+});
+
+test.each([
+  [0, 'no'],
+  [13, 'thirteen'],
+  [20, 'twenty'],
+  [21, '21'],
+])('%i is told as %s', (count, words) => {
+  expect(countWords(count)).toBe(words);
 });
