@@ -66,7 +66,7 @@ export const BoundFields = memo(function BoundFields({ row, at, path, symbols }:
           ))}
           {stretches ? <p className="field-error">{stretches.message}</p> : null}
           <RowAct
-            what={`Add a stretch to the bound on ${row.on}`}
+            what={`Add a stretch, where there is a gap between the data on ${row.on}`}
             onClick={() => edit({ stretches: [...row.stretches, emptyStretch()] })}
           >
             add a stretch, where there is a gap between the data

@@ -76,7 +76,7 @@ export function ConditionFields({ path, when, onChange }: ConditionFieldsProps) 
         );
       })}
       {overlap ? <p className="field-error">{overlap.message}</p> : null}
-      <RowAct what="Add a condition" onClick={() => onChange([...when, emptyCondition()])}>
+      <RowAct what="And another condition" onClick={() => onChange([...when, emptyCondition()])}>
         and another condition
       </RowAct>
     </div>

@@ -107,7 +107,7 @@ function PieceFields({ piece, number, path, onChange, onRemove }: PieceFieldsPro
         onChange={(title) => onChange({ title })}
         hint="Laminar, transition …"
       />
-      <RowAct what={`Remove piece ${number}`} onClick={onRemove}>
+      <RowAct what={`Remove this piece, ${number}`} onClick={onRemove}>
         remove this piece
       </RowAct>
     </div>

@@ -1,5 +1,7 @@
 import { Button } from 'antd';
 import { useState } from 'react';
+import { Link } from 'react-router-dom';
+import { paths } from '../../../shared/paths';
 import { useReviewers } from '../api/use-reviewers';
 import type { Draft } from '../hooks/use-draft';
 import { TickField } from './fields/tick-field';
@@ -55,6 +57,12 @@ export function SubmitSection({ draft, personId, onSubmit }: SubmitSectionProps)
         </Button>
         <p className="draft-told" id={`${SUBMIT_ID}-words`}>
           {why ?? (warnings > 0 ? `${warnings} warnings will travel along.` : 'Nothing stands in its way.')}
+          {autosave.base !== null && autosave.standing === 'in review' ? (
+            <>
+              {' '}
+              <Link to={paths.review(draft.form.slug, autosave.base.revision)}>Its review</Link>
+            </>
+          ) : null}
         </p>
       </div>
     </section>
@@ -67,7 +75,8 @@ function whyNot({ autosave, live, opening }: Draft): string | null {
       ? 'Enter the sheet in the register as a draft first.'
       : `Open revision ${opening.nextRevision} as a draft first.`;
   if (autosave.theirs !== null) return 'Choose first which version counts.';
-  if (autosave.standing === 'in review') return 'It is in review already.';
+  if (autosave.standing === 'in review')
+    return 'It is in review. Once it is changed as asked, say on its review page that it is ready again.';
   if (live.verdict.definition === null) return 'The sheet is not whole yet; the findings say what is open.';
   const errors = live.verdict.report?.remarks.filter(({ verdict }) => verdict === 'error').length ?? 0;
   return errors > 0

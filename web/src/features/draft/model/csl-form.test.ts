@@ -1,4 +1,3 @@
-import type { CslItem } from '@merestone/engine';
 import { expect, test } from 'vitest';
 import { citationFields, citationOf } from './csl-form';
 
@@ -16,7 +15,7 @@ const ITEM = {
   volume: 26,
   'container-title': 'Ind. Eng. Chem.',
   'number-of-pages': '8',
-} satisfies CslItem & Record<string, unknown>;
+};
 
 test('a citation comes back as it came, with members that the form does not show', () => {
   expect(citationOf(citationFields(ITEM))).toStrictEqual(ITEM);
