@@ -133,13 +133,14 @@ describe('an approval from a later date', () => {
   test('of a suspended revision that comes back too late: superseded', async () => {
     await approved(office, draft(office, 'back'));
     await approveNext('back', { effectiveFrom: dayIn(office.test, 5) });
-    const post = async (name: string) =>
-      (await ask(office.authority))
-        .post(`/api/correlations/back/revisions/1/${name}`)
-        .send({ reason: REASON });
-    await await post('suspension');
+    const post = async (name: string): Promise<void> => {
+      const authority = await ask(office.authority);
+      const path = `/api/correlations/back/revisions/1/${name}`;
+      await authority.post(path).send({ reason: REASON }).expect(201);
+    };
+    await post('suspension');
     office.test.clock.forward(6 * DAY);
-    await await post('reinstatement');
+    await post('reinstatement');
     expect((await sheetOf(office.engineer, 'back/revisions/1')).standing).toBe('superseded');
   });
 
@@ -207,7 +208,7 @@ describe('the day of the next review', () => {
     await tick();
     await tick();
     expect(reminders(office.authority)).toMatchObject(
-      [/ is due /, / was due /].map((text) => expect.stringMatching(text)),
+      [/ is due /, / was due /].map((text) => expect.stringMatching(text) as string),
     );
     expect(journalled('revision.review-due')).toHaveLength(2);
   });

@@ -34,7 +34,7 @@ interface Act {
 const post = (agent: Agent, { slug, number }: RevisionRecord, act: string, body: object) =>
   agent.post(`/api/correlations/${slug}/revisions/${number}/${act}`).send(body);
 const everywhere = <T>(who: T, ...states: State[]): Partial<Record<State, T>> =>
-  Object.fromEntries(states.map((state) => [state, who])) as Partial<Record<State, T>>;
+  Object.fromEntries(states.map((state): [State, T] => [state, who]));
 
 const IN_REVIEW: State[] = ['in review', 'recommended', 'changes asked'];
 const SEEN_BY_ALL: State[] = ['approved', 'suspended', 'superseded', 'withdrawn'];

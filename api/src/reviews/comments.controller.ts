@@ -7,7 +7,7 @@ import { Sheet } from '../correlations/dto/sheet.dto.js';
 import { SheetEtag } from '../correlations/sheet-etag.interceptor.js';
 import { RevisionParams } from '../revisions/dto/revision-params.dto.js';
 import { CommentParams } from './dto/comment-params.dto.js';
-import { CommentBody, NothingBody, TextBody } from './dto/review-bodies.dto.js';
+import { CommentBody, TextBody } from './dto/review-bodies.dto.js';
 import { Life } from './life.decorator.js';
 import { ReviewsService } from './reviews.service.js';
 
@@ -34,7 +34,7 @@ export class CommentsController {
   @Post(':id/resolution')
   @Permission('correlation.comment')
   @Life('resolveComment', 'Settles a comment: by whoever made it, or by the originator once it has an answer')
-  resolve(@CurrentActor() actor: Actor, @Param() path: CommentParams, @Body() _body: NothingBody): Sheet {
+  resolve(@CurrentActor() actor: Actor, @Param() path: CommentParams): Sheet {
     return this.reviews.resolve(actor, path, path.id);
   }
 }

@@ -10,7 +10,6 @@ import { RevisionParams } from '../revisions/dto/revision-params.dto.js';
 import {
   ApprovalBody,
   NoteBody,
-  NothingBody,
   ReasonBody,
   ReviewBody,
   SubmissionBody,
@@ -47,7 +46,7 @@ export class ReviewsController {
   @Post('assignments')
   @Permission('correlation.review')
   @Life('takeReview', 'Takes a review from the desk')
-  take(@CurrentActor() actor: Actor, @Param() path: RevisionParams, @Body() _body: NothingBody): Sheet {
+  take(@CurrentActor() actor: Actor, @Param() path: RevisionParams): Sheet {
     return this.reviews.take(actor, path);
   }
 

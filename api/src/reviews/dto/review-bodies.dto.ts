@@ -135,9 +135,6 @@ export class NoteBody {
   readonly note?: string;
 }
 
-/** An act that needs no words. */
-export class NothingBody {}
-
 export class ApprovalBody {
   @ApiProperty({ type: String, description: "The caller's own password, once more", format: 'password' })
   @IsString()
