@@ -1767,7 +1767,6 @@ export interface components {
             /** @description What was done about it */
             note?: string;
         };
-        NothingBody: Record<string, never>;
         ChecklistDto: {
             /** @description The expression is that of the source */
             expression: boolean;
@@ -4880,11 +4879,7 @@ export interface operations {
             };
             cookie?: never;
         };
-        requestBody: {
-            content: {
-                "application/json": components["schemas"]["NothingBody"];
-            };
-        };
+        requestBody?: never;
         responses: {
             /** @description The sheet as it stands now */
             201: {
@@ -5461,11 +5456,7 @@ export interface operations {
             };
             cookie?: never;
         };
-        requestBody: {
-            content: {
-                "application/json": components["schemas"]["NothingBody"];
-            };
-        };
+        requestBody?: never;
         responses: {
             /** @description The sheet as it stands now */
             201: {

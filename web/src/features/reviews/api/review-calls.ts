@@ -16,9 +16,7 @@ export type WithdrawalBody = Schemas['WithdrawalBody'];
 const at = ({ slug, revision }: RevisionKey) => ({ path: { slug, number: revision } });
 
 export function takeReview(key: RevisionKey) {
-  return ask(
-    api.POST('/api/correlations/{slug}/revisions/{number}/assignments', { params: at(key), body: {} }),
-  );
+  return ask(api.POST('/api/correlations/{slug}/revisions/{number}/assignments', { params: at(key) }));
 }
 
 /** An empty field is the sheet as a whole. */
@@ -44,7 +42,6 @@ export function resolveComment(key: RevisionKey, id: number) {
   return ask(
     api.POST('/api/correlations/{slug}/revisions/{number}/comments/{id}/resolution', {
       params: { path: { ...at(key).path, id } },
-      body: {},
     }),
   );
 }
