@@ -35,7 +35,15 @@ const namedExportsOnly = ['ExportDefaultDeclaration', 'ExportSpecifier[exported.
 );
 
 export default defineConfig(
-  { ignores: ['**/dist/', '**/node_modules/', '.data/', '.cache/', 'packages/api-client/src/schema.generated.ts'] },
+  {
+    ignores: [
+      '**/dist/',
+      '**/node_modules/',
+      '.data/',
+      '.cache/',
+      'packages/api-client/src/schema.generated.ts',
+    ],
+  },
   {
     // A rule that can be switched off beside the line it annoys is no rule.
     linterOptions: { noInlineConfig: true, reportUnusedDisableDirectives: 'error' },
