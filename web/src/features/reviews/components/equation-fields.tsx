@@ -1,6 +1,6 @@
 import { formatUnit } from '../../../shared/format/format-unit';
 import { EquationLine } from '../../../shared/ui/on-sheet/equation-line';
-import type { FieldParts, SheetField } from './sheet-fields';
+import type { FieldParts, SheetField } from './sheet-field';
 
 /** The intermediates of a sheet and, of each of its parts, result and coefficient. */
 export function equationFields({ definition, tex }: FieldParts): SheetField[] {

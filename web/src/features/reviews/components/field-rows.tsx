@@ -4,7 +4,7 @@ import { MarkedText } from '../../../shared/ui/marked-text';
 import { byRow, rowId } from '../model/field-rows';
 import type { Talk } from '../model/talk';
 import { CommentThread } from './comment-thread';
-import type { FieldGroup, SheetField } from './sheet-fields';
+import type { FieldGroup, SheetField } from './sheet-field';
 
 interface FieldRowsProps {
   groups: readonly FieldGroup[];

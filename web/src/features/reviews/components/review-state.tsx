@@ -9,7 +9,7 @@ import { ProblemNotice } from '../../../shared/ui/problem-notice';
 import { MarginRow } from '../../../shared/ui/sheet-page';
 import { rowId, rowOf } from '../model/field-rows';
 import { openWords, progressWords } from '../model/review-words';
-import type { FieldGroup } from './sheet-fields';
+import type { FieldGroup } from './sheet-field';
 
 interface ReviewStateProps {
   review: Review;

@@ -1,5 +1,4 @@
-import type { CorrelationDefinition, DefinitionTex } from '@merestone/engine';
-import type { ReactNode } from 'react';
+import type { CorrelationDefinition } from '@merestone/engine';
 import {
   AVERAGING_WORDS,
   FORCE_WORDS,
@@ -19,30 +18,8 @@ import { Citation } from '../../../shared/ui/on-sheet/citation';
 import { EquationLine } from '../../../shared/ui/on-sheet/equation-line';
 import { QuantityMeaning } from '../../../shared/ui/on-sheet/quantity-meaning';
 import { equationFields } from './equation-fields';
+import type { FieldGroup, FieldParts, SheetField } from './sheet-field';
 import { TableOnSheet } from './table-on-sheet';
-
-/** One field of a sheet as a reviewer goes through it. */
-export interface SheetField {
-  /** Path in the definition, to which comments are anchored. */
-  path: string;
-  /** What the field is called; `ownLabel`: its content says so itself. */
-  label: string;
-  ownLabel?: boolean;
-  content: ReactNode;
-}
-
-export interface FieldGroup {
-  title: string;
-  fields: SheetField[];
-}
-
-export interface FieldParts {
-  definition: CorrelationDefinition;
-  /** Null where the definition does not hold together. */
-  tex: DefinitionTex | null;
-  /** Sets a worked check by its place. */
-  check: (place: number) => ReactNode;
-}
 
 /** Every field of a sheet, in the order of its page. */
 export function sheetFields(parts: FieldParts): FieldGroup[] {
