@@ -17,7 +17,7 @@ export function candidate(
     title: compiled.definition.title,
     revision: record.number,
     standing: record.standing,
-    inUse: record.standing === 'approved',
+    inUse: record.inForce,
   };
   const none = { result: null, coefficient: null, farthest: null };
   if (!evaluation.ok) {
