@@ -142,8 +142,7 @@ describe('GET …/citations', () => {
   ])('exports %s', async (query, type, ending, begin) => {
     const response = await office.auditor.agent
       .get(path + query)
-      .buffer(true)
-      .parse(asText)
+      .responseType('blob')
       .expect(200);
     expect(response.type).toBe(type);
     expect(response.headers['content-disposition']).toBe(`attachment; filename="vapours-rev-1.${ending}"`);
@@ -153,7 +152,7 @@ describe('GET …/citations', () => {
 
   it('gives back what was cited', async () => {
     for (const format of ['bibtex', 'ris', 'csl-json']) {
-      const file = await office.engineer.agent.get(`${path}?format=${format}`).buffer(true).parse(asText);
+      const file = await office.engineer.agent.get(`${path}?format=${format}`).responseType('blob');
       const { body } = await read({ text: String(file.body) }).expect(200);
       expect((body as { items: unknown }).items).toEqual([csl]);
     }
@@ -172,11 +171,3 @@ describe('GET …/citations', () => {
     await agent.get(`${path}?format=ris&format=bibtex`).expect(400);
   });
 });
-
-type Parser = (response: NodeJS.ReadableStream, done: (error: Error | null, body: unknown) => void) => void;
-
-const asText: Parser = (response, done) => {
-  const chunks: Buffer[] = [];
-  response.on('data', (chunk: Buffer) => chunks.push(chunk));
-  response.on('end', () => done(null, Buffer.concat(chunks).toString('utf8')));
-};
