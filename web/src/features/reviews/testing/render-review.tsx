@@ -49,7 +49,7 @@ export function serveActs(status = 201, body: unknown = {}): Asked[] {
     asked.push({
       method: call.method,
       path: pathname,
-      body: await call.json(),
+      body: JSON.parse((await call.text()) || 'null') as unknown,
       ifMatch: call.headers.get('if-match'),
     });
     return new Response(JSON.stringify(body), { status });
