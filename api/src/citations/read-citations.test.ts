@@ -30,7 +30,7 @@ describe('BibTeX', () => {
         title   = {{Diffusion} of Vapors} # " into " # {Air Streams},
         JOURNAL = iec, year = 1934, month = may, volume = 26, number = {5},
         pages = {516--523}, doi = {https://doi.org/10.1021/ie50293a010},
-        abstract = {Not kept.}, file = {/home/somebody/paper.pdf},
+        abstract = {Not kept.}, file = {C:/papers/paper.pdf},
       }`;
     expect(readCitations(text)).toEqual({
       format: 'bibtex',
